@@ -1,0 +1,167 @@
+package dev.couplet.form;
+
+/**
+ * A quadratic form in 0/1 variables, to be minimised: {@code constant + sum a_i x_i + sum_{i<j}
+ * b_ij x_i x_j}.
+ *
+ * <p>Each pair stands once and multiplies its product once. Coefficients are finite; those that are
+ * zero are not stored. If all are integers, or multiples of one power of two, and {@link #exact()}
+ * holds, every energy is exact.
+ *
+ * <p>Immutable; two forms are equal if their coefficients are. Memory: 12 bytes a pair and 12 a
+ * variable.
+ */
+@CheckReturnValue
+public final class Qubo {
+  private final Quadratic form;
+
+  private Qubo(Quadratic form) {
+    this.form = form;
+  }
+
+  /** A builder of forms in {@code size} variables. */
+  public static Builder builder(int size) {
+    return new Builder(size);
+  }
+
+  /** The number of variables n. */
+  public int size() {
+    return form.size();
+  }
+
+  /** The number of pairs m with a non-zero coefficient. */
+  public int pairs() {
+    return form.value.length;
+  }
+
+  /** The energy of the state of zeros. */
+  public double constant() {
+    return form.constant;
+  }
+
+  /** The coefficient of variable {@code i}. */
+  public double linear(int i) {
+    return form.linear(i);
+  }
+
+  /** The coefficient of {@code x_i x_j}, 0 if there is none; O(log m). */
+  public double pair(int i, int j) {
+    return form.pair(i, j);
+  }
+
+  /** Passes every pair with a non-zero coefficient to the visitor. */
+  public void forEachPair(PairVisitor visitor) {
+    form.forEachPair(visitor);
+  }
+
+  /**
+   * The energy of a state; O(n + m).
+   *
+   * @throws IllegalArgumentException if the state is of another size
+   */
+  public double value(State state) {
+    Check.stateSize(state, size());
+    double sum = form.constant;
+    for (int i = 0; i < form.linear.length; i++) {
+      if (!state.get(i)) {
+        continue;
+      }
+      sum += form.linear[i];
+      for (int k = form.rowStart[i]; k < form.rowStart[i + 1]; k++) {
+        if (state.get(form.column[k])) {
+          sum += form.value[k];
+        }
+      }
+    }
+    return sum;
+  }
+
+  /** Whether every energy of this form is computed without rounding. */
+  public boolean exact() {
+    return form.exact();
+  }
+
+  /** The sum of the magnitudes of all coefficients: no energy is larger in magnitude. */
+  public double magnitude() {
+    return form.magnitude();
+  }
+
+  /**
+   * This form with every coefficient multiplied by {@code factor}.
+   *
+   * @throws IllegalArgumentException if the factor or a product is not finite
+   */
+  public Qubo times(double factor) {
+    Check.finite("the factor", factor);
+    Builder scaled = builder(size()).allowRounding().addConstant(constant() * factor);
+    for (int i = 0; i < size(); i++) {
+      scaled.addLinear(i, linear(i) * factor);
+    }
+    forEachPair((i, j, value) -> scaled.addPair(i, j, value * factor));
+    return scaled.build();
+  }
+
+  /** The same energies over spins, {@code x = (1 - s) / 2}; O(n + m), exact if this form is. */
+  public Ising toIsing() {
+    Ising.Builder ising = Ising.builder(size()).allowRounding().addConstant(constant());
+    for (int i = 0; i < size(); i++) {
+      double half = linear(i) / 2;
+      ising.addConstant(half).addLinear(i, -half);
+    }
+    forEachPair(
+        (i, j, value) -> {
+          double quarter = value / 4;
+          ising.addConstant(quarter).addLinear(i, -quarter).addLinear(j, -quarter);
+          ising.addPair(i, j, quarter);
+        });
+    return ising.build();
+  }
+
+  /** The same form as a polynomial of degree at most 2. */
+  public Polynomial toPolynomial() {
+    Polynomial.Builder polynomial = Polynomial.builder(size()).add(constant());
+    for (int i = 0; i < size(); i++) {
+      polynomial.add(linear(i), i);
+    }
+    forEachPair((i, j, value) -> polynomial.add(value, i, j));
+    return polynomial.build();
+  }
+
+  @Override
+  public boolean equals(Object object) {
+    return object instanceof Qubo other && form.equals(other.form);
+  }
+
+  @Override
+  public int hashCode() {
+    return form.hashCode();
+  }
+
+  @Override
+  public String toString() {
+    return form.describe("Qubo");
+  }
+
+  /** Collects the coefficients of a {@link Qubo}; entries for the same place add up. */
+  public static final class Builder extends FormBuilder<Builder> {
+    private Builder(int size) {
+      super(size);
+    }
+
+    @Override
+    Builder self() {
+      return this;
+    }
+
+    /**
+     * The form; the builder can go on and build again.
+     *
+     * @throws IllegalArgumentException if a sum overflows, or integer coefficients are too large
+     *     for exact energies and {@link #allowRounding()} was not called
+     */
+    @CheckReturnValue
+    public Qubo build() {
+      return new Qubo(finish());
+    }
+  }
+}

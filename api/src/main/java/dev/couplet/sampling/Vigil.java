@@ -1,0 +1,98 @@
+package dev.couplet.sampling;
+
+import java.time.Duration;
+import java.util.OptionalDouble;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.LongSupplier;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * The watch kept over one run: methods ask it, at most 2^20 elementary steps apart, whether to go
+ * on.
+ *
+ * <p>It begins when it is made and answers for the deadline, the stop signal, and an interrupt of
+ * the thread that made it (whose flag it leaves set). Once over, it stays over, with the first
+ * reason. Thread-safe: all threads of a run share one.
+ */
+public final class Vigil {
+  /** Work done between two looks must not exceed this many elementary steps. */
+  public static final int STEPS = 1 << 20;
+
+  private static final long REPORT_NANOS = 50_000_000;
+
+  private final Watch watch;
+  private final LongSupplier clock;
+  private final long began;
+  private final long limit;
+  private final Thread caller;
+  private final AtomicReference<@Nullable End> end = new AtomicReference<>();
+  private long reported;
+
+  private Vigil(Effort effort, Watch watch) {
+    this.watch = watch;
+    this.clock = watch.clock();
+    this.began = clock.getAsLong();
+    this.limit = effort.limit().map(Vigil::nanos).orElse(Long.MAX_VALUE);
+    this.caller = Thread.currentThread();
+    this.reported = -REPORT_NANOS;
+  }
+
+  /** Begins the watch over a run with this effort, made on the caller's own thread. */
+  public static Vigil begin(Effort effort, Watch watch) {
+    return new Vigil(effort, watch);
+  }
+
+  private static long nanos(Duration duration) {
+    try {
+      return duration.toNanos();
+    } catch (ArithmeticException centuries) {
+      return Long.MAX_VALUE;
+    }
+  }
+
+  /** Whether the run has to end now; looks at signal, interrupt and clock. */
+  public boolean over() {
+    if (end.get() != null) {
+      return true;
+    }
+    if (watch.stopSignal().stopped() || caller.isInterrupted()) {
+      end(End.STOPPED);
+    } else if (limit != Long.MAX_VALUE && clock.getAsLong() - began >= limit) {
+      end(End.DEADLINE);
+    }
+    return end.get() != null;
+  }
+
+  /** Ends the run for a reason of the method's own; the first reason given stands. */
+  public void end(End reason) {
+    end.compareAndSet(null, reason);
+  }
+
+  /** Why the run ended; {@link End#DONE} while nothing has ended it. */
+  public End reason() {
+    End reason = end.get();
+    return reason == null ? End.DONE : reason;
+  }
+
+  /** The time since the run began, on its clock. */
+  public Duration elapsed() {
+    return Duration.ofNanos(clock.getAsLong() - began);
+  }
+
+  /**
+   * Tells the listener how far the run is, at most every 50 ms; what the listener throws comes
+   * through.
+   */
+  public void report(OptionalDouble share, OptionalDouble best, OptionalDouble bound) {
+    if (!watch.listening()) {
+      return;
+    }
+    synchronized (this) {
+      long now = clock.getAsLong() - began;
+      if (now - reported >= REPORT_NANOS) {
+        reported = now;
+        watch.listener().accept(new Progress(Duration.ofNanos(now), share, best, bound));
+      }
+    }
+  }
+}

@@ -1,0 +1,7 @@
+/** Forms, models, lowering, audits, and the interface between a caller and a sampler. */
+module dev.couplet.api {
+  requires static transitive org.jspecify;
+
+  exports dev.couplet.form;
+  exports dev.couplet.sampling;
+}
