@@ -1,0 +1,58 @@
+package dev.couplet.anneal;
+
+import dev.couplet.form.State;
+import dev.couplet.kernel.Adjacency;
+import dev.couplet.kernel.Descent;
+import dev.couplet.kernel.DrawLoop;
+import dev.couplet.kernel.Drawer;
+import dev.couplet.kernel.LocalFields;
+import dev.couplet.kernel.Metropolis;
+import dev.couplet.kernel.Pace;
+import dev.couplet.kernel.Streams;
+import dev.couplet.sampling.Run;
+import java.util.List;
+import java.util.SplittableRandom;
+
+/** Anneals one draw at a time; belongs to one thread. */
+final class Annealer implements Drawer {
+  private final Run run;
+  private final Schedule schedule;
+  private final Finish finish;
+  private final LocalFields fields;
+  private final Metropolis metropolis;
+  private final Descent descent;
+
+  Annealer(Adjacency rows, Run run, Schedule schedule, Finish finish) {
+    this.run = run;
+    this.schedule = schedule;
+    this.finish = finish;
+    this.fields = new LocalFields(rows);
+    this.metropolis = new Metropolis(fields);
+    this.descent = new Descent(fields);
+  }
+
+  @Override
+  public List<State> draw(int first, int count, Pace pace) {
+    SplittableRandom random = Streams.of(run.effort().seed(), first);
+    State begin = DrawLoop.begin(fields.size(), run, first, random);
+    if (pace.look()) {
+      return List.of(begin);
+    }
+    fields.set(begin);
+    int sweeps = schedule.sweeps(first);
+    for (int t = 0; t < sweeps; t++) {
+      if (!metropolis.sweep(schedule.inverseTemperature(t, sweeps), random, pace)) {
+        break;
+      }
+    }
+    if (finish == Finish.DESCENT) {
+      descend(pace);
+    }
+    return List.of(fields.state());
+  }
+
+  /** Also a draw that was told to end goes down a little, so that its state is worth returning. */
+  private void descend(Pace pace) {
+    descent.run(pace.ended() ? Pace.closing() : pace);
+  }
+}

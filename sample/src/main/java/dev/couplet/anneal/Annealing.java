@@ -1,0 +1,114 @@
+package dev.couplet.anneal;
+
+import dev.couplet.form.CheckReturnValue;
+import dev.couplet.form.Qubo;
+import dev.couplet.kernel.Adjacency;
+import dev.couplet.kernel.DrawLoop;
+import dev.couplet.sampling.Draws;
+import dev.couplet.sampling.Run;
+import dev.couplet.sampling.Sampler;
+import dev.couplet.sampling.Vigil;
+import java.util.OptionalDouble;
+
+/**
+ * Simulated annealing: Metropolis sweeps at a falling temperature, then a descent to a local
+ * minimum.
+ *
+ * <p>Each draw is independent of the others. If the effort leaves the number of sweeps open, a draw
+ * of a counted effort makes 1,000 sweeps, fewer if the form is large; draws of a timed effort begin
+ * short and become longer, so that easy forms are sampled often and hard ones thoroughly. Hot and
+ * cold follow from the form's coefficients unless they are set.
+ *
+ * <p>Cost: a sweep takes O(n + d) steps, d the degrees of the variables that flip: O(n + m) at
+ * most. Memory: 24 bytes a pair, and 16 bytes a variable and thread. Immutable and thread-safe.
+ *
+ * <p>Source: Kirkpatrick, Gelatt and Vecchi, "Optimization by simulated annealing" (1983).
+ */
+@CheckReturnValue
+public final class Annealing implements Sampler {
+  private static final Annealing STANDARD =
+      new Annealing(
+          Cooling.geometric(), OptionalDouble.empty(), OptionalDouble.empty(), Finish.DESCENT);
+
+  private final Cooling cooling;
+  private final OptionalDouble hot;
+  private final OptionalDouble cold;
+  private final Finish finish;
+
+  private Annealing(Cooling cooling, OptionalDouble hot, OptionalDouble cold, Finish finish) {
+    this.cooling = cooling;
+    this.hot = hot;
+    this.cold = cold;
+    this.finish = finish;
+  }
+
+  /** Geometric cooling between temperatures that follow from the form, and a descent. */
+  public static Annealing standard() {
+    return STANDARD;
+  }
+
+  /** This method with another path of the temperature. */
+  public Annealing cooling(Cooling newCooling) {
+    return new Annealing(newCooling, hot, cold, finish);
+  }
+
+  /**
+   * This method with the given temperature of the first sweep, in units of energy.
+   *
+   * @throws IllegalArgumentException if it is not a finite number above zero
+   */
+  public Annealing hot(double temperature) {
+    double checked = Check.temperature("the hot temperature", temperature);
+    return new Annealing(cooling, OptionalDouble.of(checked), cold, finish);
+  }
+
+  /**
+   * This method with the given temperature of the last sweep, in units of energy.
+   *
+   * @throws IllegalArgumentException if it is not a finite number above zero
+   */
+  public Annealing cold(double temperature) {
+    double checked = Check.temperature("the cold temperature", temperature);
+    return new Annealing(cooling, hot, OptionalDouble.of(checked), finish);
+  }
+
+  /** This method with the given end of each draw. */
+  public Annealing finish(Finish newFinish) {
+    return new Annealing(cooling, hot, cold, newFinish);
+  }
+
+  @Override
+  public Draws sample(Qubo form, Run run) {
+    Vigil vigil = run.begin();
+    run.requireStartsOf(form.size());
+    if (vigil.over()) {
+      return DrawLoop.unbegun(form, run, vigil);
+    }
+    Adjacency rows = Adjacency.of(form);
+    Schedule schedule = new Schedule(cooling, temperatures(rows), Sweeps.of(rows, run.effort()));
+    return DrawLoop.run(form, run, vigil, 1, () -> new Annealer(rows, run, schedule, finish));
+  }
+
+  private Temperatures temperatures(Adjacency rows) {
+    Temperatures own = Temperatures.of(rows);
+    double first = hot.orElse(Math.max(own.hot(), cold.orElse(0)));
+    return new Temperatures(first, cold.orElse(Math.min(own.cold(), first)));
+  }
+
+  @Override
+  public String toString() {
+    return "Annealing("
+        + cooling
+        + ", hot "
+        + text(hot)
+        + ", cold "
+        + text(cold)
+        + ", "
+        + finish
+        + ")";
+  }
+
+  private static String text(OptionalDouble setting) {
+    return setting.isPresent() ? Double.toString(setting.getAsDouble()) : "from the form";
+  }
+}

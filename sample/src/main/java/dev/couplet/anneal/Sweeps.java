@@ -1,0 +1,37 @@
+package dev.couplet.anneal;
+
+import dev.couplet.kernel.Adjacency;
+import dev.couplet.sampling.Effort;
+
+/**
+ * How many sweeps each draw makes.
+ *
+ * <p>Draws of one generation make the same number, and each generation twice as many as the one
+ * before, from the number of the first on.
+ */
+record Sweeps(int first, int generation) {
+  private static final int COUNTED = 1000;
+  private static final int SHORTEST = 64;
+  private static final int DRAWS_A_GENERATION = 16;
+  private static final double STEPS = 0x1p30;
+
+  static Sweeps of(Adjacency rows, Effort effort) {
+    if (effort.sweeps().isPresent()) {
+      return new Sweeps(effort.sweeps().getAsInt(), Integer.MAX_VALUE);
+    }
+    if (effort.draws().isEmpty()) {
+      return new Sweeps(SHORTEST, DRAWS_A_GENERATION);
+    }
+    double sweep = 1.0 + rows.size() + 2.0 * rows.pairs();
+    int fitting = (int) Math.min(COUNTED, STEPS / sweep);
+    return new Sweeps(Math.max(SHORTEST, fitting), Integer.MAX_VALUE);
+  }
+
+  /** The number of sweeps of one draw. */
+  int of(int draw) {
+    int doublings = draw / generation;
+    return doublings >= 30
+        ? Integer.MAX_VALUE
+        : (int) Math.min(Integer.MAX_VALUE, (long) first << doublings);
+  }
+}
