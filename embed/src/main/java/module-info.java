@@ -3,4 +3,7 @@ module dev.couplet.embed {
   requires static transitive org.jspecify;
   requires transitive dev.couplet.api;
   requires transitive org.jgrapht.core;
+
+  exports dev.couplet.embed;
+  exports dev.couplet.host;
 }
