@@ -3,5 +3,7 @@ module dev.couplet.api {
   requires static transitive org.jspecify;
 
   exports dev.couplet.form;
+  exports dev.couplet.lower;
+  exports dev.couplet.model;
   exports dev.couplet.sampling;
 }

@@ -51,6 +51,39 @@ public final class Polynomial {
     return coefficient.length > 0 && width(0) == 0 ? coefficient[0] : 0;
   }
 
+  /** The coefficient of the product of the variables, 0 if there is none; O(log terms). */
+  public double coefficient(int... variables) {
+    int[] product = variables.clone();
+    int width = TermOrder.canonical(product, 0, product.length);
+    int low = 0;
+    int high = coefficient.length - 1;
+    while (low <= high) {
+      int middle = (low + high) >>> 1;
+      int order = TermOrder.compare(factor, start[middle], start[middle + 1], product, 0, width);
+      if (order == 0) {
+        return coefficient[middle];
+      }
+      if (order < 0) {
+        low = middle + 1;
+      } else {
+        high = middle - 1;
+      }
+    }
+    return 0;
+  }
+
+  /**
+   * The same terms in {@code newSize} variables, which must be no fewer; O(1), the terms are
+   * shared.
+   */
+  public Polynomial inVariables(int newSize) {
+    if (newSize < size) {
+      throw new IllegalArgumentException(
+          "cannot bring a polynomial in " + size + " variables to " + newSize + ", which is fewer");
+    }
+    return new Polynomial(newSize, start, factor, coefficient);
+  }
+
   /** Passes every term to the visitor, lowest degree first. */
   public void forEachTerm(TermVisitor visitor) {
     for (int t = 0; t < coefficient.length; t++) {
@@ -209,9 +242,9 @@ public final class Polynomial {
     }
 
     private void reserve(int width) {
-      if (terms + 2 > start.length) {
-        start = Arrays.copyOf(start, 2 * start.length);
-        coefficient = Arrays.copyOf(coefficient, 2 * coefficient.length);
+      if (terms == coefficient.length) {
+        coefficient = Arrays.copyOf(coefficient, 2 * terms);
+        start = Arrays.copyOf(start, 2 * terms + 1);
       }
       if (start[terms] + width > factor.length) {
         factor = Arrays.copyOf(factor, Math.max(2 * factor.length, start[terms] + width));

@@ -83,11 +83,12 @@ final class TermOrder {
   }
 
   private static Comparator<Integer> comparing(int[] start, int[] factor) {
-    return (a, b) -> {
-      int byDegree = Integer.compare(start[a + 1] - start[a], start[b + 1] - start[b]);
-      return byDegree != 0
-          ? byDegree
-          : Arrays.compare(factor, start[a], start[a + 1], factor, start[b], start[b + 1]);
-    };
+    return (a, b) -> compare(factor, start[a], start[a + 1], factor, start[b], start[b + 1]);
+  }
+
+  /** Compares two products: by degree, then by their variables. */
+  static int compare(int[] left, int from, int to, int[] right, int rightFrom, int rightTo) {
+    int byDegree = Integer.compare(to - from, rightTo - rightFrom);
+    return byDegree != 0 ? byDegree : Arrays.compare(left, from, to, right, rightFrom, rightTo);
   }
 }

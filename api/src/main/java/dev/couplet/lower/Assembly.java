@@ -1,0 +1,189 @@
+package dev.couplet.lower;
+
+import dev.couplet.form.Polynomial;
+import dev.couplet.form.Qubo;
+import dev.couplet.lower.Ledger.Kind;
+import dev.couplet.lower.Ledger.Source;
+import dev.couplet.model.Choice;
+import dev.couplet.model.Decision;
+import dev.couplet.model.Objective;
+import dev.couplet.model.Range;
+import dev.couplet.model.Rule;
+import dev.couplet.model.Statement;
+import dev.couplet.sampling.Structure;
+import java.util.ArrayList;
+import java.util.List;
+
+/** One lowering under way: collects sources in the order of the statement, weighs and adds them. */
+final class Assembly {
+  private final Statement statement;
+  private final Lowering settings;
+  private final BitTable bits;
+  private final Range objective;
+  private final boolean whole;
+  private final List<Source> sources = new ArrayList<>();
+  private final List<Weight> weights = new ArrayList<>();
+
+  Assembly(Statement statement, Lowering settings) {
+    this.statement = statement;
+    this.settings = settings;
+    this.bits = new BitTable(statement);
+    this.objective = objectiveRange();
+    this.whole = objectiveIsWhole();
+  }
+
+  Lowered lowered() {
+    int sign = statement.sense().sign();
+    for (Objective part : statement.objectives()) {
+      addSource(part.name(), Kind.OBJECTIVE, part.terms().times(sign), 1);
+    }
+    for (Decision decision : statement.decisions()) {
+      if (decision instanceof Choice<?> choice) {
+        addCode(choice);
+      }
+    }
+    for (Rule rule : statement.rules()) {
+      addRule(rule);
+    }
+    return new Lowered(
+        statement,
+        qubo(),
+        bits,
+        new Ledger(sources, bits.meanings()),
+        List.copyOf(weights),
+        structure());
+  }
+
+  private void addCode(Choice<?> choice) {
+    String name = "one option of '" + choice.name() + "'";
+    Polynomial.Builder difference = Polynomial.builder(statement.literals()).add(-1);
+    int first = statement.firstLiteral(choice);
+    for (int k = 0; k < choice.values(); k++) {
+      difference.add(1, first + k);
+    }
+    addPenalty(name, Kind.CODE, new Penalty(SquareForm.squared(difference), "square"));
+  }
+
+  private void addRule(Rule rule) {
+    if (rule.alwaysKept()) {
+      weights.add(new Weight(rule.name(), "nothing", 0, "every plan keeps it"));
+    } else if (rule.required()) {
+      addPenalty(rule.name(), Kind.PENALTY, RequiredRule.penalty(rule, bits));
+    } else {
+      addPreferred(rule);
+    }
+  }
+
+  private void addPenalty(String name, Kind kind, Penalty penalty) {
+    Weights.Chosen chosen = settings.choose(new Weights.Facts(name, objective, whole));
+    weights.add(new Weight(name, penalty.form(), chosen.value(), chosen.reason()));
+    addSource(name, kind, penalty.terms(), chosen.value());
+  }
+
+  private void addPreferred(Rule rule) {
+    PreferredRule preferred = PreferredRule.of(rule, bits);
+    double unitCost = rule.costPerUnit() * rule.unit();
+    addSource(rule.name(), Kind.COST, preferred.cost(), unitCost);
+    if (preferred.tie().isEmpty()) {
+      weights.add(new Weight(rule.name(), preferred.form(), unitCost, "its own cost, exactly"));
+      return;
+    }
+    boolean wholeCost = unitCost == Math.rint(unitCost);
+    double enough = RangeBound.above(unitCost, wholeCost);
+    String reason = "above its cost a unit, so that counting the whole amount is cheapest";
+    weights.add(new Weight(rule.name(), preferred.form(), enough, reason));
+    addSource(rule.name(), Kind.PENALTY, preferred.tie().get(), enough);
+  }
+
+  private void addSource(String name, Kind kind, Polynomial terms, double factor) {
+    sources.add(new Source(name, kind, DegreeReduction.of(terms, name, bits), factor));
+  }
+
+  /** Lowest over all bit patterns, highest under any plan; preferred rules included. */
+  private Range objectiveRange() {
+    Polynomial minimised = statement.objective().times(statement.sense().sign());
+    double highest = statement.range(minimised).highest();
+    for (Rule rule : statement.rules()) {
+      if (!rule.required()) {
+        double most =
+            Math.max(
+                0,
+                Math.max(
+                    rule.range().highest() - rule.highest(),
+                    rule.lowest() - rule.range().lowest()));
+        highest += rule.amount(most) * rule.costPerUnit();
+      }
+    }
+    double lowest = Terms.lowest(minimised);
+    double error = Terms.whole(minimised) ? 0 : Math.ulp(Terms.magnitude(minimised)) * 4;
+    error *= statement.objective().terms() + statement.rules().size() + 1;
+    return new Range(lowest - error, highest + error);
+  }
+
+  private boolean objectiveIsWhole() {
+    boolean all = Terms.whole(statement.objective());
+    for (Rule rule : statement.rules()) {
+      double cost = rule.costPerUnit() * rule.unit();
+      all &= cost == Math.rint(cost);
+    }
+    return all;
+  }
+
+  private Qubo qubo() {
+    refuseTooLarge();
+    Qubo.Builder form = Qubo.builder(bits.size());
+    for (Source source : sources) {
+      double factor = source.factor();
+      source
+          .terms()
+          .forEachTerm(
+              (coefficient, variables) -> {
+                double amount = factor * coefficient;
+                switch (variables.length) {
+                  case 0 -> form.addConstant(amount);
+                  case 1 -> form.addLinear(variables[0], amount);
+                  default -> form.addPair(variables[0], variables[1], amount);
+                }
+              });
+    }
+    return form.build();
+  }
+
+  private void refuseTooLarge() {
+    double total = 0;
+    double heaviest = 0;
+    String name = "";
+    for (Source source : sources) {
+      double magnitude = Terms.magnitude(source.terms()) * source.factor();
+      total += magnitude;
+      if (magnitude > heaviest) {
+        heaviest = magnitude;
+        name = source.name();
+      }
+    }
+    if (total >= 0x1p51 && whole) {
+      throw new IllegalArgumentException(
+          "the coefficients of the form would add up to "
+              + Weights.shown(total)
+              + ", energies are exact below 2^51; the heaviest part is '"
+              + name
+              + "' with "
+              + Weights.shown(heaviest)
+              + ": choose larger units there, or a smaller weight");
+    }
+  }
+
+  private Structure structure() {
+    List<List<Integer>> sets = new ArrayList<>();
+    for (Decision decision : statement.decisions()) {
+      if (decision instanceof Choice<?> choice) {
+        List<Integer> set = new ArrayList<>();
+        for (int k = 0; k < choice.values(); k++) {
+          set.add(statement.firstLiteral(choice) + k);
+        }
+        sets.add(set);
+      }
+    }
+    return sets.isEmpty() ? Structure.none() : Structure.exactlyOne(sets);
+  }
+}

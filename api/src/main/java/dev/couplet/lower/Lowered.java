@@ -1,0 +1,147 @@
+package dev.couplet.lower;
+
+import dev.couplet.form.CheckReturnValue;
+import dev.couplet.form.Qubo;
+import dev.couplet.form.State;
+import dev.couplet.model.Plan;
+import dev.couplet.model.Statement;
+import dev.couplet.sampling.Draw;
+import dev.couplet.sampling.Draws;
+import dev.couplet.sampling.Structure;
+import java.util.Arrays;
+import java.util.List;
+
+/**
+ * A model as a quadratic form, and the way back.
+ *
+ * <p>Bits {@code 0 .. decisionBits() - 1} are the literals of the statement; the rest are
+ * auxiliary. On a feasible plan, with auxiliary bits at their best, the form's energy is the plan's
+ * value, its sign changed if the model maximises. Every other pattern has an energy above the best
+ * feasible one, if the weights suffice. Immutable and thread-safe.
+ */
+@CheckReturnValue
+public final class Lowered {
+  private final Statement statement;
+  private final Qubo qubo;
+  private final int decisionBits;
+  private final List<BitTable.Completion> completions;
+  private final Ledger ledger;
+  private final List<Weight> weights;
+  private final Structure structure;
+
+  Lowered(
+      Statement statement,
+      Qubo qubo,
+      BitTable bits,
+      Ledger ledger,
+      List<Weight> weights,
+      Structure structure) {
+    this.statement = statement;
+    this.qubo = qubo;
+    this.decisionBits = bits.decisionBits();
+    this.completions = bits.completions();
+    this.ledger = ledger;
+    this.weights = weights;
+    this.structure = structure;
+  }
+
+  /** The statement that was lowered. */
+  public Statement statement() {
+    return statement;
+  }
+
+  /** The form to be minimised. */
+  public Qubo qubo() {
+    return qubo;
+  }
+
+  /** The number of bits that stand for decisions; they come first. */
+  public int decisionBits() {
+    return decisionBits;
+  }
+
+  /** The number of auxiliary bits. */
+  public int auxiliaryBits() {
+    return qubo.size() - decisionBits;
+  }
+
+  /** Where each coefficient came from, and what each bit stands for. */
+  public Ledger ledger() {
+    return ledger;
+  }
+
+  /** The weight of each rule and code, in the order of the statement, codes first. */
+  public List<Weight> weights() {
+    return weights;
+  }
+
+  /** What samplers may use: the exactly-one sets of the choices. */
+  public Structure structure() {
+    return structure;
+  }
+
+  /**
+   * The plan that a state of the form stands for; auxiliary bits do not matter.
+   *
+   * @throws IllegalArgumentException if the state is not of the form's size
+   */
+  public Plan plan(State state) {
+    if (state.size() != qubo.size()) {
+      throw new IllegalArgumentException(
+          "the state has "
+              + state.size()
+              + " bits, the form has "
+              + qubo.size()
+              + "; pass a state of this form");
+    }
+    return statement.plan(State.of(Arrays.copyOf(state.toBooleans(), decisionBits)));
+  }
+
+  /** The plans that draws of this form stand for. */
+  public Plans read(Draws draws) {
+    return new Plans(draws.rows().stream().map(Draw::state).map(this::plan).toList());
+  }
+
+  /**
+   * The state of the form that stands for a plan, with every auxiliary bit at its best. Linear in
+   * the terms of the rules; a start for samplers.
+   *
+   * @throws IllegalArgumentException if the plan is of another statement
+   */
+  public State complete(Plan plan) {
+    if (plan.literals().size() != decisionBits || !plan.statement().sameModel(statement)) {
+      throw new IllegalArgumentException(
+          "the plan is of "
+              + plan.statement()
+              + ", this form of "
+              + statement
+              + "; evaluate the plan on the model as it was lowered");
+    }
+    boolean[] bits = Arrays.copyOf(plan.literals().toBooleans(), qubo.size());
+    completions.forEach(completion -> completion.complete(bits));
+    return State.of(bits);
+  }
+
+  /** An energy of the form as a value in the model's own sense. */
+  public double valueOf(double energy) {
+    return statement.sense().sign() * energy;
+  }
+
+  /** A value in the model's own sense as an energy of the form. */
+  public double energyOf(double value) {
+    return statement.sense().sign() * value;
+  }
+
+  @Override
+  public String toString() {
+    return "Lowered("
+        + statement.name()
+        + ": "
+        + decisionBits
+        + " decision bits, "
+        + auxiliaryBits()
+        + " auxiliary bits, "
+        + qubo.pairs()
+        + " pairs)";
+  }
+}

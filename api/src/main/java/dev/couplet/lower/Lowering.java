@@ -1,0 +1,119 @@
+package dev.couplet.lower;
+
+import dev.couplet.form.CheckReturnValue;
+import dev.couplet.model.Model;
+import dev.couplet.model.Statement;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.Map;
+
+/**
+ * How a model is lowered to a quadratic form: the settings. Immutable and thread-safe;
+ * deterministic: the same model gives the same bits in the same order.
+ *
+ * <p>What becomes of what, with k options, n literals in a rule, and R the range left to a slack
+ * after tightening; coefficients are those of the penalty before its weight:
+ *
+ * <table>
+ *   <caption>Bits and coefficients of each construct</caption>
+ *   <tr><th>stated</th><th>bits</th><th>pairs</th><th>largest coefficient</th></tr>
+ *   <tr><td>bit</td><td>1</td><td>0</td><td>0</td></tr>
+ *   <tr><td>choice of k, one bit an option</td><td>k</td><td>k(k-1)/2</td><td>2</td></tr>
+ *   <tr><td>rule on one or two literals</td><td>0</td><td>1</td><td>twice the largest amount</td></tr>
+ *   <tr><td>at most one of n (also as any two exceed the limit)</td><td>0</td><td>n(n-1)/2</td>
+ *     <td>n - 1</td></tr>
+ *   <tr><td>linear equality, coefficients up to c</td><td>0</td><td>n(n-1)/2</td><td>2c^2, or
+ *     c |c - 2 value|</td></tr>
+ *   <tr><td>linear inequality</td><td>floor(log2 R) + 1</td><td>(n + bits)(n + bits - 1)/2</td>
+ *     <td>as for the equality with the slack among its terms</td></tr>
+ *   <tr><td>preferred rule on more literals</td><td>those of slack, excess and shortage</td>
+ *     <td>as above</td><td>as above</td></tr>
+ *   <tr><td>negative product of d &gt; 2</td><td>1</td><td>d</td><td>d - 1</td></tr>
+ *   <tr><td>positive product of d &gt; 2</td><td>floor((d-1)/2)</td><td>d(d-1)/2 + d bits</td>
+ *     <td>2d - 1</td></tr>
+ * </table>
+ *
+ * <p>Rules that every plan keeps take nothing. Source of the pair forms and squares: Glover,
+ * Kochenberger and Du, "A tutorial on formulating and using QUBO models" (2019).
+ */
+@CheckReturnValue
+public final class Lowering {
+  private static final Lowering STANDARD = new Lowering(Weights.rangeBound(), Map.of());
+
+  private final Weights weights;
+  private final Map<String, Double> byName;
+
+  private Lowering(Weights weights, Map<String, Double> byName) {
+    this.weights = weights;
+    this.byName = byName;
+  }
+
+  /** The defaults: choices with one bit an option, weights by the range bound. */
+  public static Lowering standard() {
+    return STANDARD;
+  }
+
+  /** These settings with another way to choose weights. */
+  public Lowering with(Weights newWeights) {
+    return new Lowering(newWeights, byName);
+  }
+
+  /**
+   * These settings with the weight of one rule set by hand. Whether it is enough is not checked
+   * here; an audit tells.
+   *
+   * @throws IllegalArgumentException unless it is positive and finite
+   */
+  public Lowering weight(String rule, double value) {
+    if (!(value > 0) || !Double.isFinite(value)) {
+      throw new IllegalArgumentException(
+          "the weight of rule '" + rule + "' is " + value + ", it must be positive and finite");
+    }
+    Map<String, Double> more = new LinkedHashMap<>(byName);
+    more.put(rule, value);
+    return new Lowering(weights, Collections.unmodifiableMap(more));
+  }
+
+  /**
+   * Lowers the model as it stands now. Linear in the terms of the penalties, multiplied out.
+   *
+   * @throws IllegalArgumentException if a weight was set for a rule that the model does not have,
+   *     or the form's whole coefficients would be too large for exact energies, naming the heaviest
+   *     rule
+   */
+  public Lowered lower(Model model) {
+    return lower(model.snapshot());
+  }
+
+  /** Lowers a statement; as for a model. */
+  public Lowered lower(Statement statement) {
+    for (String rule : byName.keySet()) {
+      if (statement.rules().stream().noneMatch(known -> known.name().equals(rule))) {
+        throw new IllegalArgumentException(
+            "a weight is set for rule '"
+                + rule
+                + "', but model '"
+                + statement.name()
+                + "' has no rule of that name");
+      }
+    }
+    return new Assembly(statement, this).lowered();
+  }
+
+  Weights.Chosen choose(Weights.Facts facts) {
+    Double byHand = byName.get(facts.rule());
+    if (byHand != null) {
+      return new Weights.Chosen(byHand, "set by hand, not proved to suffice");
+    }
+    Weights.Chosen chosen = weights.choose(facts);
+    if (!(chosen.value() > 0) || !Double.isFinite(chosen.value())) {
+      throw new IllegalArgumentException(
+          "the weight chosen for '"
+              + facts.rule()
+              + "' is "
+              + chosen.value()
+              + ", it must be positive and finite");
+    }
+    return chosen;
+  }
+}

@@ -1,0 +1,66 @@
+package dev.couplet.lower;
+
+import dev.couplet.form.Polynomial;
+import java.util.ArrayList;
+import java.util.BitSet;
+import java.util.List;
+
+/** Small questions about polynomials that several steps of the lowering ask. */
+final class Terms {
+  private Terms() {}
+
+  /** The value on the given bits, of which there may be more than the polynomial has variables. */
+  static double value(Polynomial polynomial, boolean[] bits) {
+    double[] sum = {0};
+    polynomial.forEachTerm(
+        (coefficient, variables) -> {
+          boolean all = true;
+          for (int variable : variables) {
+            all &= bits[variable];
+          }
+          sum[0] += all ? coefficient : 0;
+        });
+    return sum[0];
+  }
+
+  /** The lowest value over all bit patterns that the coefficients' signs allow. */
+  static double lowest(Polynomial polynomial) {
+    double[] sum = {0};
+    polynomial.forEachTerm(
+        (coefficient, variables) ->
+            sum[0] += variables.length == 0 ? coefficient : Math.min(0, coefficient));
+    return sum[0];
+  }
+
+  /** The highest value over all bit patterns that the coefficients' signs allow. */
+  static double highest(Polynomial polynomial) {
+    return -lowest(polynomial.times(-1));
+  }
+
+  static double magnitude(Polynomial polynomial) {
+    double[] sum = {0};
+    polynomial.forEachTerm((coefficient, variables) -> sum[0] += Math.abs(coefficient));
+    return sum[0];
+  }
+
+  static boolean whole(Polynomial polynomial) {
+    boolean[] whole = {true};
+    polynomial.forEachTerm(
+        (coefficient, variables) -> whole[0] &= coefficient == Math.rint(coefficient));
+    return whole[0];
+  }
+
+  /** The variables that occur, ascending. */
+  static List<Integer> variables(Polynomial polynomial) {
+    BitSet seen = new BitSet();
+    polynomial.forEachTerm(
+        (coefficient, variables) -> {
+          for (int variable : variables) {
+            seen.set(variable);
+          }
+        });
+    List<Integer> ascending = new ArrayList<>();
+    seen.stream().forEach(ascending::add);
+    return ascending;
+  }
+}

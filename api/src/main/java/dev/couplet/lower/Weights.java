@@ -1,0 +1,64 @@
+package dev.couplet.lower;
+
+import dev.couplet.model.Range;
+import java.util.Locale;
+
+/**
+ * A way to choose the weight of a rule's penalty.
+ *
+ * <p>Every penalty is zero where its rule is kept and at least 1 where it is broken. A weight is
+ * enough if breaking the rule never pays; it should be no larger, since heavy weights make a form
+ * hard to sample and coefficients hard to represent. Implementations are immutable.
+ */
+@FunctionalInterface
+public interface Weights {
+  /**
+   * What is known when a weight is chosen.
+   *
+   * @param rule the rule's name, or words that name a choice's code
+   * @param objective everything that is minimised beside the penalties: its lowest value over all
+   *     bit patterns, broken codes included, and its highest under any plan
+   * @param whole whether the objective has whole coefficients only
+   */
+  record Facts(String rule, Range objective, boolean whole) {}
+
+  /**
+   * A weight and why it suffices.
+   *
+   * @param value positive and finite
+   * @param reason in words
+   */
+  record Chosen(double value, String reason) {}
+
+  /** Chooses the weight of one rule. */
+  Chosen choose(Facts facts);
+
+  /**
+   * Strictly above the whole range of the objective: breaking a rule costs more than anything the
+   * objective can win. Always enough.
+   */
+  static Weights rangeBound() {
+    return new RangeBound();
+  }
+
+  /**
+   * The same weight for every rule and code, set by hand. Whether it is enough is not checked here;
+   * an audit tells.
+   *
+   * @throws IllegalArgumentException unless it is positive and finite
+   */
+  static Weights fixed(double value) {
+    if (!(value > 0) || !Double.isFinite(value)) {
+      throw new IllegalArgumentException(
+          "the weight is " + value + ", it must be a positive finite number");
+    }
+    return facts -> new Chosen(value, "set by hand, not proved to suffice");
+  }
+
+  /** A number in words that are the same on every JDK. */
+  static String shown(double value) {
+    return value == Math.rint(value) && Math.abs(value) < 1e15
+        ? Long.toString((long) value)
+        : String.format(Locale.ROOT, "%.6g", value);
+  }
+}

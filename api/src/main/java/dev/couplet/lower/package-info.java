@@ -1,0 +1,23 @@
+/**
+ * From a stated model to a quadratic form, and back.
+ *
+ * <p>{@link dev.couplet.lower.Lowering} holds the settings; {@link dev.couplet.lower.Lowered} is
+ * the result: a {@link dev.couplet.form.Qubo} whose minimum is the model's optimum, the way back
+ * from draws to {@link dev.couplet.lower.Plans plans}, the {@link dev.couplet.lower.Weight weight}
+ * of each rule with the reason why it suffices, and the {@link dev.couplet.lower.Ledger} that says
+ * where each coefficient came from.
+ *
+ * <p>One step a file, in the order of the work: {@code BitTable} numbers the bits, {@code Limits}
+ * tightens a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms
+ * ({@code TwoBitForm}, {@code ConflictForm}, {@code SquareForm} with {@code Slack}), {@code
+ * RangeBound} weighs it, {@code DegreeReduction} brings every term to degree 2, {@code Assembly}
+ * adds all up.
+ *
+ * <p>Every penalty is zero, for the best values of its auxiliary bits, where its rule is kept, and
+ * at least 1 elsewhere, broken codes included: so a weight above the objective's whole range
+ * suffices.
+ */
+@NullMarked
+package dev.couplet.lower;
+
+import org.jspecify.annotations.NullMarked;

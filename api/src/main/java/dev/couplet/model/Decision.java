@@ -1,0 +1,13 @@
+package dev.couplet.model;
+
+/**
+ * Something a plan has to settle. Made by a {@link Model}, which owns it; decisions are compared by
+ * identity.
+ */
+public sealed interface Decision permits Bit, Choice {
+  /** The name, unique in the model. */
+  String name();
+
+  /** The number of values to choose from. */
+  int values();
+}

@@ -1,0 +1,65 @@
+package dev.couplet.model;
+
+import dev.couplet.form.Polynomial;
+
+/** Writes a statement in words that a person can proof-read; as long as the statement is. */
+final class Description {
+  private final Statement statement;
+  private final StringBuilder text = new StringBuilder();
+
+  private Description(Statement statement) {
+    this.statement = statement;
+  }
+
+  static String of(Statement statement) {
+    Description description = new Description(statement);
+    description.write();
+    return description.text.toString();
+  }
+
+  private void write() {
+    text.append("model ").append(statement.name()).append('\n');
+    for (Decision decision : statement.decisions()) {
+      text.append("  decide ").append(decision.name()).append(": ");
+      text.append(decision instanceof Choice<?> choice ? options(choice) : "yes or no")
+          .append('\n');
+    }
+    for (Rule rule : statement.rules()) {
+      text.append(rule.required() ? "  require " : "  prefer ").append(rule.name()).append(": ");
+      text.append(Text.between(terms(rule.terms()), rule.lowest(), rule.highest()));
+      text.append(units(rule)).append('\n');
+    }
+    for (Objective objective : statement.objectives()) {
+      text.append(statement.sense() == Sense.MINIMIZE ? "  minimize " : "  maximize ");
+      text.append(objective.name()).append(": ").append(terms(objective.terms())).append('\n');
+    }
+  }
+
+  private static String options(Choice<?> choice) {
+    StringBuilder listed = new StringBuilder("one of ");
+    for (int k = 0; k < choice.values(); k++) {
+      listed.append(k == 0 ? "" : ", ").append(choice.options().get(k));
+    }
+    return listed.toString();
+  }
+
+  private static String units(Rule rule) {
+    String unit = rule.unit() == 1 ? "" : " (in units of " + Text.number(rule.unit()) + ")";
+    String cost = rule.required() ? "" : ", each unit costs " + Text.number(rule.costPerUnit());
+    return unit + cost + (rule.alwaysKept() ? "; every plan keeps it" : "");
+  }
+
+  private String terms(Polynomial polynomial) {
+    StringBuilder sum = new StringBuilder();
+    polynomial.forEachTerm(
+        (coefficient, literals) -> {
+          sum.append(sum.isEmpty() ? "" : coefficient < 0 ? " - " : " + ");
+          double shown = sum.isEmpty() ? coefficient : Math.abs(coefficient);
+          sum.append(shown == 1 && literals.length > 0 ? "" : Text.number(shown));
+          for (int literal : literals) {
+            sum.append('[').append(statement.describe(literal)).append(']');
+          }
+        });
+    return sum.isEmpty() ? "0" : sum.toString();
+  }
+}

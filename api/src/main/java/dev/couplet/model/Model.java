@@ -1,0 +1,257 @@
+package dev.couplet.model;
+
+import dev.couplet.form.CheckReturnValue;
+import dev.couplet.form.Polynomial;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.Set;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * A decision problem in the terms of the business: decisions, rules, an objective.
+ *
+ * <p>Mutable, for one thread. Mistakes are refused at the call that makes them. Lowering or solving
+ * takes a {@link #snapshot()} and never changes the model.
+ */
+public final class Model {
+  private final String name;
+  private final List<Decision> decisions = new ArrayList<>();
+  private final List<Decision> decisionOfLiteral = new ArrayList<>();
+  private final List<Rule> rules = new ArrayList<>();
+  private final List<Objective> objectives = new ArrayList<>();
+  private final Set<String> decisionNames = new HashSet<>();
+  private final Set<String> statementNames = new HashSet<>();
+  private @Nullable Sense sense;
+
+  private Model(String name) {
+    this.name = name;
+  }
+
+  /** A new, empty model. */
+  @CheckReturnValue
+  public static Model named(String name) {
+    Check.name("a model", name);
+    return new Model(name);
+  }
+
+  /** The name. */
+  public String name() {
+    return name;
+  }
+
+  /** Adds a yes/no decision. */
+  public Bit bit(String bitName) {
+    claim(decisionNames, "decision", bitName);
+    Bit bit = new Bit(this, bitName, decisionOfLiteral.size());
+    decisions.add(bit);
+    decisionOfLiteral.add(bit);
+    return bit;
+  }
+
+  /** Adds a yes/no decision for each key, named by the family's name and the key. */
+  public <K> Family<K, Bit> bits(String familyName, Collection<K> keys) {
+    return Family.of(familyName, keys, key -> bit(familyName + " " + key));
+  }
+
+  /**
+   * Adds a decision for exactly one of the options.
+   *
+   * @throws IllegalArgumentException if there is no option, or one stands twice
+   */
+  public <T> Choice<T> choice(String choiceName, Collection<T> options) {
+    if (options.isEmpty()) {
+      throw new IllegalArgumentException(
+          "choice '" + choiceName + "' has no options; give it at least one");
+    }
+    Choice<T> choice =
+        new Choice<>(this, choiceName, decisionOfLiteral.size(), List.copyOf(options));
+    claim(decisionNames, "decision", choiceName);
+    decisions.add(choice);
+    for (int k = 0; k < options.size(); k++) {
+      decisionOfLiteral.add(choice);
+    }
+    return choice;
+  }
+
+  /**
+   * Adds a decision for one of the options for each key, named by the family's name and the key.
+   */
+  public <K, T> Family<K, Choice<T>> choices(
+      String familyName, Collection<K> keys, Collection<T> options) {
+    return Family.of(familyName, keys, key -> choice(familyName + " " + key, options));
+  }
+
+  /**
+   * Requires a condition: plans that break it are infeasible.
+   *
+   * @return the rule, with whole coefficients
+   * @throws IllegalArgumentException naming the rule, if no plan can keep it, its name is taken,
+   *     its decimals do not fit into exact whole numbers, or it speaks of another model
+   */
+  public Rule require(String ruleName, Condition condition) {
+    Rule rule = rule(ruleName, condition, Optional.empty());
+    Range range = rule.range();
+    if (rule.terms().terms() > 0 && !rule.divisible()) {
+      throw new IllegalArgumentException(
+          "rule '"
+              + ruleName
+              + "' can be kept by no plan: "
+              + condition
+              + ", but no multiple of the coefficients' common factor lies between the limits");
+    }
+    if (range.lowest() > rule.highest() || range.highest() < rule.lowest()) {
+      throw new IllegalArgumentException(
+          "rule '"
+              + ruleName
+              + "' can be kept by no plan: "
+              + condition
+              + ", but the expression lies between "
+              + Text.number(inOwnUnits(condition, rule, range.lowest()))
+              + " and "
+              + Text.number(inOwnUnits(condition, rule, range.highest())));
+    }
+    return add(rule);
+  }
+
+  /**
+   * Prefers a condition: each unit by which a plan misses it costs {@code costPerUnit}, which adds
+   * to a minimised value and takes from a maximised one.
+   *
+   * @return the rule, with whole coefficients
+   * @throws IllegalArgumentException as for {@link #require}, or if the cost is negative
+   */
+  public Rule prefer(String ruleName, Condition condition, double costPerUnit) {
+    Check.finite("the cost of rule '" + ruleName + "'", costPerUnit);
+    if (costPerUnit < 0) {
+      throw new IllegalArgumentException(
+          "the cost of rule '" + ruleName + "' is " + costPerUnit + ", it must be 0 or more");
+    }
+    return add(rule(ruleName, condition, Optional.of(costPerUnit)));
+  }
+
+  private Rule rule(String ruleName, Condition condition, Optional<Double> cost) {
+    Check.name("a rule", ruleName);
+    requireOwner(condition.expr(), this);
+    ScaledCondition scaled = ScaledCondition.of(ruleName, condition, decisionOfLiteral.size());
+    Range range = Ranges.of(scaled.terms(), decisionOfLiteral.toArray(new Decision[0]));
+    return new Rule(ruleName, cost, scaled, range);
+  }
+
+  private Rule add(Rule rule) {
+    claim(statementNames, "rule or objective", rule.name());
+    rules.add(rule);
+    return rule;
+  }
+
+  /** Undoes scaling and moves the constant back, for messages in the condition's own numbers. */
+  private static double inOwnUnits(Condition condition, Rule rule, double terms) {
+    double own = Double.isFinite(condition.lowest()) ? condition.lowest() : condition.highest();
+    double scaled = Double.isFinite(rule.lowest()) ? rule.lowest() : rule.highest();
+    return own + (terms - scaled) * rule.unit();
+  }
+
+  /**
+   * Adds a part to the objective, to be minimised.
+   *
+   * @throws IllegalArgumentException if the name is taken, the expression speaks of another model,
+   *     or the model maximises already
+   */
+  public Objective minimize(String objectiveName, Expr expr) {
+    return objective(objectiveName, expr, Sense.MINIMIZE);
+  }
+
+  /**
+   * Adds a part to the objective, to be maximised.
+   *
+   * @throws IllegalArgumentException if the name is taken, the expression speaks of another model,
+   *     or the model minimises already
+   */
+  public Objective maximize(String objectiveName, Expr expr) {
+    return objective(objectiveName, expr, Sense.MAXIMIZE);
+  }
+
+  private Objective objective(String objectiveName, Expr expr, Sense wanted) {
+    Check.name("an objective", objectiveName);
+    requireOwner(expr, this);
+    if (sense != null && sense != wanted) {
+      throw new IllegalArgumentException(
+          "objective '"
+              + objectiveName
+              + "' would "
+              + wanted.name().toLowerCase(Locale.ROOT)
+              + ", but '"
+              + objectives.get(0).name()
+              + "' does the opposite; negate one of them with times(-1)");
+    }
+    Expansion<Double> expansion = Expansion.of(expr, Arithmetic.DOUBLES);
+    Polynomial.Builder terms = Polynomial.builder(decisionOfLiteral.size());
+    for (int t = 0; t < expansion.products.size(); t++) {
+      terms.add(expansion.coefficients.get(t), expansion.products.get(t));
+    }
+    Objective objective = new Objective(objectiveName, terms.build());
+    claim(statementNames, "rule or objective", objectiveName);
+    objectives.add(objective);
+    sense = wanted;
+    return objective;
+  }
+
+  /** Begins a plan by hand, over the model as it stands now. */
+  @CheckReturnValue
+  public PlanDraft plan() {
+    return snapshot().plan();
+  }
+
+  /** The model's content as it stands now; later changes do not reach it. */
+  @CheckReturnValue
+  public Statement snapshot() {
+    Sense known = sense == null ? Sense.MINIMIZE : sense;
+    return new Statement(this, decisions, rules, objectives, known);
+  }
+
+  /** The model in words, for proof-reading: every decision, rule and objective on a line. */
+  @CheckReturnValue
+  public String describe() {
+    return Description.of(snapshot());
+  }
+
+  Decision decisionOf(int literal) {
+    return decisionOfLiteral.get(literal);
+  }
+
+  static void requireOwner(Expr expr, Model model) {
+    Model other = expr.owner();
+    if (other != null && other != model) {
+      throw new IllegalArgumentException(
+          "the expression speaks of decisions of model '"
+              + other.name()
+              + "'; model '"
+              + model.name()
+              + "' takes its own");
+    }
+  }
+
+  private static void claim(Set<String> taken, String what, String name) {
+    Check.name("a " + what, name);
+    if (!taken.add(name)) {
+      throw new IllegalArgumentException(
+          "the model has a " + what + " named '" + name + "' already; choose another name");
+    }
+  }
+
+  @Override
+  public String toString() {
+    return "Model("
+        + name
+        + ": "
+        + decisions.size()
+        + " decisions, "
+        + rules.size()
+        + " rules, "
+        + objectives.size()
+        + " objectives)";
+  }
+}

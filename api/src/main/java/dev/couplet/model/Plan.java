@@ -1,0 +1,196 @@
+package dev.couplet.model;
+
+import dev.couplet.form.CheckReturnValue;
+import dev.couplet.form.State;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A value for every decision of a model, with what it is worth and which rules it breaks, all
+ * checked against the model itself.
+ *
+ * <p>A plan read from a draw may leave a choice undecided, when the draw says none or several of
+ * its options; such a plan is infeasible, and its value counts the literals as they stand. The
+ * natural order puts the better plan first: feasible before infeasible, then by value in the
+ * model's sense. Immutable.
+ */
+@CheckReturnValue
+public final class Plan implements Comparable<Plan> {
+  private static final int SHOWN = 40;
+
+  private final Statement statement;
+  private final State literals;
+  private final double value;
+  private final List<Unmet> unmet;
+  private final List<Decision> undecided;
+
+  private Plan(
+      Statement statement,
+      State literals,
+      double value,
+      List<Unmet> unmet,
+      List<Decision> undecided) {
+    this.statement = statement;
+    this.literals = literals;
+    this.value = value;
+    this.unmet = List.copyOf(unmet);
+    this.undecided = List.copyOf(undecided);
+  }
+
+  static Plan of(Statement statement, State literals) {
+    List<Unmet> unmet = new ArrayList<>();
+    double cost = 0;
+    for (Rule rule : statement.rules()) {
+      double violation = rule.violation(literals);
+      if (violation > 0) {
+        double amount = rule.amount(violation);
+        double own = amount * rule.costPerUnit();
+        unmet.add(new Unmet(rule.name(), rule.required(), amount, own));
+        cost += own;
+      }
+    }
+    List<Decision> undecided = new ArrayList<>();
+    for (Decision decision : statement.decisions()) {
+      if (decision instanceof Choice<?> choice && statement.chosen(choice, literals).isEmpty()) {
+        undecided.add(choice);
+        int options = 0;
+        for (int k = 0; k < choice.values(); k++) {
+          options += literals.bit(choice.firstLiteral() + k);
+        }
+        unmet.add(
+            new Unmet("one option of '" + choice.name() + "'", true, Math.abs(options - 1), 0));
+      }
+    }
+    double value = statement.objective().value(literals) + statement.sense().sign() * cost;
+    return new Plan(statement, literals, value, unmet, undecided);
+  }
+
+  /**
+   * What the plan is worth: the objectives and the costs of preferred rules, in the model's sense.
+   */
+  public double value() {
+    return value;
+  }
+
+  /** Whether every choice is decided and every required rule is kept. */
+  public boolean feasible() {
+    return unmet.stream().noneMatch(Unmet::required);
+  }
+
+  /** The rules that are not kept, in the order of the model; then choices without one option. */
+  public List<Unmet> unmet() {
+    return unmet;
+  }
+
+  /** The decisions that the plan leaves open. */
+  public List<Decision> undecided() {
+    return undecided;
+  }
+
+  /**
+   * The option that a choice takes.
+   *
+   * @throws IllegalArgumentException if it is of another model
+   * @throws IllegalStateException if the plan leaves it undecided
+   */
+  public <T> T value(Choice<T> choice) {
+    return find(choice)
+        .orElseThrow(
+            () ->
+                new IllegalStateException(
+                    "choice '"
+                        + choice.name()
+                        + "' is undecided in this plan; look at undecided() first, or use find"));
+  }
+
+  /** The option that a choice takes, if it is decided. */
+  public <T> Optional<T> find(Choice<T> choice) {
+    statement.require(choice);
+    return statement.chosen(choice, literals).map(choice.options()::get);
+  }
+
+  /** The value of a bit. */
+  public boolean value(Bit bit) {
+    return holds(bit);
+  }
+
+  /** Whether a literal holds. */
+  public boolean holds(Literal literal) {
+    statement.require(literal.owner().decisionOf(literal.index()));
+    return literals.get(literal.index()) != literal.negated();
+  }
+
+  /**
+   * The number that an expression is under this plan.
+   *
+   * @throws IllegalArgumentException if it speaks of another model
+   */
+  public double number(Expr expr) {
+    Model.requireOwner(expr, statement.owner());
+    Expansion<Double> expansion = Expansion.of(expr, Arithmetic.DOUBLES);
+    double sum = 0;
+    for (int t = 0; t < expansion.products.size(); t++) {
+      boolean all = true;
+      for (int literal : expansion.products.get(t)) {
+        all &= literals.get(literal);
+      }
+      sum += all ? expansion.coefficients.get(t) : 0;
+    }
+    return sum;
+  }
+
+  /** Which literals of the statement hold. */
+  public State literals() {
+    return literals;
+  }
+
+  /** The statement that the plan was checked against. */
+  public Statement statement() {
+    return statement;
+  }
+
+  @Override
+  public int compareTo(Plan other) {
+    if (feasible() != other.feasible()) {
+      return feasible() ? -1 : 1;
+    }
+    int sign = statement.sense().sign();
+    int byValue = Double.compare(sign * value, sign * other.value);
+    return byValue != 0 ? byValue : literals.compareTo(other.literals);
+  }
+
+  @Override
+  public boolean equals(Object object) {
+    return object instanceof Plan other
+        && statement.owner() == other.statement.owner()
+        && literals.equals(other.literals)
+        && value == other.value
+        && unmet.equals(other.unmet);
+  }
+
+  @Override
+  public int hashCode() {
+    return literals.hashCode();
+  }
+
+  /** The decisions and their values, cut short; then value and unmet rules. */
+  @Override
+  public String toString() {
+    StringBuilder text = new StringBuilder("Plan(");
+    List<Decision> decisions = statement.decisions();
+    for (int d = 0; d < Math.min(SHOWN, decisions.size()); d++) {
+      text.append(d == 0 ? "" : ", ").append(decisions.get(d).name()).append(" = ");
+      text.append(shown(decisions.get(d)));
+    }
+    text.append(decisions.size() > SHOWN ? ", ..." : "").append("; value ");
+    text.append(Text.number(value)).append(feasible() ? ", feasible" : ", infeasible");
+    return text.append(unmet.isEmpty() ? "" : ", unmet " + Text.list(unmet)).append(')').toString();
+  }
+
+  private Object shown(Decision decision) {
+    return decision instanceof Choice<?> choice
+        ? find(choice).<Object>map(option -> option).orElse("undecided")
+        : value((Bit) decision);
+  }
+}

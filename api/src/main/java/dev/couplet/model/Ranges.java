@@ -1,0 +1,110 @@
+package dev.couplet.model;
+
+import dev.couplet.form.Polynomial;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * Bounds what a polynomial over literals can be worth when every choice is exactly one of its
+ * options.
+ *
+ * <p>Terms are grouped by the decisions they speak of. Two terms of one group name different
+ * options of some choice, so that at most one of them holds; the extremes of the group are those of
+ * its coefficients, and 0 unless the group covers every combination. Sums of groups bound the
+ * whole, and are exact for linear polynomials.
+ */
+final class Ranges {
+  private static final class Group {
+    double lowest = Double.POSITIVE_INFINITY;
+    double highest = Double.NEGATIVE_INFINITY;
+    long terms;
+    long combinations;
+  }
+
+  private final Decision[] decisionOf;
+  private final Map<List<Integer>, Group> groups = new LinkedHashMap<>();
+  private double lowest;
+  private double highest;
+  private double magnitude;
+  private boolean whole = true;
+  private long terms;
+
+  private Ranges(Decision[] decisionOf) {
+    this.decisionOf = decisionOf;
+  }
+
+  /** The range of a polynomial over literals; {@code decisionOf} maps each to its decision. */
+  static Range of(Polynomial polynomial, Decision[] decisionOf) {
+    Ranges ranges = new Ranges(decisionOf);
+    polynomial.forEachTerm(ranges::take);
+    ranges.groups.values().forEach(ranges::close);
+    return ranges.outward();
+  }
+
+  private void take(double coefficient, int[] literals) {
+    magnitude += Math.abs(coefficient);
+    whole &= coefficient == Math.rint(coefficient);
+    terms++;
+    boolean ofBits = true;
+    for (int literal : literals) {
+      ofBits &= decisionOf[literal] instanceof Bit;
+    }
+    if (literals.length == 0) {
+      lowest += coefficient;
+      highest += coefficient;
+    } else if (ofBits) {
+      lowest += Math.min(0, coefficient);
+      highest += Math.max(0, coefficient);
+    } else if (possible(literals)) {
+      collect(coefficient, literals);
+    }
+  }
+
+  /** Two different options of one choice never hold together. */
+  private boolean possible(int[] literals) {
+    for (int k = 1; k < literals.length; k++) {
+      if (decisionOf[literals[k]] == decisionOf[literals[k - 1]]) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private void collect(double coefficient, int[] literals) {
+    List<Integer> key = new ArrayList<>(literals.length);
+    long combinations = 1;
+    for (int literal : literals) {
+      if (decisionOf[literal] instanceof Choice<?> choice) {
+        key.add(choice.firstLiteral());
+        combinations = Math.min(Long.MAX_VALUE / choice.values(), combinations) * choice.values();
+      } else {
+        key.add(literal);
+        combinations = Long.MAX_VALUE / Integer.MAX_VALUE;
+      }
+    }
+    Group group = groups.computeIfAbsent(key, k -> new Group());
+    group.combinations = combinations;
+    group.terms++;
+    group.lowest = Math.min(group.lowest, coefficient);
+    group.highest = Math.max(group.highest, coefficient);
+  }
+
+  private void close(Group group) {
+    boolean covered = group.terms == group.combinations;
+    lowest += covered ? group.lowest : Math.min(0, group.lowest);
+    highest += covered ? group.highest : Math.max(0, group.highest);
+  }
+
+  /**
+   * Whole numbers below 2^51 were added without rounding; other sums are widened by their error.
+   */
+  private Range outward() {
+    if (whole && magnitude < 0x1p51) {
+      return new Range(lowest, highest);
+    }
+    double error = Math.ulp(magnitude) * (terms + 1);
+    return new Range(lowest - error, highest + error);
+  }
+}

@@ -1,0 +1,119 @@
+package dev.couplet.model;
+
+import dev.couplet.form.Polynomial;
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.util.Locale;
+
+/**
+ * A condition brought to whole numbers: constants moved into the limits, decimals multiplied by a
+ * power of ten, common factors taken out. Nothing is rounded; what does not fit is refused.
+ *
+ * @param terms the polynomial over literals, whole coefficients, no constant
+ * @param lowest whole, or minus infinity
+ * @param highest whole, or infinity
+ * @param unit what one whole unit is in the condition's own units
+ */
+record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecimal unit) {
+  private static final BigDecimal LIMIT = BigDecimal.valueOf(1L << 51);
+
+  static ScaledCondition of(String rule, Condition condition, int literals) {
+    Expansion<BigDecimal> expansion = Expansion.of(condition.expr(), Arithmetic.DECIMALS);
+    int places = places(expansion, condition);
+    BigDecimal constant = BigDecimal.ZERO;
+    Polynomial.Builder terms = Polynomial.builder(literals);
+    for (int t = 0; t < expansion.products.size(); t++) {
+      BigDecimal scaled = scaled(rule, expansion.coefficients.get(t), places);
+      if (expansion.products.get(t).length == 0) {
+        constant = constant.add(scaled);
+      } else {
+        terms.add(scaled.doubleValue(), expansion.products.get(t));
+      }
+    }
+    double lowest = limit(rule, condition.lowest(), constant, places);
+    double highest = limit(rule, condition.highest(), constant, places);
+    Polynomial built = terms.build();
+    requireExact(rule, built);
+    return new ScaledCondition(built, lowest, highest, BigDecimal.ONE.scaleByPowerOfTen(-places))
+        .reduced();
+  }
+
+  private static int places(Expansion<BigDecimal> expansion, Condition condition) {
+    int places = 0;
+    for (BigDecimal coefficient : expansion.coefficients) {
+      places = Math.max(places, coefficient.stripTrailingZeros().scale());
+    }
+    for (double limit : new double[] {condition.lowest(), condition.highest()}) {
+      if (Double.isFinite(limit)) {
+        places = Math.max(places, Text.decimal(limit).stripTrailingZeros().scale());
+      }
+    }
+    return places;
+  }
+
+  private static double limit(String rule, double limit, BigDecimal constant, int places) {
+    if (!Double.isFinite(limit)) {
+      return limit;
+    }
+    return fitting(rule, limit, scaled(rule, Text.decimal(limit), places).subtract(constant));
+  }
+
+  private static BigDecimal scaled(String rule, BigDecimal number, int places) {
+    BigDecimal scaled = number.scaleByPowerOfTen(places);
+    double shown = number.doubleValue();
+    fitting(rule, shown, scaled);
+    return scaled;
+  }
+
+  private static double fitting(String rule, double original, BigDecimal scaled) {
+    if (scaled.abs().compareTo(LIMIT) >= 0) {
+      throw new IllegalArgumentException(
+          String.format(
+              Locale.ROOT,
+              "rule '%s' cannot be kept in whole numbers: %s becomes %s, beyond 2^51, once all"
+                  + " decimals of the rule are whole; round its numbers to fewer decimals or"
+                  + " choose a larger unit",
+              rule,
+              Text.number(original),
+              scaled.toPlainString()));
+    }
+    return scaled.doubleValue();
+  }
+
+  private static void requireExact(String rule, Polynomial terms) {
+    double[] sum = {0};
+    terms.forEachTerm((coefficient, literals) -> sum[0] += Math.abs(coefficient));
+    if (sum[0] >= 0x1p51) {
+      throw new IllegalArgumentException(
+          "the whole coefficients of rule '"
+              + rule
+              + "' add up to "
+              + Text.number(sum[0])
+              + ", beyond 2^51; round its numbers to fewer decimals or choose a larger unit");
+    }
+  }
+
+  /** Without the largest factor common to all coefficients and limits. */
+  private ScaledCondition reduced() {
+    BigInteger[] factor = {BigInteger.ZERO};
+    terms.forEachTerm((coefficient, literals) -> factor[0] = factor[0].gcd(whole(coefficient)));
+    for (double limit : new double[] {lowest, highest}) {
+      factor[0] = Double.isFinite(limit) ? factor[0].gcd(whole(limit)) : factor[0];
+    }
+    double common = factor[0].doubleValue();
+    if (common <= 1) {
+      return this;
+    }
+    Polynomial.Builder divided = Polynomial.builder(terms.size());
+    terms.forEachTerm((coefficient, literals) -> divided.add(coefficient / common, literals));
+    return new ScaledCondition(
+        divided.build(),
+        lowest / common,
+        highest / common,
+        unit.multiply(new BigDecimal(factor[0])));
+  }
+
+  private static BigInteger whole(double number) {
+    return BigInteger.valueOf((long) number);
+  }
+}
