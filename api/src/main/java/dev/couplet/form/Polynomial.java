@@ -213,13 +213,12 @@ public final class Polynomial {
       }
       reserve(variables.length);
       int from = start[terms];
+      int end = from;
       for (int variable : variables) {
-        factor[start[terms]++] = Check.variable(variable, size);
+        factor[end++] = Check.variable(variable, size);
       }
-      int to = TermOrder.canonical(factor, from, start[terms]);
-      start[terms] = from;
       coefficient[terms++] = value;
-      start[terms] = to;
+      start[terms] = TermOrder.canonical(factor, from, end);
       return this;
     }
 
