@@ -2,6 +2,7 @@
 module dev.couplet.api {
   requires static transitive org.jspecify;
 
+  exports dev.couplet.audit;
   exports dev.couplet.form;
   exports dev.couplet.lower;
   exports dev.couplet.model;

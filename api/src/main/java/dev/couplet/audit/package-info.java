@@ -1,0 +1,15 @@
+/**
+ * Checks that a user calls from a unit test: plain Java, bound to no test framework.
+ *
+ * <p>{@link dev.couplet.audit.SamplerAudit} runs the contract of every {@link
+ * dev.couplet.sampling.Sampler} over one of them, the library's own or a user's. What an audit
+ * found wrong are its {@link dev.couplet.audit.Findings}, each a {@link dev.couplet.audit.Finding}
+ * with the name of the check and a message that says what happened and how to mend it; {@code
+ * orThrow()} turns them into an {@link java.lang.AssertionError}.
+ */
+@CheckReturnValue
+@NullMarked
+package dev.couplet.audit;
+
+import dev.couplet.form.CheckReturnValue;
+import org.jspecify.annotations.NullMarked;
