@@ -71,10 +71,7 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
   }
 
   private void grow() {
-    int capacity = (int) Math.min(Integer.MAX_VALUE - 8L, 2L * count);
-    if (capacity <= count) {
-      throw new IllegalArgumentException("a form holds at most " + capacity + " entries");
-    }
+    int capacity = Check.capacity(rows.length, count + 1L);
     rows = Arrays.copyOf(rows, capacity);
     columns = Arrays.copyOf(columns, capacity);
     values = Arrays.copyOf(values, capacity);

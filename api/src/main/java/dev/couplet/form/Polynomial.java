@@ -196,7 +196,7 @@ public final class Polynomial {
   /** Collects the terms of a {@link Polynomial}; terms with the same product add up. */
   public static final class Builder {
     private final int size;
-    private int[] start = new int[17];
+    private int[] start = new int[16];
     private int[] factor = new int[32];
     private double[] coefficient = new double[16];
     private int terms;
