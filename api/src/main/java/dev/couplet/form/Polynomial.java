@@ -240,13 +240,16 @@ public final class Polynomial {
       return this;
     }
 
+    /** Makes room for one more term of so many variables. */
     private void reserve(int width) {
-      if (terms == coefficient.length) {
-        coefficient = Arrays.copyOf(coefficient, 2 * terms);
-        start = Arrays.copyOf(start, 2 * terms + 1);
+      int starts = Check.capacity(start.length, terms + 2L);
+      if (starts > start.length) {
+        start = Arrays.copyOf(start, starts);
+        coefficient = Arrays.copyOf(coefficient, starts);
       }
-      if (start[terms] + width > factor.length) {
-        factor = Arrays.copyOf(factor, Math.max(2 * factor.length, start[terms] + width));
+      int factors = Check.capacity(factor.length, (long) start[terms] + width);
+      if (factors > factor.length) {
+        factor = Arrays.copyOf(factor, factors);
       }
     }
 
