@@ -69,6 +69,11 @@ public final class Draws implements Iterable<Draw> {
     return new Draws(rows, total, end, seed, OptionalDouble.of(lowerBound));
   }
 
+  /** These draws with another reason why the run ended. */
+  public Draws end(End newEnd) {
+    return new Draws(rows, total, newEnd, seed, bound);
+  }
+
   /** The row of lowest energy. */
   public Draw best() {
     return rows.get(0);

@@ -55,6 +55,26 @@ public final class Structure {
     return exactlyOne;
   }
 
+  /**
+   * Insists that every set lies within a form.
+   *
+   * @throws IllegalArgumentException naming the first bit that the form does not have
+   */
+  public void requireWithin(int size) {
+    for (List<Integer> set : exactlyOne) {
+      for (int bit : set) {
+        if (bit >= size) {
+          throw new IllegalArgumentException(
+              "an exactly-one set names bit "
+                  + bit
+                  + ", the form has "
+                  + size
+                  + " variables; pass the structure of the form that is sampled");
+        }
+      }
+    }
+  }
+
   @Override
   public boolean equals(Object object) {
     return object instanceof Structure other && exactlyOne.equals(other.exactlyOne);

@@ -8,6 +8,7 @@ import dev.couplet.kernel.Drawer;
 import dev.couplet.kernel.LocalFields;
 import dev.couplet.kernel.Metropolis;
 import dev.couplet.kernel.Pace;
+import dev.couplet.kernel.Reassignment;
 import dev.couplet.kernel.Streams;
 import dev.couplet.sampling.Run;
 import java.util.List;
@@ -20,6 +21,7 @@ final class Annealer implements Drawer {
   private final Finish finish;
   private final LocalFields fields;
   private final Metropolis metropolis;
+  private final Reassignment reassignment;
   private final Descent descent;
 
   Annealer(Adjacency rows, Run run, Schedule schedule, Finish finish) {
@@ -28,6 +30,7 @@ final class Annealer implements Drawer {
     this.finish = finish;
     this.fields = new LocalFields(rows);
     this.metropolis = new Metropolis(fields);
+    this.reassignment = new Reassignment(fields, run.structure());
     this.descent = new Descent(fields);
   }
 
@@ -41,7 +44,8 @@ final class Annealer implements Drawer {
     fields.set(begin);
     int sweeps = schedule.sweeps(first);
     for (int t = 0; t < sweeps; t++) {
-      if (!metropolis.sweep(schedule.inverseTemperature(t, sweeps), random, pace)) {
+      double inverse = schedule.inverseTemperature(t, sweeps);
+      if (!metropolis.sweep(inverse, random, pace) || !reassignment.sweep(inverse, random, pace)) {
         break;
       }
     }
@@ -53,6 +57,10 @@ final class Annealer implements Drawer {
 
   /** Also a draw that was told to end goes down a little, so that its state is worth returning. */
   private void descend(Pace pace) {
-    descent.run(pace.ended() ? Pace.closing() : pace);
+    Pace own = pace.ended() ? Pace.closing() : pace;
+    descent.run(own);
+    while (!own.ended() && reassignment.descend(descent.least())) {
+      descent.run(own);
+    }
   }
 }

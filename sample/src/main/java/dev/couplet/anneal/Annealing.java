@@ -19,6 +19,9 @@ import java.util.OptionalDouble;
  * short and become longer, so that easy forms are sampled often and hard ones thoroughly. Hot and
  * cold follow from the form's coefficients unless they are set.
  *
+ * <p>Where the run knows exactly-one sets, each sweep also tries to move the 1 of every set to
+ * another of its bits, in one step, without climbing over the penalty between them.
+ *
  * <p>Cost: a sweep takes O(n + d) steps, d the degrees of the variables that flip: O(n + m) at
  * most. Memory: 24 bytes a pair, and 16 bytes a variable and thread. Immutable and thread-safe.
  *
@@ -81,16 +84,18 @@ public final class Annealing implements Sampler {
   public Draws sample(Qubo form, Run run) {
     Vigil vigil = run.begin();
     run.requireStartsOf(form.size());
+    run.structure().requireWithin(form.size());
     if (vigil.over()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
     Adjacency rows = Adjacency.of(form);
-    Schedule schedule = new Schedule(cooling, temperatures(rows), Sweeps.of(rows, run.effort()));
+    Schedule schedule =
+        new Schedule(cooling, temperatures(rows, run), Sweeps.of(rows, run.effort()));
     return DrawLoop.run(form, run, vigil, 1, () -> new Annealer(rows, run, schedule, finish));
   }
 
-  private Temperatures temperatures(Adjacency rows) {
-    Temperatures own = Temperatures.of(rows);
+  private Temperatures temperatures(Adjacency rows, Run run) {
+    Temperatures own = Temperatures.of(rows, run.structure());
     double first = hot.orElse(Math.max(own.hot(), cold.orElse(0)));
     return new Temperatures(first, cold.orElse(Math.min(own.cold(), first)));
   }

@@ -1,6 +1,7 @@
 package dev.couplet.anneal;
 
 import dev.couplet.kernel.Adjacency;
+import dev.couplet.sampling.Structure;
 import java.util.Arrays;
 
 /**
@@ -14,9 +15,9 @@ import java.util.Arrays;
 record Temperatures(double hot, double cold) {
   private static final int SAMPLE = 1 << 12;
 
-  static Temperatures of(Adjacency rows) {
+  static Temperatures of(Adjacency rows, Structure structure) {
     double[] scale = scales(rows);
-    double[] coefficient = sample(rows);
+    double[] coefficient = sample(Coefficients.of(rows, structure));
     if (scale.length == 0 || coefficient.length == 0) {
       return new Temperatures(1, 1);
     }
@@ -70,10 +71,10 @@ record Temperatures(double hot, double cold) {
   }
 
   /** Magnitudes above zero of a spread sample of the coefficients, ascending. */
-  private static double[] sample(Adjacency rows) {
-    double[] magnitude = new double[2 * SAMPLE];
-    int count = gather(rows.weight(), magnitude, 0);
-    count = gather(rows.linear(), magnitude, count);
+  private static double[] sample(Coefficients coefficients) {
+    double[] magnitude = new double[4 * SAMPLE];
+    int count = gather(coefficients.pairs(), magnitude, 0);
+    count = gather(coefficients.linear(), magnitude, count);
     Arrays.sort(magnitude, 0, count);
     return Arrays.copyOf(magnitude, count);
   }

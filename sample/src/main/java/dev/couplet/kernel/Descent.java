@@ -25,6 +25,15 @@ public final class Descent {
     }
   }
 
+  /** What a change of several variables must at least gain to count: below 0 by all rounding. */
+  public double least() {
+    double sum = 0;
+    for (double own : least) {
+      sum = Math.min(sum, own);
+    }
+    return 2 * sum;
+  }
+
   /** Goes down to a local minimum, unless the pace ends it. O(n) a pass, few passes. */
   public void run(Pace pace) {
     if (!fields.rows().exact()) {

@@ -1,0 +1,47 @@
+package dev.couplet.solve;
+
+import dev.couplet.bound.Rounding;
+import dev.couplet.bound.SplitBound;
+import dev.couplet.form.Polynomial;
+import dev.couplet.form.Qubo;
+import dev.couplet.lower.Lowered;
+import dev.couplet.model.Statement;
+import dev.couplet.sampling.Effort;
+import dev.couplet.sampling.Run;
+import java.time.Duration;
+import java.util.Locale;
+
+/**
+ * Bounds what every feasible plan costs from below: by the range of the objective over plans, and
+ * by the bound of the whole form, whose penalties vanish on feasible plans.
+ */
+final class BoundStage {
+  private static final int SHARE_OF_TIME = 10;
+  private static final Duration ENOUGH = Duration.ofSeconds(1);
+
+  private BoundStage() {}
+
+  static double run(Lowered lowered, Course course) {
+    double bound = Math.max(byRange(lowered.statement()), byForm(lowered.qubo(), course));
+    String shown = String.format(Locale.ROOT, "%.12g", lowered.valueOf(bound));
+    course.finished("bound", shown);
+    return bound;
+  }
+
+  /** Preferred rules cost nothing at the least. */
+  static double byRange(Statement statement) {
+    Polynomial minimised = statement.objective().times(statement.sense().sign());
+    return statement.range(minimised).lowest();
+  }
+
+  static double byForm(Qubo form, Course course) {
+    Duration time = course.left().limit().map(BoundStage::share).orElse(ENOUGH);
+    Run run = Run.of(Effort.within(time)).watch(course.quietly());
+    return SplitBound.standard().below(form, run) - Rounding.ofEnergy(form);
+  }
+
+  private static Duration share(Duration left) {
+    Duration share = left.dividedBy(SHARE_OF_TIME);
+    return share.isZero() ? left : share;
+  }
+}
