@@ -1,6 +1,7 @@
 package dev.couplet.bench.instances;
 
 import dev.couplet.form.Qubo;
+import dev.couplet.model.Sense;
 
 /**
  * One problem that stands in a file or comes from a generator, as a form to be minimised.

@@ -3,10 +3,12 @@ package dev.couplet.bench.instances;
 import dev.couplet.form.FormatException;
 import java.io.BufferedInputStream;
 import java.io.BufferedReader;
+import java.io.EOFException;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -75,13 +77,19 @@ public final class InstanceReader {
    *
    * @throws FormatException with file, line and column of the first fault
    * @throws IllegalArgumentException if the content does not tell the kind
-   * @throws IOException if the file cannot be read
+   * @throws IOException if the file cannot be read, naming the file
    */
   public Instance read(Path file) throws IOException {
     try (BufferedReader reader = open(file)) {
       List<String> head = head(reader);
       Format chosen = format.isPresent() ? format.get() : recognise(file, head);
       return chosen.read(new Source(file.toString(), nameOf(file), reader, item));
+    } catch (FileSystemException named) {
+      throw named;
+    } catch (EOFException cutShort) {
+      throw new IOException(file + ": the compressed text is cut short", cutShort);
+    } catch (IOException unreadable) {
+      throw new IOException(file + ": cannot be read: " + unreadable.getMessage(), unreadable);
     }
   }
 

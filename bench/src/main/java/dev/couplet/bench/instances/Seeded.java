@@ -2,6 +2,7 @@ package dev.couplet.bench.instances;
 
 import dev.couplet.form.PairVisitor;
 import dev.couplet.form.Qubo;
+import dev.couplet.model.Sense;
 import java.util.List;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;

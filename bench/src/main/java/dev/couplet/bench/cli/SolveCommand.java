@@ -1,0 +1,111 @@
+package dev.couplet.bench.cli;
+
+import dev.couplet.bench.instances.Instance;
+import dev.couplet.bound.SplitBound;
+import dev.couplet.sampling.Effort;
+import dev.couplet.sampling.Run;
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+
+/** The verb {@code solve}: samples one instance and bounds it. */
+@Command(
+    name = "solve",
+    mixinStandardHelpOptions = true,
+    sortOptions = false,
+    description = {
+      "Looks for the best value of one instance, and for a bound on it.",
+      "",
+      "Values are in the file's own sense and units."
+    },
+    parameterListHeading = "%nParameters:%n",
+    optionListHeading = "%nOptions:%n",
+    footerHeading = "%nColumns:%n",
+    footer = {
+      "  instance      the file's name without folder and ending",
+      "  n, pairs      bits of the quadratic form, pairs of them with a coefficient",
+      "  method, seed  as asked for",
+      "  seconds       how long the method ran; reading the file is not in it, nor is bounding",
+      "                afterwards (at most a tenth of --seconds) where the method gives no bound",
+      "  value         the best value found",
+      "  hit_seconds   when the run first told of the target, or without one of that value.",
+      "                Methods tell at most every 50 ms, so that this is never too early, but can",
+      "                be late by that much, and is the end of the run if it ended before it told",
+      "  bound         no value is better than this: proved",
+      "  gap           how far value and bound are apart",
+      "  proof         'optimal' if they are not, else 'none'",
+      "A dash stands for what is not there."
+    })
+final class SolveCommand implements Callable<Integer> {
+  private static final int NOT_REACHED = 1;
+
+  @Spec private CommandSpec spec = CommandSpec.create();
+
+  @Mixin private Inputs inputs = new Inputs();
+
+  @Option(
+      names = "--seconds",
+      paramLabel = "S",
+      description = "The time the method may take (default: ${DEFAULT-VALUE}).")
+  private double seconds = 10;
+
+  @Option(
+      names = "--seed",
+      paramLabel = "N",
+      description = "The seed of all random numbers (default: ${DEFAULT-VALUE}).")
+  private long seed = 1;
+
+  @Option(
+      names = "--threads",
+      paramLabel = "T",
+      description = "The number of threads (default: ${DEFAULT-VALUE}).")
+  private int threads = 1;
+
+  @Option(
+      names = "--method",
+      paramLabel = "NAME",
+      completionCandidates = Methods.Names.class,
+      description = "One of ${COMPLETION-CANDIDATES} (default: ${DEFAULT-VALUE}).")
+  private String method = Methods.STANDARD;
+
+  @Option(
+      names = "--target",
+      paramLabel = "V",
+      description = "End as soon as this value is reached; exit status 1 if it is not.")
+  private @Nullable Double target;
+
+  @Override
+  public Integer call() throws IOException {
+    Methods.Method chosen = Methods.named(method);
+    Effort effort = Effort.within(Options.seconds(seconds)).seed(seed).threads(threads);
+    Instance instance = inputs.read();
+    if (target != null) {
+      effort = effort.target(instance.energy(target));
+    }
+    Attempt attempt = bounded(attempt(chosen, instance, effort));
+    new Table(spec.commandLine().getOut(), Attempt.COLUMNS).row(attempt.cells());
+    return attempt.reached() ? 0 : NOT_REACHED;
+  }
+
+  private Attempt attempt(Methods.Method chosen, Instance instance, Effort effort) {
+    PrintWriter err = spec.commandLine().getErr();
+    boolean shown = ProgressLine.onTerminal();
+    try (ProgressLine line = new ProgressLine(err, shown, instance::value)) {
+      return Attempt.make(instance, chosen, effort, line, System::nanoTime);
+    }
+  }
+
+  private Attempt bounded(Attempt attempt) {
+    if (attempt.bound().isPresent()) {
+      return attempt;
+    }
+    Effort share = Effort.within(Options.seconds(seconds / 10));
+    return attempt.bound(SplitBound.standard().below(attempt.instance().form(), Run.of(share)));
+  }
+}
