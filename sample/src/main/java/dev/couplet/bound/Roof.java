@@ -12,12 +12,14 @@ import dev.couplet.form.State;
  */
 public final class Roof {
   private final double bound;
+  private final double slack;
   private final State strong;
   private final State weak;
   private final State values;
 
-  private Roof(double bound, State strong, State weak, State values) {
+  private Roof(double bound, double slack, State strong, State weak, State values) {
     this.bound = bound;
+    this.slack = slack;
     this.strong = strong;
     this.weak = weak;
     this.values = values;
@@ -25,11 +27,11 @@ public final class Roof {
 
   static Roof unknown(int size, double bound) {
     State none = State.zeros(size);
-    return new Roof(bound, none, none, none);
+    return new Roof(bound, 0, none, none, none);
   }
 
   /** Reads the values off a network with a maximum flow. */
-  static Roof of(Implications network, double bound) {
+  static Roof of(Implications network, double bound, double slack) {
     int size = network.nodes / 2 - 1;
     boolean[] strong = new boolean[size];
     boolean[] weak = new boolean[size];
@@ -43,12 +45,17 @@ public final class Roof {
       // Implications lead from higher to lower components: the lower literal is safe to be true.
       values[i] = strong[i] ? one : weak[i] && component[2 * i] < component[2 * i + 1];
     }
-    return new Roof(bound, State.of(strong), State.of(weak), State.of(values));
+    return new Roof(bound, slack, State.of(strong), State.of(weak), State.of(values));
   }
 
   /** A number that no energy of the form is below. */
   public double bound() {
     return bound;
+  }
+
+  /** By how much rounding may have moved the minimum: 0 if the form's energies are exact. */
+  public double slack() {
+    return slack;
   }
 
   /** The bits whose value is the same in every minimum: those that are 1 here. */

@@ -31,7 +31,11 @@ public final class RoofDual implements Bound {
 
   /** The bound with the bits that it fixes. */
   public Roof roof(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    return roof(form, run.begin());
+  }
+
+  /** The bound with the bits that it fixes, as a stage of a run that has begun. */
+  public Roof roof(Qubo form, Vigil vigil) {
     if (Double.isInfinite(form.magnitude())) {
       return Roof.unknown(form.size(), Double.NEGATIVE_INFINITY);
     }
@@ -40,6 +44,6 @@ public final class RoofDual implements Bound {
     boolean done = !vigil.over() && network.maximise(vigil);
     // Rounded up: twice a whole number is at least the odd number below it plus one.
     double bound = scaled.bound(-Math.floorDiv(-network.twiceBound(), 2));
-    return done ? Roof.of(network, bound) : Roof.unknown(form.size(), bound);
+    return done ? Roof.of(network, bound, scaled.slack()) : Roof.unknown(form.size(), bound);
   }
 }

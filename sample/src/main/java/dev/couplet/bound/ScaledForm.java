@@ -7,7 +7,7 @@ import dev.couplet.form.Qubo;
  *
  * <p>Coefficients are multiplied by a power of two that brings the sum of their magnitudes to
  * between 2^57 and 2^59, and rounded to whole numbers. If the form is exact nothing is lost by
- * that; otherwise {@link #slack} covers what is, and the rounding of computed energies with it.
+ * that; otherwise {@link #slack()} covers what is, and the rounding of computed energies with it.
  */
 final class ScaledForm {
   private static final int BITS = 58;
@@ -77,6 +77,11 @@ final class ScaledForm {
       b = rest;
     }
     return a;
+  }
+
+  /** What an energy in whole numbers and a computed energy of the form may differ by. */
+  double slack() {
+    return slack;
   }
 
   /** A number that no energy of the form is below, from a lower bound in whole numbers. */
