@@ -20,8 +20,9 @@ import java.util.function.Supplier;
  *
  * <p>Batches are given out in order of their numbers and the first always begins, so that there is
  * something to return. A draw that reaches the target cuts off all later ones; earlier ones are
- * finished, so that the draws returned do not depend on the threads. A draw that stop or deadline
- * cut short is returned only if it is lower than all that were finished.
+ * finished, so that the draws returned do not depend on the threads; but if the number of draws is
+ * open, the first that reaches the target ends the run at once. A draw that stop or deadline cut
+ * short is returned only if it is lower than all that were finished.
  */
 public final class DrawLoop {
   private final Qubo form;
@@ -106,6 +107,9 @@ public final class DrawLoop {
     kept.finished(number, state, energy);
     if (reached) {
       cut.accumulateAndGet(number, Math::min);
+      if (effort.draws().isEmpty()) {
+        vigil.end(End.TARGET);
+      }
     }
   }
 
