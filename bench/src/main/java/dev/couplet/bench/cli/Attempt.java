@@ -86,10 +86,10 @@ record Attempt(
     return instance.value(draws.best().energy());
   }
 
-  /** A proved bound on every value, if there is one. */
+  /** A proved bound on every value, if there is one that says anything. */
   OptionalDouble bound() {
     OptionalDouble bound = draws.bound();
-    return bound.isPresent()
+    return bound.isPresent() && Double.isFinite(bound.getAsDouble())
         ? OptionalDouble.of(instance.value(bound.getAsDouble()))
         : OptionalDouble.empty();
   }

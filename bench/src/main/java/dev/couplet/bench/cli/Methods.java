@@ -5,6 +5,7 @@ import dev.couplet.anneal.Cooling;
 import dev.couplet.anneal.Finish;
 import dev.couplet.exact.Enumeration;
 import dev.couplet.sampling.Sampler;
+import dev.couplet.solve.Solver;
 import java.util.Iterator;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -13,12 +14,13 @@ import java.util.Map;
 /** Every method by its name on the command line. */
 final class Methods {
   /** What {@code solve} uses unless told otherwise. */
-  static final String STANDARD = "annealing";
+  static final String STANDARD = "solver";
 
   private static final Map<String, Sampler> SAMPLERS = new LinkedHashMap<>();
   private static final Map<String, Thermal> THERMAL = new LinkedHashMap<>();
 
   static {
+    SAMPLERS.put("solver", Solver.standard());
     SAMPLERS.put("annealing", Annealing.standard());
     SAMPLERS.put("enumeration", Enumeration.standard());
 

@@ -94,6 +94,16 @@ class AttemptTest {
   }
 
   @Test
+  void anInfiniteBoundIsNone() {
+    Draws draws =
+        Draws.of(INSTANCE.form(), List.of(State.zeros(1)), End.DONE, 1)
+            .bound(Double.NEGATIVE_INFINITY);
+    Attempt attempt =
+        new Attempt(INSTANCE, "story", Effort.draws(1), draws, 1, OptionalDouble.of(1));
+    assertEquals(List.of("-", "-", "none"), attempt.cells().subList(8, 11));
+  }
+
+  @Test
   void theListenerHearsEverything() {
     int[] heard = {0};
     Attempt attempt =
