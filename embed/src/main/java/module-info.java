@@ -4,6 +4,7 @@ module dev.couplet.embed {
   requires transitive dev.couplet.api;
   requires transitive org.jgrapht.core;
 
+  exports dev.couplet.bond;
   exports dev.couplet.embed;
   exports dev.couplet.host;
 }
