@@ -58,8 +58,7 @@ class ReadmeTest {
     StringWriter messages = new StringWriter();
     try (StandardJavaFileManager files = compiler.getStandardFileManager(null, null, null)) {
       List<String> options =
-          List.of(
-              "-d", folder.toString(), "-classpath", System.getProperty("java.class.path"));
+          List.of("-d", folder.toString(), "-classpath", System.getProperty("java.class.path"));
       boolean compiled =
           compiler
               .getTask(messages, files, null, options, null, files.getJavaFileObjects(source))
