@@ -6,5 +6,6 @@ module dev.couplet.embed {
 
   exports dev.couplet.bond;
   exports dev.couplet.embed;
+  exports dev.couplet.embed.path;
   exports dev.couplet.host;
 }

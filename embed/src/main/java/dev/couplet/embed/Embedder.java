@@ -8,7 +8,7 @@ import dev.couplet.sampling.Watch;
  * A method that looks for embeddings.
  *
  * <p>Implementations are immutable and thread-safe: one instance serves many threads. They keep the
- * promises listed in the package's documentation.
+ * promises listed in the package's documentation, which {@link EmbedderAudit} checks.
  *
  * <p>How an effort is read: a draw is one attempt from scratch, a sweep one pass over all guest
  * vertices in it; the first attempt that succeeds is the last. A target ends the search as soon as

@@ -125,6 +125,38 @@ public final class CompactGraph {
   }
 
   /**
+   * The connected part of every vertex: parts are numbered from 0 in the order of their lowest
+   * vertices; a new array, O(n + m).
+   */
+  public int[] parts() {
+    int[] part = new int[vertices()];
+    int[] queue = new int[vertices()];
+    Arrays.fill(part, -1);
+    int count = 0;
+    for (int v = 0; v < part.length; v++) {
+      if (part[v] < 0) {
+        flood(v, count++, part, queue);
+      }
+    }
+    return part;
+  }
+
+  private void flood(int first, int number, int[] part, int[] queue) {
+    int tail = 0;
+    queue[tail++] = first;
+    part[first] = number;
+    for (int head = 0; head < tail; head++) {
+      int v = queue[head];
+      for (int k = start[v]; k < start[v + 1]; k++) {
+        if (part[target[k]] < 0) {
+          part[target[k]] = number;
+          queue[tail++] = target[k];
+        }
+      }
+    }
+  }
+
+  /**
    * Where the rows of {@link #targets()} begin, one entry a vertex and one for the end; a new
    * array, for kernels that walk the graph.
    */
