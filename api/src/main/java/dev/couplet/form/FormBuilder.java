@@ -4,8 +4,11 @@ import java.util.Arrays;
 
 /**
  * Collects the coefficients of a quadratic form. Repeated entries add up, in the order of arrival;
- * sums that come to zero are left out. Building takes time and memory linear in the number of
- * variables and entries.
+ * sums that come to zero are left out. Building takes time linear in the number of variables and
+ * entries.
+ *
+ * <p>Memory: 16 bytes an entry, half as much again while it grows, and the form that is built;
+ * entries that do not arrive in order take 8 more while they are sorted.
  */
 abstract class FormBuilder<B extends FormBuilder<B>> {
   private final int size;
@@ -15,6 +18,7 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
   private int[] columns = new int[16];
   private double[] values = new double[16];
   private int count;
+  private boolean ordered = true;
   private boolean rounding;
 
   FormBuilder(int size) {
@@ -52,12 +56,39 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
     if (!Double.isFinite(value)) {
       Check.finite("the coefficient of pair (" + i + ", " + j + ")", value);
     }
+    append(Math.min(i, j), Math.max(i, j), value);
+    return self();
+  }
+
+  private void append(int row, int column, double value) {
     if (count == rows.length) {
       grow();
     }
-    rows[count] = Math.min(i, j);
-    columns[count] = Math.max(i, j);
+    if (ordered && count > 0) {
+      int last = rows[count - 1];
+      ordered = last < row || (last == row && columns[count - 1] <= column);
+    }
+    rows[count] = row;
+    columns[count] = column;
     values[count++] = value;
+  }
+
+  B add(Quadratic other, double factor) {
+    Check.finite("the factor", factor);
+    if (other.size() > size) {
+      throw new IllegalArgumentException(
+          "cannot add a form in "
+              + other.size()
+              + " variables to one in "
+              + size
+              + "; give the builder at least as many");
+    }
+    Quadratic scaled = Conversion.times(other, factor);
+    constant += scaled.constant;
+    for (int i = 0; i < scaled.size(); i++) {
+      linear[i] += scaled.linear[i];
+    }
+    scaled.forEachPair(this::append);
     return self();
   }
 
@@ -78,38 +109,17 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
   }
 
   Quadratic finish() {
-    int[] order = PairOrder.of(rows, columns, count, size);
+    merge();
     int[] rowStart = new int[size + 1];
-    int[] column = new int[count];
-    double[] value = new double[count];
-    int kept = 0;
-    for (int p = 0; p < count; ) {
-      int row = rows[order[p]];
-      int col = columns[order[p]];
-      double sum = 0;
-      while (p < count && rows[order[p]] == row && columns[order[p]] == col) {
-        sum += values[order[p++]];
-      }
-      if (sum != 0) {
-        Check.finite("the coefficient of pair (" + row + ", " + col + ")", sum);
-        column[kept] = col;
-        value[kept++] = sum;
-        rowStart[row + 1]++;
-      }
+    for (int p = 0; p < count; p++) {
+      rowStart[rows[p] + 1]++;
     }
     for (int i = 0; i < size; i++) {
       rowStart[i + 1] += rowStart[i];
     }
-    return checked(rowStart, trim(column, kept), trim(value, kept));
-  }
-
-  private Quadratic checked(int[] rowStart, int[] column, double[] value) {
-    double[] own = new double[size];
-    for (int i = 0; i < size; i++) {
-      own[i] = Quadratic.normal(Check.finite("the linear coefficient of variable " + i, linear[i]));
-    }
-    double offset = Quadratic.normal(Check.finite("the constant", constant));
-    Quadratic form = new Quadratic(offset, own, rowStart, column, value);
+    int[] column = Arrays.copyOf(columns, count);
+    double[] value = Arrays.copyOf(values, count);
+    Quadratic form = Quadratic.of(constant, linear.clone(), rowStart, column, value);
     if (!rounding && form.magnitude() >= Check.EXACT_LIMIT && form.unitExponent() >= 0) {
       throw new IllegalArgumentException(
           "the integer coefficients add up to "
@@ -120,11 +130,26 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
     return form;
   }
 
-  private static int[] trim(int[] array, int length) {
-    return array.length == length ? array : Arrays.copyOf(array, length);
-  }
-
-  private static double[] trim(double[] array, int length) {
-    return array.length == length ? array : Arrays.copyOf(array, length);
+  /** Brings the entries in order, adds up those of one pair, and drops sums of zero. */
+  private void merge() {
+    if (!ordered) {
+      PairOrder.sort(rows, columns, values, count, size);
+      ordered = true;
+    }
+    int kept = 0;
+    for (int p = 0; p < count; ) {
+      int row = rows[p];
+      int column = columns[p];
+      double sum = 0;
+      while (p < count && rows[p] == row && columns[p] == column) {
+        sum += values[p++];
+      }
+      if (sum != 0) {
+        rows[kept] = row;
+        columns[kept] = column;
+        values[kept++] = sum;
+      }
+    }
+    count = kept;
   }
 }

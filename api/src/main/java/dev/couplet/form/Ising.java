@@ -14,7 +14,7 @@ package dev.couplet.form;
 public final class Ising {
   private final Quadratic form;
 
-  private Ising(Quadratic form) {
+  Ising(Quadratic form) {
     this.form = form;
   }
 
@@ -87,28 +87,17 @@ public final class Ising {
    * @throws IllegalArgumentException if the factor or a product is not finite
    */
   public Ising times(double factor) {
-    Check.finite("the factor", factor);
-    Builder scaled = builder(size()).allowRounding().addConstant(constant() * factor);
-    for (int i = 0; i < size(); i++) {
-      scaled.addLinear(i, linear(i) * factor);
-    }
-    forEachPair((i, j, value) -> scaled.addPair(i, j, value * factor));
-    return scaled.build();
+    return new Ising(Conversion.times(form, factor));
   }
 
-  /** The same energies over 0/1 variables, {@code s = 1 - 2x}; O(n + m), exact if this form is. */
+  /**
+   * The same energies over 0/1 variables, {@code s = 1 - 2x}; O(n + m). Exact for integer
+   * coefficients within the builder's limit, and for the spin form of such a {@link Qubo}.
+   *
+   * @throws IllegalArgumentException if a sum overflows
+   */
   public Qubo toQubo() {
-    Qubo.Builder qubo = Qubo.builder(size()).allowRounding().addConstant(constant());
-    for (int i = 0; i < size(); i++) {
-      qubo.addConstant(linear(i)).addLinear(i, -2 * linear(i));
-    }
-    forEachPair(
-        (i, j, value) -> {
-          double twice = -2 * value;
-          qubo.addConstant(value).addLinear(i, twice).addLinear(j, twice);
-          qubo.addPair(i, j, 4 * value);
-        });
-    return qubo.build();
+    return new Qubo(Conversion.toBits(form));
   }
 
   @Override
@@ -135,6 +124,16 @@ public final class Ising {
     @Override
     Builder self() {
       return this;
+    }
+
+    /**
+     * Adds a form, every coefficient multiplied by {@code factor}.
+     *
+     * @throws IllegalArgumentException if it has more variables than this builder, or a product is
+     *     not finite
+     */
+    public Builder add(Ising other, double factor) {
+      return add(other.form, factor);
     }
 
     /**

@@ -21,6 +21,36 @@ final class PairOrder {
     return byKey(byKey(identity, columns, size), rows, size);
   }
 
+  /** Brings entries into the order of their pairs, in place. */
+  static void sort(int[] rows, int[] columns, double[] values, int count, int size) {
+    int[] from = of(rows, columns, count, size);
+    for (int p = 0; p < count; p++) {
+      if (from[p] >= 0) {
+        cycle(rows, columns, values, from, p);
+      }
+    }
+  }
+
+  /** Moves the entries of one cycle of the permutation; places done are marked negative. */
+  private static void cycle(int[] rows, int[] columns, double[] values, int[] from, int first) {
+    int row = rows[first];
+    int column = columns[first];
+    double value = values[first];
+    int to = first;
+    while (from[to] != first) {
+      int source = from[to];
+      rows[to] = rows[source];
+      columns[to] = columns[source];
+      values[to] = values[source];
+      from[to] = ~source;
+      to = source;
+    }
+    rows[to] = row;
+    columns[to] = column;
+    values[to] = value;
+    from[to] = ~first;
+  }
+
   private static boolean isSorted(int[] rows, int[] columns, int count) {
     for (int p = 1; p < count; p++) {
       if (rows[p - 1] > rows[p] || (rows[p - 1] == rows[p] && columns[p - 1] > columns[p])) {

@@ -53,6 +53,9 @@ public final class Polynomial {
 
   /** The coefficient of the product of the variables, 0 if there is none; O(log terms). */
   public double coefficient(int... variables) {
+    for (int variable : variables) {
+      Check.variable(variable, size);
+    }
     int[] product = variables.clone();
     int width = TermOrder.canonical(product, 0, product.length);
     int low = 0;
@@ -149,8 +152,13 @@ public final class Polynomial {
   @CheckReturnValue
   public Qubo toQubo() {
     if (degree() > 2) {
+      int[] longest = Arrays.copyOfRange(factor, start[terms() - 1], start[terms()]);
       throw new IllegalArgumentException(
-          "a term has " + degree() + " variables, a Qubo holds products of at most 2");
+          "the product of "
+              + Arrays.toString(longest)
+              + " has "
+              + longest.length
+              + " variables, a Qubo holds products of at most 2; reduce the degree first");
     }
     Qubo.Builder qubo = Qubo.builder(size);
     for (int t = 0; t < coefficient.length; t++) {

@@ -8,7 +8,7 @@ import java.util.Arrays;
  *
  * <p>Pairs lie in compressed rows: those of row i are {@code column[k], value[k]} for {@code
  * rowStart[i] <= k < rowStart[i + 1]}, with i &lt; column[k] ascending: 12 bytes a pair and 4 a
- * variable.
+ * variable. Nobody writes to the arrays; forms with the same pairs may share the places.
  */
 final class Quadratic {
   final double constant;
@@ -17,12 +17,78 @@ final class Quadratic {
   final int[] column;
   final double[] value;
 
-  Quadratic(double constant, double[] linear, int[] rowStart, int[] column, double[] value) {
+  private Quadratic(
+      double constant, double[] linear, int[] rowStart, int[] column, double[] value) {
     this.constant = constant;
     this.linear = linear;
     this.rowStart = rowStart;
     this.column = column;
     this.value = value;
+  }
+
+  /**
+   * Takes over the arrays. Negative zeros, which would tell equal forms apart, are made positive.
+   *
+   * @throws IllegalArgumentException naming the first coefficient that is not finite, or if no
+   *     double holds the sum of all magnitudes, and so an energy
+   */
+  static Quadratic of(
+      double constant, double[] linear, int[] rowStart, int[] column, double[] value) {
+    for (int i = 0; i < linear.length; i++) {
+      if (!Double.isFinite(linear[i])) {
+        Check.finite("the linear coefficient of variable " + i, linear[i]);
+      }
+      linear[i] += 0.0;
+    }
+    Quadratic form =
+        new Quadratic(
+            Check.finite("the constant", constant) + 0.0, linear, rowStart, column, value);
+    if (!Double.isFinite(form.magnitude())) {
+      form.forEachPair(Quadratic::requireFinite);
+      throw new IllegalArgumentException(
+          "the magnitudes of the coefficients add up to more than a double holds; divide all"
+              + " coefficients by a common factor");
+    }
+    return form;
+  }
+
+  private static void requireFinite(int i, int j, double value) {
+    if (!Double.isFinite(value)) {
+      Check.finite("the coefficient of pair (" + i + ", " + j + ")", value);
+    }
+  }
+
+  /**
+   * A form in the same pairs, each coefficient multiplied; those that come to zero are left out.
+   */
+  Quadratic rescaled(double newConstant, double[] newLinear, double factor) {
+    double[] scaled = new double[value.length];
+    int kept = 0;
+    for (int k = 0; k < scaled.length; k++) {
+      scaled[k] = value[k] * factor;
+      kept += scaled[k] == 0 ? 0 : 1;
+    }
+    return kept == scaled.length
+        ? of(newConstant, newLinear, rowStart, column, scaled)
+        : withoutZeros(newConstant, newLinear, scaled, kept);
+  }
+
+  private Quadratic withoutZeros(
+      double newConstant, double[] newLinear, double[] scaled, int kept) {
+    int[] start = new int[rowStart.length];
+    int[] place = new int[kept];
+    double[] own = new double[kept];
+    int next = 0;
+    for (int i = 0; i < linear.length; i++) {
+      for (int k = rowStart[i]; k < rowStart[i + 1]; k++) {
+        if (scaled[k] != 0) {
+          place[next] = column[k];
+          own[next++] = scaled[k];
+        }
+      }
+      start[i + 1] = next;
+    }
+    return of(newConstant, newLinear, start, place, own);
   }
 
   int size() {
@@ -80,7 +146,7 @@ final class Quadratic {
   /** Whether every partial sum of coefficients is held by a double without rounding. */
   boolean exact() {
     double sum = magnitude();
-    return sum == 0 || sum < Math.scalb(1.0, Math.min(53 + unitExponent(), 1023));
+    return sum == 0 || sum < Math.scalb(1.0, Math.min(53 + unitExponent(), Double.MAX_EXPONENT));
   }
 
   private static int unitExponent(double number) {
@@ -92,11 +158,6 @@ final class Quadratic {
     long mantissa = bits & 0xfffffffffffffL;
     boolean normal = Math.getExponent(number) >= Double.MIN_EXPONENT;
     return exponent + Long.numberOfTrailingZeros(normal ? mantissa | 1L << 52 : mantissa);
-  }
-
-  /** Without the negative zero, which would tell equal forms apart. */
-  static double normal(double number) {
-    return number == 0 ? 0.0 : number;
   }
 
   @Override

@@ -15,7 +15,7 @@ package dev.couplet.form;
 public final class Qubo {
   private final Quadratic form;
 
-  private Qubo(Quadratic form) {
+  Qubo(Quadratic form) {
     this.form = form;
   }
 
@@ -92,29 +92,17 @@ public final class Qubo {
    * @throws IllegalArgumentException if the factor or a product is not finite
    */
   public Qubo times(double factor) {
-    Check.finite("the factor", factor);
-    Builder scaled = builder(size()).allowRounding().addConstant(constant() * factor);
-    for (int i = 0; i < size(); i++) {
-      scaled.addLinear(i, linear(i) * factor);
-    }
-    forEachPair((i, j, value) -> scaled.addPair(i, j, value * factor));
-    return scaled.build();
+    return new Qubo(Conversion.times(form, factor));
   }
 
-  /** The same energies over spins, {@code x = (1 - s) / 2}; O(n + m), exact if this form is. */
+  /**
+   * The same energies over spins, {@code x = (1 - s) / 2}; O(n + m). Spin coefficients are quarters
+   * of sums of these; exact for integer coefficients within the builder's limit.
+   *
+   * @throws IllegalArgumentException if a sum overflows
+   */
   public Ising toIsing() {
-    Ising.Builder ising = Ising.builder(size()).allowRounding().addConstant(constant());
-    for (int i = 0; i < size(); i++) {
-      double half = linear(i) / 2;
-      ising.addConstant(half).addLinear(i, -half);
-    }
-    forEachPair(
-        (i, j, value) -> {
-          double quarter = value / 4;
-          ising.addConstant(quarter).addLinear(i, -quarter).addLinear(j, -quarter);
-          ising.addPair(i, j, quarter);
-        });
-    return ising.build();
+    return new Ising(Conversion.toSpins(form));
   }
 
   /** The same form as a polynomial of degree at most 2. */
@@ -151,6 +139,16 @@ public final class Qubo {
     @Override
     Builder self() {
       return this;
+    }
+
+    /**
+     * Adds a form, every coefficient multiplied by {@code factor}.
+     *
+     * @throws IllegalArgumentException if it has more variables than this builder, or a product is
+     *     not finite
+     */
+    public Builder add(Qubo other, double factor) {
+      return add(other.form, factor);
     }
 
     /**

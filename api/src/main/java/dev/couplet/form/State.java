@@ -9,7 +9,7 @@ import java.util.Objects;
  *
  * <p>The same state read as spins has {@code s = 1 - 2x}: a 0 is +1, a 1 is -1. States are
  * immutable, compare by value, and take one bit a variable. Their natural order is that of their
- * text, variable 0 first.
+ * {@linkplain #toText() text}.
  */
 @CheckReturnValue
 public final class State implements Comparable<State> {
@@ -121,6 +121,11 @@ public final class State implements Comparable<State> {
     return new State(size, copy);
   }
 
+  /** This state with variable {@code i} flipped. */
+  public State flipped(int i) {
+    return with(i, !get(i));
+  }
+
   /** This state with every variable flipped. */
   public State flipped() {
     long[] copy = new long[words.length];
@@ -196,15 +201,21 @@ public final class State implements Comparable<State> {
     return 31 * Arrays.hashCode(words) + size;
   }
 
-  /** The values as a run of 0 and 1, variable 0 first; long states are cut short. */
+  /** The values as a run of 0 and 1, variable 0 first: what {@link #parse} reads. */
+  public String toText() {
+    return text(size);
+  }
+
+  /** As {@link #toText()}, but long states are cut short. */
   @Override
   public String toString() {
-    StringBuilder text = new StringBuilder();
-    for (int i = 0; i < Math.min(size, SHOWN); i++) {
+    return size <= SHOWN ? toText() : text(SHOWN) + "... (" + size + " variables)";
+  }
+
+  private String text(int length) {
+    StringBuilder text = new StringBuilder(length);
+    for (int i = 0; i < length; i++) {
       text.append(get(i) ? '1' : '0');
-    }
-    if (size > SHOWN) {
-      text.append("... (").append(size).append(" variables)");
     }
     return text.toString();
   }

@@ -99,14 +99,14 @@ public final class TokenReader {
   }
 
   /**
-   * The next token of the current line as a finite number.
+   * The next token of the current line as a finite decimal number, such as -1.5 or 2e-3.
    *
    * @throws FormatException if it is not one
    */
   public double number(String what) {
     String token = token(what);
     try {
-      double number = Double.parseDouble(token);
+      double number = isDecimal(token) ? Double.parseDouble(token) : Double.NaN;
       if (Double.isFinite(number)) {
         return number;
       }
@@ -114,6 +114,17 @@ public final class TokenReader {
       // Told below, in the same words.
     }
     throw fault(what + " is '" + token + "', it must be a finite number");
+  }
+
+  /** Whether there is no letter but e in it: Java's own suffixes and hexadecimals stay outside. */
+  private static boolean isDecimal(String token) {
+    for (int k = 0; k < token.length(); k++) {
+      char c = token.charAt(k);
+      if ((c < '0' || c > '9') && "+-.eE".indexOf(c) < 0) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /**

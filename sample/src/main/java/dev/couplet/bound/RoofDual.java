@@ -36,9 +36,6 @@ public final class RoofDual implements Bound {
 
   /** The bound with the bits that it fixes, as a stage of a run that has begun. */
   public Roof roof(Qubo form, Vigil vigil) {
-    if (Double.isInfinite(form.magnitude())) {
-      return Roof.unknown(form.size(), Double.NEGATIVE_INFINITY);
-    }
     ScaledForm scaled = new ScaledForm(form);
     Implications network = new Implications(scaled);
     boolean done = !vigil.over() && network.maximise(vigil);

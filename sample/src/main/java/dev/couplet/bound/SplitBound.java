@@ -45,9 +45,6 @@ public final class SplitBound implements Bound {
   @Override
   public double below(Qubo form, Run run) {
     Vigil vigil = run.begin();
-    if (Double.isInfinite(form.magnitude())) {
-      return Double.NEGATIVE_INFINITY;
-    }
     ScaledForm scaled = new ScaledForm(form);
     Shares shares = new Shares(scaled);
     long best = shares.bound();

@@ -138,10 +138,5 @@ public final class Enumeration implements Sampler {
               + "; reduce the form or split it first, or use a method that does not look at all"
               + " states");
     }
-    if (Double.isInfinite(form.magnitude())) {
-      throw new IllegalArgumentException(
-          "the coefficients add up to infinity, energies would overflow; scale the form down with"
-              + " times(factor)");
-    }
   }
 }

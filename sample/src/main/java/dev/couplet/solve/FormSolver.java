@@ -28,7 +28,7 @@ final class FormSolver {
 
   /** A state takes about a nanosecond; half the time may go into a proof. */
   private static boolean enumerable(Qubo form, Run run) {
-    if (form.size() > Enumeration.MOST_BITS || Double.isInfinite(form.magnitude())) {
+    if (form.size() > Enumeration.MOST_BITS) {
       return false;
     }
     Duration states = Duration.ofNanos(1L << form.size());

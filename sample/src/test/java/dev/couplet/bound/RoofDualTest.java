@@ -39,9 +39,9 @@ class RoofDualTest {
   }
 
   @Test
-  void overflowingFormsHaveNoBound() {
-    Qubo form = Qubo.builder(2).allowRounding().addLinear(0, 1e308).addLinear(1, 1e308).build();
-    assertEquals(Double.NEGATIVE_INFINITY, RoofDual.standard().below(form));
+  void formsNearTheLargestDoubleAreNoTrouble() {
+    Qubo form = Qubo.builder(2).allowRounding().addLinear(0, 8e307).addLinear(1, -8e307).build();
+    assertEquals(-8e307, RoofDual.standard().below(form), 1e295);
   }
 
   @Test
