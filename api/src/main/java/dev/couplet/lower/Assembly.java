@@ -82,7 +82,7 @@ final class Assembly {
 
   private void addPreferred(Rule rule) {
     PreferredRule preferred = PreferredRule.of(rule, bits);
-    double unitCost = rule.costPerUnit() * rule.unit();
+    double unitCost = rule.cost(1);
     addSource(rule.name(), Kind.COST, preferred.cost(), unitCost);
     if (preferred.tie().isEmpty()) {
       weights.add(new Weight(rule.name(), preferred.form(), unitCost, "its own cost, exactly"));
@@ -111,7 +111,7 @@ final class Assembly {
                 Math.max(
                     rule.range().highest() - rule.highest(),
                     rule.lowest() - rule.range().lowest()));
-        highest += rule.amount(most) * rule.costPerUnit();
+        highest += rule.cost(most);
       }
     }
     double lowest = Terms.lowest(minimised);
@@ -123,7 +123,7 @@ final class Assembly {
   private boolean objectiveIsWhole() {
     boolean all = Terms.whole(statement.objective());
     for (Rule rule : statement.rules()) {
-      double cost = rule.costPerUnit() * rule.unit();
+      double cost = rule.cost(1);
       all &= cost == Math.rint(cost);
     }
     return all;

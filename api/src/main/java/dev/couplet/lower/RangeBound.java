@@ -12,7 +12,7 @@ final class RangeBound implements Weights {
   public Chosen choose(Facts facts) {
     Range objective = facts.objective();
     double width = Math.max(0, objective.width());
-    double weight = above(width, facts.whole());
+    double weight = above(facts.whole() ? width : felt(width, objective), facts.whole());
     String reason =
         "above "
             + Weights.shown(width)
@@ -25,8 +25,18 @@ final class RangeBound implements Weights {
   }
 
   /**
+   * The width, or what is left of it beside a large constant: a weight that is lost in the rounding
+   * of the energies would guard nothing.
+   */
+  private static double felt(double width, Range objective) {
+    double largest = Math.max(Math.abs(objective.lowest()), Math.abs(objective.highest()));
+    return Math.max(width, Math.scalb(largest, -30));
+  }
+
+  /**
    * A number strictly above another, with few digits: the next whole number where all is whole,
-   * else at most 1/128 more, with eight binary digits.
+   * else about 1/128 more (1/512 at the least, which rounding does not eat up), with eight binary
+   * digits.
    */
   static double above(double width, boolean whole) {
     if (width == 0) {
@@ -36,6 +46,6 @@ final class RangeBound implements Weights {
       return Math.floor(width) + 1;
     }
     double step = Math.scalb(1.0, Math.getExponent(width) - 7);
-    return (Math.floor(width / step) + 1) * step;
+    return (Math.floor(width / step + 0.5) + 1) * step;
   }
 }

@@ -45,7 +45,7 @@ public final class Plan implements Comparable<Plan> {
       double violation = rule.violation(literals);
       if (violation > 0) {
         double amount = rule.amount(violation);
-        double own = amount * rule.costPerUnit();
+        double own = rule.cost(violation);
         unmet.add(new Unmet(rule.name(), rule.required(), amount, own));
         cost += own;
       }
