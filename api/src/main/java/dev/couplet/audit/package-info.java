@@ -2,10 +2,14 @@
  * Checks that a user calls from a unit test: plain Java, bound to no test framework.
  *
  * <p>{@link dev.couplet.audit.SamplerAudit} runs the contract of every {@link
- * dev.couplet.sampling.Sampler} over one of them, the library's own or a user's. What an audit
- * found wrong are its {@link dev.couplet.audit.Findings}, each a {@link dev.couplet.audit.Finding}
- * with the name of the check and a message that says what happened and how to mend it; {@code
- * orThrow()} turns them into an {@link java.lang.AssertionError}.
+ * dev.couplet.sampling.Sampler} over one of them, the library's own or a user's. {@link
+ * dev.couplet.audit.LoweringAudit} proves of one lowered model that its form says what the model
+ * says, and tells how much each weight could be lowered: its {@link
+ * dev.couplet.audit.LoweringReport}. {@link dev.couplet.audit.RandomModels} draws small models for
+ * property tests. What an audit found wrong are its {@link dev.couplet.audit.Findings}, each a
+ * {@link dev.couplet.audit.Finding} with the name of the check and a message that says what
+ * happened and how to mend it; {@code orThrow()} turns them into an {@link
+ * java.lang.AssertionError}.
  */
 @CheckReturnValue
 @NullMarked

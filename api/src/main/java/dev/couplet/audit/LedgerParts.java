@@ -1,0 +1,134 @@
+package dev.couplet.audit;
+
+import dev.couplet.form.Polynomial;
+import dev.couplet.form.Qubo;
+import dev.couplet.lower.Ledger;
+import dev.couplet.lower.Ledger.Entry;
+import dev.couplet.lower.Ledger.Kind;
+import dev.couplet.lower.Lowered;
+import dev.couplet.lower.Weight;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.Optional;
+import java.util.Set;
+
+/** The form taken apart by its ledger, coefficient by coefficient. */
+final class LedgerParts {
+  /** One source in one role: a preferred rule has a cost and a penalty. */
+  private record Part(String source, Kind kind) {}
+
+  private final Lowered lowered;
+  private final Qubo qubo;
+  private final Map<Part, Polynomial.Builder> terms = new LinkedHashMap<>();
+  private final Map<Integer, Part> partOfAuxiliary = new HashMap<>();
+  private final Set<Part> entangled = new HashSet<>();
+  private final double error;
+  private boolean addsUp = true;
+
+  /** Reads the whole ledger, and notes where it does not add up. */
+  LedgerParts(Lowered lowered, double error, Notes notes) {
+    this.lowered = lowered;
+    this.qubo = lowered.qubo();
+    this.error = error;
+    Ledger ledger = lowered.ledger();
+    check(notes, "the constant", qubo.constant(), take(ledger.constant()));
+    for (int i = 0; i < qubo.size(); i++) {
+      check(notes, "bit " + ledger.meaning(i), qubo.linear(i), take(ledger.linear(i), i));
+      for (int j = i + 1; j < qubo.size(); j++) {
+        double sum = take(ledger.pair(i, j), i, j);
+        if (Math.abs(sum - qubo.pair(i, j)) > error || sum != 0) {
+          String what = "the pair of " + ledger.meaning(i) + " and " + ledger.meaning(j);
+          check(notes, what, qubo.pair(i, j), sum);
+        }
+      }
+    }
+  }
+
+  private double take(List<Entry> entries, int... variables) {
+    double sum = 0;
+    for (Entry entry : entries) {
+      Part part = new Part(entry.source(), entry.kind());
+      sum += entry.amount();
+      terms
+          .computeIfAbsent(part, p -> Polynomial.builder(qubo.size()))
+          .add(entry.amount(), variables);
+      for (int variable : variables) {
+        claim(part, variable);
+      }
+    }
+    return sum;
+  }
+
+  private void claim(Part part, int variable) {
+    if (variable >= lowered.decisionBits()) {
+      Part other = partOfAuxiliary.putIfAbsent(variable, part);
+      if (other != null && !other.equals(part)) {
+        entangled.add(part);
+        entangled.add(other);
+      }
+    }
+  }
+
+  private void check(Notes notes, String what, double coefficient, double sum) {
+    boolean same = Math.abs(sum - coefficient) <= error;
+    addsUp &= same;
+    notes.expect(
+        "ledger",
+        same,
+        () ->
+            what
+                + ": the form has "
+                + Numbers.shown(coefficient)
+                + ", the ledger's entries add up to "
+                + Numbers.shown(sum));
+  }
+
+  /**
+   * Which part of the form a weight multiplies, if that can be told: no other part has auxiliary
+   * bits in common with it, and the ledger adds up.
+   */
+  private Optional<Part> partOf(Weight weight) {
+    Part code = new Part(weight.rule(), Kind.CODE);
+    Part penalty = new Part(weight.rule(), Kind.PENALTY);
+    boolean isCode = terms.containsKey(code);
+    Part part = isCode ? code : penalty;
+    boolean told = terms.containsKey(part) && !(isCode && terms.containsKey(penalty));
+    return told && addsUp && !entangled.contains(part) ? Optional.of(part) : Optional.empty();
+  }
+
+  /** The guards of the weights that can be analysed, by name. */
+  Map<String, Guard> guards(List<Weight> weights) {
+    Map<String, Guard> guards = new LinkedHashMap<>();
+    for (Weight weight : weights) {
+      partOf(weight)
+          .ifPresent(
+              part -> {
+                Polynomial own = Objects.requireNonNull(terms.get(part)).build();
+                guards.put(
+                    weight.rule(), new Guard(weight, Landscape.of(own, lowered.decisionBits())));
+              });
+    }
+    return guards;
+  }
+
+  /** The form without the parts that have guards. */
+  Landscape rest(List<Weight> weights) {
+    if (!addsUp) {
+      return Landscape.of(qubo.toPolynomial(), lowered.decisionBits());
+    }
+    Set<Part> guarded = new HashSet<>();
+    weights.forEach(weight -> partOf(weight).ifPresent(guarded::add));
+    Polynomial.Builder rest = Polynomial.builder(qubo.size());
+    terms.forEach(
+        (part, own) -> {
+          if (!guarded.contains(part)) {
+            rest.add(own.build(), 1);
+          }
+        });
+    return Landscape.of(rest.build(), lowered.decisionBits());
+  }
+}
