@@ -132,11 +132,6 @@ public final class Elimination implements Sampler {
   }
 
   private ConditionedSweeps prepared(Qubo form, boolean counting) {
-    if (Double.isInfinite(form.magnitude())) {
-      throw new IllegalArgumentException(
-          "the coefficients add up to infinity, energies would overflow; scale the form down with"
-              + " times(factor)");
-    }
     ConditionedSweeps sweeps = new ConditionedSweeps(form, width, conditioned);
     if (!sweeps.possible()) {
       throw new IllegalArgumentException(

@@ -42,17 +42,8 @@ public final class Reduction {
     return new Reduction(every, false);
   }
 
-  /**
-   * Reduces a form. Of the run, what ends it matters.
-   *
-   * @throws IllegalArgumentException if the form's coefficients add up to infinity
-   */
+  /** Reduces a form. Of the run, what ends it matters. */
   public Reduced reduce(Qubo form, Run run) {
-    if (Double.isInfinite(form.magnitude())) {
-      throw new IllegalArgumentException(
-          "the coefficients add up to infinity, energies would overflow; scale the form down with"
-              + " times(factor)");
-    }
     Vigil vigil = run.begin();
     Graph graph = new Graph(form);
     History history = new History(form.exact());
