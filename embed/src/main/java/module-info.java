@@ -6,6 +6,8 @@ module dev.couplet.embed {
 
   exports dev.couplet.bond;
   exports dev.couplet.embed;
+  exports dev.couplet.embed.best;
   exports dev.couplet.embed.path;
+  exports dev.couplet.embed.template;
   exports dev.couplet.host;
 }

@@ -105,13 +105,17 @@ public final class EmbedderAudit {
     expectEnd(fit, End.STOPPED, "an interrupt");
   }
 
-  /** A clock that goes on by a second whenever it is read. */
+  /** By a clock that goes on by a second whenever it is read. */
   private void checkDeadline() {
     AuditCase hard = AuditCase.hopeless();
     AtomicLong seconds = new AtomicLong();
     Watch watch = Watch.none().clock(() -> seconds.incrementAndGet() * 1_000_000_000L);
-    Effort effort = Effort.within(Duration.ofSeconds(5));
-    expectEnd(embedder.embed(hard.guest(), hard.host(), effort, watch), End.DEADLINE, "a deadline");
+    Effort gone = Effort.within(Duration.ofMillis(1));
+    Fit atOnce = embedder.embed(hard.guest(), hard.host(), gone, watch);
+    expectEnd(atOnce, End.DEADLINE, "a deadline that has passed at the first look");
+    Effort timed = Effort.within(Duration.ofSeconds(5));
+    Fit inTime = embedder.embed(hard.guest(), hard.host(), timed, watch);
+    expect(!inTime.fits(), "a planar host cannot carry complete:5, but the answer was " + inTime);
   }
 
   private void checkListener() {
