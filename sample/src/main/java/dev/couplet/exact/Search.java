@@ -27,14 +27,25 @@ final class Search {
   private final double margin;
   private final boolean exact;
   private final Tally[] found;
+
+  /** No state above this matters: other parts know enough below. As bits, lowered only. */
+  private final AtomicLong ceiling;
+
   private final AtomicInteger hitPart = new AtomicInteger(Integer.MAX_VALUE);
   private final AtomicLong chunksDone = new AtomicLong();
 
-  Search(StateSpace space, int levels, int keep, OptionalDouble target, Vigil vigil) {
+  /**
+   * A search for so many lowest levels.
+   *
+   * @param ceiling states above this energy need not be found
+   */
+  Search(
+      StateSpace space, int levels, int keep, OptionalDouble target, double ceiling, Vigil vigil) {
     this.space = space;
     this.levels = levels;
     this.keep = keep;
     this.target = target.orElse(Double.NEGATIVE_INFINITY);
+    this.ceiling = new AtomicLong(Double.doubleToRawLongBits(ceiling));
     this.vigil = vigil;
     this.exact = space.form.exact();
     this.margin = marginOf(space);
@@ -62,6 +73,22 @@ final class Search {
       }
     }
     return all;
+  }
+
+  private double ceiling() {
+    return Double.longBitsToDouble(ceiling.get());
+  }
+
+  /**
+   * Tells the other parts of a threshold. Not if there is a target: the first state that reaches it
+   * must not be left out because a later one is better.
+   */
+  private void lowerCeiling(double to) {
+    if (target == Double.NEGATIVE_INFINITY) {
+      ceiling.accumulateAndGet(
+          Double.doubleToRawLongBits(to),
+          (a, b) -> Double.longBitsToDouble(a) <= Double.longBitsToDouble(b) ? a : b);
+    }
   }
 
   private void part(int part) {
@@ -95,6 +122,7 @@ final class Search {
         survey(c * blocks);
         if (lanes > 0) {
           examine(c * blocks);
+          lowerCeiling(tally.threshold());
         }
         report();
       }
@@ -117,13 +145,26 @@ final class Search {
         }
         Lanes.lower(cursor.energies(), space.step[0], cursor.middleField(), least);
       }
-      double limit = tally.threshold() + margin;
+      double limit = limit();
       lanes = 0;
       for (int j = 0; j < least.length; j++) {
         if (least[j] <= limit) {
           lane[lanes++] = j;
         }
       }
+    }
+
+    /** The highest walked energy that can matter, after a survey. */
+    private double limit() {
+      double limit = Math.min(tally.threshold(), ceiling()) + margin;
+      if (levels > 1 || target != Double.NEGATIVE_INFINITY) {
+        return limit;
+      }
+      double lowest = Double.POSITIVE_INFINITY;
+      for (double energy : least) {
+        lowest = Math.min(lowest, energy);
+      }
+      return Math.min(limit, lowest + 2 * margin);
     }
 
     private void seek(long block) {
@@ -155,7 +196,9 @@ final class Search {
     }
 
     private void consider(double walked, int lane, int middle) {
-      if (walked > tally.threshold() + margin || hitPart.get() <= part) {
+      if (walked > tally.threshold() + margin
+          || walked > ceiling() + margin
+          || hitPart.get() <= part) {
         return;
       }
       long number = space.number(cursor.block(), lane, middle);

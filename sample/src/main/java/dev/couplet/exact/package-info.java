@@ -3,7 +3,10 @@
  *
  * <p>{@link dev.couplet.exact.Enumeration} looks at every state: all minima, the lowest {@link
  * dev.couplet.exact.Levels} with their numbers of states, and the exact {@link
- * dev.couplet.exact.Boltzmann} distribution, for forms of some thirty bits.
+ * dev.couplet.exact.Boltzmann} distribution, for forms of some thirty bits. {@link
+ * dev.couplet.exact.Elimination} takes the bits of a sparse form one by one, over tables, and
+ * counts its {@link dev.couplet.exact.Ground} states. {@link dev.couplet.exact.BranchAndBound}
+ * reduces, splits, bounds and branches.
  *
  * <p>Methods are samplers too; their draws carry a bound, and {@code draws.proved()} holds when the
  * run was not cut short.

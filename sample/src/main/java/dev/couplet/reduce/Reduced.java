@@ -19,10 +19,11 @@ public final class Reduced {
   private final History history;
   private final double constant;
   private final double slack;
+  private final double bound;
   private final List<int[]> bits;
   private final List<Qubo> parts;
 
-  Reduced(Qubo original, Graph graph, History history) {
+  Reduced(Qubo original, Graph graph, History history, double roof) {
     this.original = original;
     this.history = history;
     this.constant = graph.constant;
@@ -34,6 +35,7 @@ public final class Reduced {
       forms.add(graph.form(part, position, 0));
     }
     this.parts = List.copyOf(forms);
+    this.bound = parts.isEmpty() ? constant - slack : roof;
   }
 
   /** The form that was reduced. */
@@ -59,6 +61,14 @@ public final class Reduced {
   /** By how much rounding may have moved the minimum: 0 if the form's energies are exact. */
   public double slack() {
     return slack;
+  }
+
+  /**
+   * A number that no energy of the original is below: the minimum itself if nothing is left, else
+   * what the roof dual gave, or negative infinity without it.
+   */
+  public double bound() {
+    return bound;
   }
 
   /** How many bits each rule removed; rules that removed none are left out. */

@@ -44,28 +44,37 @@ public final class Reduction {
 
   /** Reduces a form. Of the run, what ends it matters. */
   public Reduced reduce(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    return reduce(form, run.begin());
+  }
+
+  /** Reduces a form, as a stage of a run that has begun. */
+  public Reduced reduce(Qubo form, Vigil vigil) {
     Graph graph = new Graph(form);
     History history = new History(form.exact());
     LocalRules rules = new LocalRules(graph, history, every);
     for (int i = 0; i < graph.size; i++) {
       rules.reopen(i);
     }
-    do {
+    double bound = Double.NEGATIVE_INFINITY;
+    while (true) {
       while (!vigil.over() && rules.work(LOOK_EVERY)) {
         // Rules go on until no bit waits.
       }
-    } while (roof && !vigil.over() && applyRoof(graph, history, rules, vigil));
-    return new Reduced(form, graph, history);
+      int[] left = graph.left();
+      if (!roof || left.length == 0 || vigil.over()) {
+        break;
+      }
+      Roof fixed = RoofDual.standard().roof(graph.form(left, new int[graph.size], 0), vigil);
+      bound = Math.max(bound, graph.constant + fixed.bound() - graph.slack);
+      if (!apply(fixed, left, graph, history, rules)) {
+        break;
+      }
+    }
+    return new Reduced(form, graph, history, bound);
   }
 
   /** Removes what the roof dual of the rest fixes; whether that is anything. */
-  private boolean applyRoof(Graph graph, History history, LocalRules rules, Vigil vigil) {
-    int[] left = graph.left();
-    if (left.length == 0) {
-      return false;
-    }
-    Roof fixed = RoofDual.standard().roof(graph.form(left, new int[graph.size], 0), vigil);
+  private boolean apply(Roof fixed, int[] left, Graph graph, History history, LocalRules rules) {
     State which = every ? fixed.strong() : fixed.weak();
     graph.slack += which.ones() == 0 ? 0 : fixed.slack();
     for (int p = 0; p < left.length; p++) {

@@ -1,0 +1,98 @@
+package dev.couplet.exact;
+
+import dev.couplet.form.Qubo;
+import dev.couplet.form.State;
+import dev.couplet.kernel.Adjacency;
+import dev.couplet.kernel.LocalFields;
+import dev.couplet.sampling.Vigil;
+import java.util.Arrays;
+import java.util.List;
+import java.util.SplittableRandom;
+
+/**
+ * A good state to begin with: one-flip tabu search (Glover 1989) from given and random states. The
+ * best neighbour is taken even if it is worse, unless its variable moved a short while ago.
+ */
+final class WarmStart {
+  private static final int WORK = 1 << 23;
+  private static final int BEGINNINGS = 8;
+
+  private final Qubo form;
+  private final LocalFields fields;
+  private final SplittableRandom random;
+  private final Vigil vigil;
+  private State best;
+  private double bestEnergy;
+
+  private WarmStart(Qubo form, SplittableRandom random, Vigil vigil) {
+    this.form = form;
+    this.fields = new LocalFields(Adjacency.of(form));
+    this.random = random;
+    this.vigil = vigil;
+    this.best = State.zeros(form.size());
+    this.bestEnergy = form.value(best);
+  }
+
+  /** The best state found; the starts are looked at first. */
+  static State of(Qubo form, List<State> starts, SplittableRandom random, Vigil vigil) {
+    WarmStart search = new WarmStart(form, random, vigil);
+    starts.forEach(search::offer);
+    if (form.size() > 0) {
+      starts.forEach(search::improve);
+      for (int k = starts.size(); k < BEGINNINGS; k++) {
+        search.improve(LocalFields.random(form.size(), random));
+      }
+    }
+    return search.best;
+  }
+
+  private void offer(State state) {
+    double energy = form.value(state);
+    if (energy < bestEnergy) {
+      bestEnergy = energy;
+      best = state;
+    }
+  }
+
+  private void improve(State from) {
+    int size = form.size();
+    int[] freeAt = new int[size];
+    Arrays.fill(freeAt, 0);
+    fields.set(from);
+    double energy = form.value(from);
+    double record = energy;
+    State recordState = from;
+    int steps = Math.max(2 * size, WORK / BEGINNINGS / size);
+    for (int step = 0; step < steps; step++) {
+      if (step % 256 == 0 && vigil.over()) {
+        break;
+      }
+      int next = next(freeAt, step, record - energy);
+      if (next < 0) {
+        continue;
+      }
+      energy += fields.gain(next);
+      fields.flip(next);
+      freeAt[next] = step + 1 + size / 10 + random.nextInt(10);
+      if (energy < record) {
+        record = energy;
+        recordState = fields.state();
+      }
+    }
+    offer(recordState);
+  }
+
+  /** The variable whose flip costs least, of those that may move or would set a record. */
+  private int next(int[] freeAt, int step, double recordGain) {
+    int next = -1;
+    double least = Double.POSITIVE_INFINITY;
+    for (int i = 0; i < freeAt.length; i++) {
+      double gain = fields.gain(i);
+      if (gain < least && (freeAt[i] <= step || gain < recordGain)) {
+        least = gain;
+        next = i;
+      }
+    }
+    return next;
+  }
+}
