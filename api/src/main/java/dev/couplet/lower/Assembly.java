@@ -45,13 +45,17 @@ final class Assembly {
     for (Rule rule : statement.rules()) {
       addRule(rule);
     }
-    return new Lowered(
-        statement,
-        qubo(),
-        bits,
-        new Ledger(sources, bits.meanings()),
-        List.copyOf(weights),
-        structure());
+    return new Lowered(statement, qubo(), bits, ledger(), List.copyOf(weights), structure());
+  }
+
+  /** Sources were made while bits were still being added: all are brought to the final number. */
+  private Ledger ledger() {
+    List<Source> widened =
+        sources.stream()
+            .map(
+                s -> new Source(s.name(), s.kind(), s.terms().inVariables(bits.size()), s.factor()))
+            .toList();
+    return new Ledger(widened, bits.meanings());
   }
 
   private void addCode(Choice<?> choice) {
