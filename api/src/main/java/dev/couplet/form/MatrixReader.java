@@ -113,7 +113,7 @@ final class MatrixReader {
               + ") lies above the diagonal; a symmetric matrix is written by its lower triangle");
     }
     double value = text.number("the value");
-    if (!Double.isFinite(2 * value)) {
+    if (row != column && !Double.isFinite(2 * value)) {
       throw text.fault("the value " + value + " stands for two places and overflows");
     }
     text.endOfLine();

@@ -279,10 +279,14 @@ public final class Polynomial {
         while (p < terms && TermOrder.sameProduct(start, factor, first, order[p])) {
           sum += coefficient[order[p++]];
         }
+        if (!Double.isFinite(sum)) {
+          int[] product = Arrays.copyOfRange(factor, start[first], start[first + 1]);
+          Check.finite("the sum of the coefficients of " + Arrays.toString(product), sum);
+        }
         if (sum != 0) {
           int width = start[first + 1] - start[first];
           System.arraycopy(factor, start[first], ownFactor, ownStart[kept], width);
-          own[kept++] = Check.finite("a sum of coefficients", sum);
+          own[kept++] = sum;
           ownStart[kept] = ownStart[kept - 1] + width;
         }
       }
