@@ -25,7 +25,12 @@ import picocli.CommandLine.Spec;
       "Rows of a table, separated by tabs, go to standard output; everything else goes to standard"
           + " error."
     },
-    subcommands = {SolveCommand.class, RateCommand.class, CommandLine.HelpCommand.class},
+    subcommands = {
+      SolveCommand.class,
+      RateCommand.class,
+      FitCommand.class,
+      CommandLine.HelpCommand.class
+    },
     mixinStandardHelpOptions = true,
     version = "couplet-bench 0.1.0-SNAPSHOT",
     synopsisSubcommandLabel = "VERB",
@@ -48,7 +53,17 @@ public final class Main implements Runnable {
 
   /** Runs one verb and ends the virtual machine with its exit status. */
   public static void main(String[] arguments) {
-    System.exit(commandLine().execute(arguments));
+    System.exit(execute(commandLine(), arguments));
+  }
+
+  /** Runs one verb and returns its exit status. */
+  static int execute(CommandLine line, String... arguments) {
+    try {
+      return line.execute(arguments);
+    } catch (OutOfMemoryError full) {
+      line.getErr().println("there is too little memory for this; give java more, as in -Xmx8g");
+      return BAD_INPUT;
+    }
   }
 
   /** The parser of all verbs, ready to execute. */

@@ -72,7 +72,12 @@ final class Methods {
     return known(THERMAL, name);
   }
 
-  private static <T> T known(Map<String, T> methods, String name) {
+  /**
+   * One of several by its name.
+   *
+   * @throws IllegalArgumentException if there is none, naming those there are
+   */
+  static <T> T known(Map<String, T> methods, String name) {
     T method = methods.get(name);
     if (method == null) {
       throw new IllegalArgumentException(

@@ -10,6 +10,7 @@ import java.util.function.DoubleUnaryOperator;
 final class ProgressLine implements Consumer<Progress>, AutoCloseable {
   private final PrintWriter err;
   private final boolean shown;
+  private final String noun;
   private final DoubleUnaryOperator valueOf;
 
   /**
@@ -17,11 +18,13 @@ final class ProgressLine implements Consumer<Progress>, AutoCloseable {
    *
    * @param err where it is written
    * @param shown whether somebody does; otherwise nothing is written
+   * @param noun what the values are
    * @param valueOf turns energies into the values that are shown
    */
-  ProgressLine(PrintWriter err, boolean shown, DoubleUnaryOperator valueOf) {
+  ProgressLine(PrintWriter err, boolean shown, String noun, DoubleUnaryOperator valueOf) {
     this.err = err;
     this.shown = shown;
+    this.noun = noun;
     this.valueOf = valueOf;
   }
 
@@ -39,7 +42,7 @@ final class ProgressLine implements Consumer<Progress>, AutoCloseable {
       progress
           .share()
           .ifPresent(s -> text.append(String.format(Locale.ROOT, " %3.0f %%", 100 * s)));
-      progress.best().ifPresent(e -> text.append("  value ").append(shown(e)));
+      progress.best().ifPresent(e -> text.append("  " + noun + " ").append(shown(e)));
       progress.bound().ifPresent(e -> text.append("  bound ").append(shown(e)));
       err.print(text);
       err.flush();

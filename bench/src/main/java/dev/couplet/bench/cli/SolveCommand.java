@@ -96,7 +96,7 @@ final class SolveCommand implements Callable<Integer> {
   private Attempt attempt(Methods.Method chosen, Instance instance, Effort effort) {
     PrintWriter err = spec.commandLine().getErr();
     boolean shown = ProgressLine.onTerminal();
-    try (ProgressLine line = new ProgressLine(err, shown, instance::value)) {
+    try (ProgressLine line = new ProgressLine(err, shown, "value", instance::value)) {
       return Attempt.make(instance, chosen, effort, line, System::nanoTime);
     }
   }

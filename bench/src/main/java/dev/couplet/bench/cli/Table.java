@@ -9,7 +9,8 @@ import java.util.OptionalDouble;
 
 /** Rows under one header line, cells separated by tabs. An empty cell is written as a dash. */
 final class Table {
-  private static final String NOTHING = "-";
+  /** What stands in a cell without a content. */
+  static final String NOTHING = "-";
 
   private final PrintWriter out;
   private final int columns;

@@ -1,22 +1,14 @@
 package dev.couplet.bench.instances;
 
 import dev.couplet.form.FormatException;
-import java.io.BufferedInputStream;
 import java.io.BufferedReader;
-import java.io.EOFException;
 import java.io.IOException;
-import java.io.InputStream;
-import java.io.InputStreamReader;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.FileSystemException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.Collectors;
-import java.util.zip.GZIPInputStream;
 
 /**
  * Reads published instances from files, compressed with gzip or not.
@@ -79,22 +71,31 @@ public final class InstanceReader {
    * @throws IllegalArgumentException if the content does not tell the kind
    * @throws IOException if the file cannot be read, naming the file
    */
-  public Instance read(Path file) throws IOException {
-    try (BufferedReader reader = open(file)) {
-      List<String> head = head(reader);
-      Format chosen = format.isPresent() ? format.get() : recognise(file, head);
-      return chosen.read(new Source(file.toString(), nameOf(file), reader, item));
-    } catch (FileSystemException named) {
-      throw named;
-    } catch (EOFException cutShort) {
-      throw new IOException(file + ": the compressed text is cut short", cutShort);
-    } catch (IOException unreadable) {
-      throw new IOException(file + ": cannot be read: " + unreadable.getMessage(), unreadable);
-    }
+  public Instance read(Path path) throws IOException {
+    TextFile file = new TextFile(path);
+    return file.read(
+        text -> {
+          Format chosen = format.isPresent() ? format.get() : recognise(path, head(text));
+          return chosen.read(new Source(path.toString(), file.name(), text, item));
+        });
+  }
+
+  /**
+   * The kind of a file, if its content tells it.
+   *
+   * @throws IOException if the file cannot be read, naming the file
+   */
+  public static Optional<String> kindOf(Path path) throws IOException {
+    List<Format> matching = new TextFile(path).read(text -> matching(head(text)));
+    return matching.size() == 1 ? Optional.of(matching.get(0).kind()) : Optional.empty();
+  }
+
+  private static List<Format> matching(List<String> head) {
+    return FORMATS.stream().filter(f -> f.recognises(head)).toList();
   }
 
   private static Format recognise(Path file, List<String> head) {
-    List<Format> matching = FORMATS.stream().filter(f -> f.recognises(head)).toList();
+    List<Format> matching = matching(head);
     if (matching.size() == 1) {
       return matching.get(0);
     }
@@ -105,20 +106,6 @@ public final class InstanceReader {
         file
             + ": the content does not tell what kind of file it is; say --as, one of "
             + candidates);
-  }
-
-  private static BufferedReader open(Path file) throws IOException {
-    InputStream bytes = new BufferedInputStream(Files.newInputStream(file));
-    try {
-      bytes.mark(2);
-      boolean compressed = bytes.read() == 0x1f && bytes.read() == 0x8b;
-      bytes.reset();
-      InputStream plain = compressed ? new GZIPInputStream(bytes, 1 << 16) : bytes;
-      return new BufferedReader(new InputStreamReader(plain, StandardCharsets.UTF_8));
-    } catch (IOException unreadable) {
-      bytes.close();
-      throw unreadable;
-    }
   }
 
   /** The first lines that are not blank; the reader stays at the start. */
@@ -137,14 +124,5 @@ public final class InstanceReader {
         .limit(HEAD_LINES)
         .forEach(lines::add);
     return lines;
-  }
-
-  /** The file's name without {@code .gz} and without an ending of letters. */
-  private static String nameOf(Path file) {
-    String name = String.valueOf(file.getFileName());
-    if (name.endsWith(".gz")) {
-      name = name.substring(0, name.length() - 3);
-    }
-    return name.replaceFirst("(?<=.)\\.[A-Za-z]+$", "");
   }
 }

@@ -22,7 +22,7 @@ record CommandRun(int status, List<String> out, List<String> err) {
     CommandLine line = Main.commandLine();
     line.setOut(new PrintWriter(out, true));
     line.setErr(new PrintWriter(err, true));
-    int status = line.execute(arguments);
+    int status = Main.execute(line, arguments);
     return new CommandRun(status, out.toString().lines().toList(), err.toString().lines().toList());
   }
 

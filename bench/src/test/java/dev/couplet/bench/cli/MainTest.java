@@ -10,6 +10,7 @@ import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -17,6 +18,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import picocli.CommandLine;
+import picocli.CommandLine.Command;
 
 class MainTest {
   @TempDir Path folder;
@@ -55,6 +57,10 @@ class MainTest {
         "rate --lattice cube:3        | the lattice is 'cube:3'; say torus: and its sides, as in torus:16x16x16",
         "rate --couplings 0           | the largest coupling is 0, it must be 1 to 1000000",
         "rate --draws 0               | the number of draws is 0, it must be 1 or more",
+        "fit --host king:2x2          | Missing required option: '--guest=GUEST'; see couplet-bench fit --help",
+        "fit --guest complete:2 --host king:2 | 'king:2' is not written like king:RxC",
+        "fit --guest complete:2 --host king:2x2 --faults 2 | the share of missing vertices is 2.0, it must be from 0 to 1",
+        "fit --guest complete:2 --host king:2x2 --seconds -1 | --seconds is -1.0, it must be above 0 and at most a thousand million",
         "rate --sweeps 0              | the number of sweeps is 0, it must be 1 or more",
       })
   void badUseIsToldInOneLine(String arguments, String line) {
@@ -97,23 +103,39 @@ class MainTest {
     CommandRun run = CommandRun.of("--help");
     assertEquals(0, run.status());
     String text = String.join("\n", run.out());
-    for (String word : List.of("solve", "rate", "Exit status", "not reached")) {
+    for (String word : List.of("solve", "rate", "fit", "Exit status", "not reached")) {
       assertTrue(text.contains(word), text);
     }
     assertEquals(List.of(), run.err());
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"solve", "rate"})
+  @ValueSource(strings = {"solve", "rate", "fit"})
   void helpOfAVerbNamesItsColumnsAndFitsATerminal(String verb) {
     CommandRun run = CommandRun.of(verb, "--help");
     assertEquals(0, run.status());
     String text = String.join("\n", run.out());
-    List<String> columns = verb.equals("solve") ? Attempt.COLUMNS : RateCommand.COLUMNS;
-    for (String column : columns) {
+    Map<String, List<String>> columns =
+        Map.of("solve", Attempt.COLUMNS, "rate", RateCommand.COLUMNS, "fit", FitCommand.COLUMNS);
+    for (String column : columns.get(verb)) {
       assertTrue(text.contains(column), column + " in " + text);
     }
     assertTrue(run.out().stream().allMatch(line -> line.length() <= 100), text);
+  }
+
+  @Test
+  void tooLittleMemoryIsToldInOneLine() {
+    @Command
+    class Greedy implements Runnable {
+      @Override
+      public void run() {
+        throw new OutOfMemoryError("Java heap space");
+      }
+    }
+    StringWriter err = new StringWriter();
+    CommandLine line = new CommandLine(new Greedy()).setErr(new PrintWriter(err, true));
+    assertEquals(2, Main.execute(line));
+    assertEquals(1, err.toString().lines().count(), err.toString());
   }
 
   @Test
