@@ -34,13 +34,18 @@ public final class Ledger {
   public record Entry(String source, Kind kind, double amount) {}
 
   /** A source's polynomial of degree at most 2, and what it is multiplied by. */
-  record Source(String name, Kind kind, Polynomial terms, double factor) {}
+  record Source(String name, Kind kind, Polynomial terms, double factor) {
+    /** The same in a form that has more bits by now. */
+    Source inVariables(int size) {
+      return new Source(name, kind, terms.inVariables(size), factor);
+    }
+  }
 
   private final List<Source> sources;
   private final List<String> meanings;
 
   Ledger(List<Source> sources, List<String> meanings) {
-    this.sources = List.copyOf(sources);
+    this.sources = sources.stream().map(one -> one.inVariables(meanings.size())).toList();
     this.meanings = meanings;
   }
 
