@@ -1,12 +1,20 @@
 package dev.couplet.form;
 
+import java.util.Arrays;
+
 /**
- * Orders index pairs by row, then column, in time linear in their number and the largest index.
+ * Orders index pairs by row, then column, in time linear in their number and the largest index, or
+ * by comparison where the pairs are few: a small form over many variables must not cost a pass over
+ * all of them.
  *
- * <p>Two stable counting sorts, least significant key first, so that equal pairs keep their order
- * of arrival: sums over duplicates then do not depend on anything but that order.
+ * <p>Two stable counting sorts, least significant key first, or a stable merge sort, so that equal
+ * pairs keep their order of arrival: sums over duplicates then do not depend on anything but that
+ * order.
  */
 final class PairOrder {
+  /** Fewer pairs than this part of the variables are compared. */
+  private static final int FEW = 8;
+
   private PairOrder() {}
 
   /** Positions {@code 0 .. count - 1} in the order of {@code (rows[p], columns[p])}. */
@@ -18,7 +26,21 @@ final class PairOrder {
     if (isSorted(rows, columns, count)) {
       return identity;
     }
-    return byKey(byKey(identity, columns, size), rows, size);
+    return count < size / FEW
+        ? compared(rows, columns, count)
+        : byKey(byKey(identity, columns, size), rows, size);
+  }
+
+  private static int[] compared(int[] rows, int[] columns, int count) {
+    Integer[] order = new Integer[count];
+    Arrays.setAll(order, p -> p);
+    Arrays.sort(
+        order,
+        (p, q) ->
+            rows[p] != rows[q]
+                ? Integer.compare(rows[p], rows[q])
+                : Integer.compare(columns[p], columns[q]));
+    return Arrays.stream(order).mapToInt(Integer::intValue).toArray();
   }
 
   /** Brings entries into the order of their pairs, in place. */
