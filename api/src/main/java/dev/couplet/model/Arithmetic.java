@@ -18,6 +18,11 @@ interface Arithmetic<N> {
         public Double times(Double left, Double right) {
           return left * right;
         }
+
+        @Override
+        public Double plus(Double left, Double right) {
+          return left + right;
+        }
       };
 
   Arithmetic<BigDecimal> DECIMALS =
@@ -31,9 +36,16 @@ interface Arithmetic<N> {
         public BigDecimal times(BigDecimal left, BigDecimal right) {
           return left.multiply(right);
         }
+
+        @Override
+        public BigDecimal plus(BigDecimal left, BigDecimal right) {
+          return left.add(right);
+        }
       };
 
   N of(double value);
 
   N times(N left, N right);
+
+  N plus(N left, N right);
 }

@@ -3,10 +3,11 @@ package dev.couplet.model;
 import dev.couplet.form.CheckReturnValue;
 import java.util.Collection;
 import java.util.Collections;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
-import java.util.LinkedHashSet;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Consumer;
 import java.util.function.Function;
 
 /**
@@ -25,19 +26,29 @@ public final class Family<K, D extends Decision> {
     this.members = members;
   }
 
+  /** Makes no decision before all keys and names are known to be good. */
   static <K, D extends Decision> Family<K, D> of(
-      String name, Collection<K> keys, Function<K, D> maker) {
+      String name, Collection<K> keys, Consumer<String> check, Function<String, D> maker) {
     Check.name("a family", name);
-    Set<K> distinct = new LinkedHashSet<>();
+    Map<K, String> names = new LinkedHashMap<>();
+    Map<String, K> keyOf = new HashMap<>();
     for (K key : keys) {
-      if (!distinct.add(key)) {
+      String member = name + " " + key;
+      check.accept(member);
+      if (names.put(key, member) != null) {
         throw new IllegalArgumentException("family '" + name + "' has the key " + key + " twice");
+      }
+      if (keyOf.put(member, key) != null) {
+        throw new IllegalArgumentException(
+            "family '"
+                + name
+                + "' has two keys that are written "
+                + key
+                + "; give them a toString that tells them apart");
       }
     }
     Map<K, D> members = new LinkedHashMap<>();
-    for (K key : distinct) {
-      members.put(key, maker.apply(key));
-    }
+    names.forEach((key, member) -> members.put(key, maker.apply(member)));
     return new Family<>(name, Collections.unmodifiableMap(members));
   }
 

@@ -54,7 +54,8 @@ public final class Model {
 
   /** Adds a yes/no decision for each key, named by the family's name and the key. */
   public <K> Family<K, Bit> bits(String familyName, Collection<K> keys) {
-    return Family.of(familyName, keys, key -> bit(familyName + " " + key));
+    return Family.of(
+        familyName, keys, name -> requireFree(decisionNames, "decision", name), this::bit);
   }
 
   /**
@@ -82,7 +83,11 @@ public final class Model {
    */
   public <K, T> Family<K, Choice<T>> choices(
       String familyName, Collection<K> keys, Collection<T> options) {
-    return Family.of(familyName, keys, key -> choice(familyName + " " + key, options));
+    return Family.of(
+        familyName,
+        keys,
+        name -> requireFree(decisionNames, "decision", name),
+        name -> choice(name, options));
   }
 
   /**
@@ -137,7 +142,7 @@ public final class Model {
     Check.name("a rule", ruleName);
     requireOwner(condition.expr(), this);
     ScaledCondition scaled = ScaledCondition.of(ruleName, condition, decisionOfLiteral.size());
-    Range range = Ranges.of(scaled.terms(), decisionOfLiteral.toArray(new Decision[0]));
+    Range range = Ranges.of(scaled.terms(), decisionOfLiteral::get);
     return new Rule(ruleName, cost, scaled, range);
   }
 
@@ -189,6 +194,10 @@ public final class Model {
     }
     Expansion<Double> expansion = Expansion.of(expr, Arithmetic.DOUBLES);
     Polynomial.Builder terms = Polynomial.builder(decisionOfLiteral.size());
+    double magnitude = expansion.coefficients.stream().mapToDouble(Math::abs).sum();
+    Check.finite(
+        "the sum of the coefficients of objective '" + objectiveName + "', multiplied out,",
+        magnitude);
     for (int t = 0; t < expansion.products.size(); t++) {
       terms.add(expansion.coefficients.get(t), expansion.products.get(t));
     }
@@ -235,8 +244,13 @@ public final class Model {
   }
 
   private static void claim(Set<String> taken, String what, String name) {
+    requireFree(taken, what, name);
+    taken.add(name);
+  }
+
+  private static void requireFree(Set<String> taken, String what, String name) {
     Check.name("a " + what, name);
-    if (!taken.add(name)) {
+    if (taken.contains(name)) {
       throw new IllegalArgumentException(
           "the model has a " + what + " named '" + name + "' already; choose another name");
     }

@@ -1,5 +1,8 @@
 package dev.couplet.model;
 
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
@@ -76,6 +79,25 @@ abstract sealed class Node extends Expr {
       super(commonOwner(left.owner(), right.owner()));
       this.left = left;
       this.right = right;
+    }
+
+    /** The factors, left to right, with those of products among them and numbers told apart. */
+    List<Expr> factors() {
+      List<Expr> factors = new ArrayList<>();
+      Deque<Expr> pending = new ArrayDeque<>(List.of(left, right));
+      while (!pending.isEmpty()) {
+        Expr next = pending.pop();
+        if (next instanceof Product product) {
+          pending.push(product.right);
+          pending.push(product.left);
+        } else if (next instanceof Scaled scaled) {
+          factors.add(new Constant(scaled.factor));
+          pending.push(scaled.part);
+        } else {
+          factors.add(next);
+        }
+      }
+      return factors;
     }
 
     @Override

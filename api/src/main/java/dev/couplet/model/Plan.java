@@ -122,22 +122,14 @@ public final class Plan implements Comparable<Plan> {
   }
 
   /**
-   * The number that an expression is under this plan.
+   * The number that an expression is under this plan; linear in the expression.
    *
-   * @throws IllegalArgumentException if it speaks of another model
+   * @throws IllegalArgumentException if it speaks of another model, or of a decision that was made
+   *     after the plan's statement
    */
   public double number(Expr expr) {
     Model.requireOwner(expr, statement.owner());
-    Expansion<Double> expansion = Expansion.of(expr, Arithmetic.DOUBLES);
-    double sum = 0;
-    for (int t = 0; t < expansion.products.size(); t++) {
-      boolean all = true;
-      for (int literal : expansion.products.get(t)) {
-        all &= literals.get(literal);
-      }
-      sum += all ? expansion.coefficients.get(t) : 0;
-    }
-    return sum;
+    return Evaluation.of(expr, this::holds);
   }
 
   /** Which literals of the statement hold. */

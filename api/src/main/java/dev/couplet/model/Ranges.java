@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.IntFunction;
 
 /**
  * Bounds what a polynomial over literals can be worth when every choice is exactly one of its
@@ -23,7 +24,7 @@ final class Ranges {
     long combinations;
   }
 
-  private final Decision[] decisionOf;
+  private final IntFunction<Decision> decisionOf;
   private final Map<List<Integer>, Group> groups = new LinkedHashMap<>();
   private double lowest;
   private double highest;
@@ -31,12 +32,12 @@ final class Ranges {
   private boolean whole = true;
   private long terms;
 
-  private Ranges(Decision[] decisionOf) {
+  private Ranges(IntFunction<Decision> decisionOf) {
     this.decisionOf = decisionOf;
   }
 
   /** The range of a polynomial over literals; {@code decisionOf} maps each to its decision. */
-  static Range of(Polynomial polynomial, Decision[] decisionOf) {
+  static Range of(Polynomial polynomial, IntFunction<Decision> decisionOf) {
     Ranges ranges = new Ranges(decisionOf);
     polynomial.forEachTerm(ranges::take);
     ranges.groups.values().forEach(ranges::close);
@@ -49,7 +50,7 @@ final class Ranges {
     terms++;
     boolean ofBits = true;
     for (int literal : literals) {
-      ofBits &= decisionOf[literal] instanceof Bit;
+      ofBits &= decisionOf.apply(literal) instanceof Bit;
     }
     if (literals.length == 0) {
       lowest += coefficient;
@@ -65,7 +66,7 @@ final class Ranges {
   /** Two different options of one choice never hold together. */
   private boolean possible(int[] literals) {
     for (int k = 1; k < literals.length; k++) {
-      if (decisionOf[literals[k]] == decisionOf[literals[k - 1]]) {
+      if (decisionOf.apply(literals[k]) == decisionOf.apply(literals[k - 1])) {
         return false;
       }
     }
@@ -76,7 +77,7 @@ final class Ranges {
     List<Integer> key = new ArrayList<>(literals.length);
     long combinations = 1;
     for (int literal : literals) {
-      if (decisionOf[literal] instanceof Choice<?> choice) {
+      if (decisionOf.apply(literal) instanceof Choice<?> choice) {
         key.add(choice.firstLiteral());
         combinations = Math.min(Long.MAX_VALUE / choice.values(), combinations) * choice.values();
       } else {

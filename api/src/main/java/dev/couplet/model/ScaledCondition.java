@@ -3,6 +3,7 @@ package dev.couplet.model;
 import dev.couplet.form.Polynomial;
 import java.math.BigDecimal;
 import java.math.BigInteger;
+import java.math.MathContext;
 import java.util.Locale;
 
 /**
@@ -21,20 +22,22 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
     Expansion<BigDecimal> expansion = Expansion.of(condition.expr(), Arithmetic.DECIMALS);
     int places = places(expansion, condition);
     BigDecimal constant = BigDecimal.ZERO;
+    BigDecimal magnitude = BigDecimal.ZERO;
     Polynomial.Builder terms = Polynomial.builder(literals);
     for (int t = 0; t < expansion.products.size(); t++) {
       BigDecimal scaled = scaled(rule, expansion.coefficients.get(t), places);
       if (expansion.products.get(t).length == 0) {
         constant = constant.add(scaled);
       } else {
+        magnitude = magnitude.add(scaled.abs());
         terms.add(scaled.doubleValue(), expansion.products.get(t));
       }
     }
     double lowest = limit(rule, condition.lowest(), constant, places);
     double highest = limit(rule, condition.highest(), constant, places);
-    Polynomial built = terms.build();
-    requireExact(rule, built);
-    return new ScaledCondition(built, lowest, highest, BigDecimal.ONE.scaleByPowerOfTen(-places))
+    requireExact(rule, magnitude);
+    return new ScaledCondition(
+            terms.build(), lowest, highest, BigDecimal.ONE.scaleByPowerOfTen(-places))
         .reduced();
   }
 
@@ -75,22 +78,25 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
                   + " choose a larger unit",
               rule,
               Text.number(original),
-              scaled.toPlainString()));
+              shown(scaled)));
     }
     return scaled.doubleValue();
   }
 
-  private static void requireExact(String rule, Polynomial terms) {
-    double[] sum = {0};
-    terms.forEachTerm((coefficient, literals) -> sum[0] += Math.abs(coefficient));
-    if (sum[0] >= 0x1p51) {
+  /** Below 2^51 every sum of the coefficients is exact, also while equal products add up. */
+  private static void requireExact(String rule, BigDecimal magnitude) {
+    if (magnitude.compareTo(LIMIT) >= 0) {
       throw new IllegalArgumentException(
           "the whole coefficients of rule '"
               + rule
               + "' add up to "
-              + Text.number(sum[0])
+              + shown(magnitude)
               + ", beyond 2^51; round its numbers to fewer decimals or choose a larger unit");
     }
+  }
+
+  private static String shown(BigDecimal number) {
+    return number.round(new MathContext(20)).toString();
   }
 
   /** Without the largest factor common to all coefficients and limits. */

@@ -113,7 +113,7 @@ public final class Statement {
    * polynomials with whole coefficients, else a range that holds; linear in its terms.
    */
   public Range range(Polynomial polynomial) {
-    return Ranges.of(polynomial, decisionOf);
+    return Ranges.of(polynomial, this::decisionOf);
   }
 
   /** Begins a plan by hand. */

@@ -12,6 +12,7 @@ import java.util.List;
 final class Text {
   private static final int SHOWN_ITEMS = 8;
   private static final int SHOWN_PIECES = 24;
+  private static final int SHOWN_CHARACTERS = 1000;
 
   private Text() {}
 
@@ -65,6 +66,9 @@ final class Text {
     Deque<Object> pending = new ArrayDeque<>(List.of(expr));
     for (int pieces = 0; !pending.isEmpty(); ) {
       Object next = pending.pop();
+      if (text.length() > SHOWN_CHARACTERS) {
+        return text.append("...").toString();
+      }
       if (next instanceof String symbol) {
         text.append(symbol);
       } else if (next instanceof Node.Sum sum) {
