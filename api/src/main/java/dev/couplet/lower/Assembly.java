@@ -16,6 +16,12 @@ import java.util.List;
 
 /** One lowering under way: collects sources in the order of the statement, weighs and adds them. */
 final class Assembly {
+  /** Whole numbers that add up to less are exact, quarters of them too. */
+  private static final double WHOLE_LIMIT = 0x1p51;
+
+  /** A sum of so many times a number holds the number to about one part in a thousand. */
+  private static final double DIGITS_LEFT = 0x1p43;
+
   private final Statement statement;
   private final Lowering settings;
   private final BitTable bits;
@@ -59,13 +65,18 @@ final class Assembly {
   }
 
   private void addCode(Choice<?> choice) {
-    String name = "one option of '" + choice.name() + "'";
+    String name = codeName(choice);
     Polynomial.Builder difference = Polynomial.builder(statement.literals()).add(-1);
     int first = statement.firstLiteral(choice);
     for (int k = 0; k < choice.values(); k++) {
       difference.add(1, first + k);
     }
     addPenalty(name, Kind.CODE, new Penalty(SquareForm.squared(difference), "square"));
+  }
+
+  /** The words for the code of a choice, the same as for a plan that leaves it undecided. */
+  static String codeName(Decision choice) {
+    return "one option of '" + choice.name() + "'";
   }
 
   private void addRule(Rule rule) {
@@ -119,7 +130,8 @@ final class Assembly {
       }
     }
     double lowest = Terms.lowest(minimised);
-    double error = Terms.whole(minimised) ? 0 : Math.ulp(Terms.magnitude(minimised)) * 4;
+    double magnitude = Math.max(Terms.magnitude(minimised), Math.abs(highest));
+    double error = objectiveIsWhole() ? 0 : Math.ulp(magnitude) * 4;
     error *= statement.objective().terms() + statement.rules().size() + 1;
     return new Range(lowest - error, highest + error);
   }
@@ -153,27 +165,51 @@ final class Assembly {
     return form.build();
   }
 
+  /** The largest form whose energies are exact, or for real objectives hold most of its digits. */
+  private double largest() {
+    double felt = RangeBound.felt(objective);
+    return whole || felt == 0 ? WHOLE_LIMIT : felt * DIGITS_LEFT;
+  }
+
   private void refuseTooLarge() {
     double total = 0;
     double heaviest = 0;
     String name = "";
     for (Source source : sources) {
-      double magnitude = Terms.magnitude(source.terms()) * source.factor();
+      double terms = Terms.magnitude(source.terms());
+      refuseInexact(source, terms);
+      double magnitude = terms * source.factor();
       total += magnitude;
       if (magnitude > heaviest) {
         heaviest = magnitude;
         name = source.name();
       }
     }
-    if (total >= 0x1p51 && whole) {
+    if (total >= largest()) {
       throw new IllegalArgumentException(
           "the coefficients of the form would add up to "
               + Weights.shown(total)
-              + ", energies are exact below 2^51; the heaviest part is '"
+              + (whole
+                  ? ", energies are exact below 2^51"
+                  : ", so that rounding would eat up an objective that can win no more than "
+                      + Weights.shown(objective.width()))
+              + "; the heaviest part is '"
               + name
               + "' with "
               + Weights.shown(heaviest)
               + ": choose larger units there, or a smaller weight");
+    }
+  }
+
+  /** Penalties are whole before they are weighed; rounded ones would not vanish where they must. */
+  private static void refuseInexact(Source source, double magnitude) {
+    if (source.kind() != Kind.OBJECTIVE && magnitude >= WHOLE_LIMIT) {
+      throw new IllegalArgumentException(
+          "the whole coefficients of the penalty of '"
+              + source.name()
+              + "' add up to "
+              + Weights.shown(magnitude)
+              + ", they are exact below 2^51; choose larger units there");
     }
   }
 

@@ -15,7 +15,11 @@ import java.util.Optional;
  * negative.
  */
 final class ConflictForm {
-  private record Weighted(int variable, boolean negated, double weight) {}
+  private record Weighted(int variable, boolean negated, double weight) {
+    int sign() {
+      return negated ? -1 : 1;
+    }
+  }
 
   private ConflictForm() {}
 
@@ -59,10 +63,10 @@ final class ConflictForm {
       return Optional.empty();
     }
     Polynomial.Builder sum = Polynomial.builder(size);
-    never.forEach(literal -> addProduct(sum, List.of(literal)));
+    never.forEach(literal -> add(sum, literal));
     for (int a = 0; a < atMostOne.size(); a++) {
       for (int b = a + 1; b < atMostOne.size(); b++) {
-        addProduct(sum, List.of(atMostOne.get(a), atMostOne.get(b)));
+        add(sum, atMostOne.get(a), atMostOne.get(b));
       }
     }
     return Optional.of(new Penalty(sum.build(), words(never.size(), atMostOne.size())));
@@ -77,16 +81,20 @@ final class ConflictForm {
         : "pairs, none of " + never + " and at most one of " + atMostOne;
   }
 
-  /** Adds a product of literals, multiplied out. */
-  private static void addProduct(Polynomial.Builder sum, List<Weighted> literals) {
-    Polynomial product = Polynomial.builder(0).add(1).build();
-    for (Weighted literal : literals) {
-      int size = literal.variable() + 1;
-      Polynomial.Builder factor = Polynomial.builder(Math.max(size, product.size()));
-      factor.add(literal.negated() ? 1 : 0).add(literal.negated() ? -1 : 1, literal.variable());
-      Polynomial built = factor.build();
-      product = built.times(product.inVariables(built.size()));
+  /** Adds a literal. */
+  private static void add(Polynomial.Builder sum, Weighted literal) {
+    sum.add(literal.negated() ? 1 : 0).add(literal.sign(), literal.variable());
+  }
+
+  /** Adds the product of two literals, multiplied out. */
+  private static void add(Polynomial.Builder sum, Weighted a, Weighted b) {
+    sum.add(a.sign() * b.sign(), a.variable(), b.variable());
+    if (a.negated()) {
+      sum.add(b.sign(), b.variable());
     }
-    sum.add(product, 1);
+    if (b.negated()) {
+      sum.add(a.sign(), a.variable());
+    }
+    sum.add(a.negated() && b.negated() ? 1 : 0);
   }
 }

@@ -124,12 +124,12 @@ public final class Lowered {
 
   /** An energy of the form as a value in the model's own sense. */
   public double valueOf(double energy) {
-    return statement.sense().sign() * energy;
+    return statement.sense().sign() * energy + 0.0;
   }
 
   /** A value in the model's own sense as an energy of the form. */
   public double energyOf(double value) {
-    return statement.sense().sign() * value;
+    return statement.sense().sign() * value + 0.0;
   }
 
   @Override

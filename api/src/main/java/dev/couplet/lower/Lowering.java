@@ -1,11 +1,15 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.CheckReturnValue;
+import dev.couplet.model.Choice;
 import dev.couplet.model.Model;
+import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;
 import java.util.Collections;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * How a model is lowered to a quadratic form: the settings. Immutable and thread-safe;
@@ -30,7 +34,7 @@ import java.util.Map;
  *     <td>as above</td><td>as above</td></tr>
  *   <tr><td>negative product of d &gt; 2</td><td>1</td><td>d</td><td>d - 1</td></tr>
  *   <tr><td>positive product of d &gt; 2</td><td>floor((d-1)/2)</td><td>d(d-1)/2 + d bits</td>
- *     <td>2d - 1</td></tr>
+ *     <td>at most 2d - 5</td></tr>
  * </table>
  *
  * <p>Rules that every plan keeps take nothing. Source of the pair forms and squares: Glover,
@@ -59,7 +63,8 @@ public final class Lowering {
   }
 
   /**
-   * These settings with the weight of one rule set by hand. Whether it is enough is not checked
+   * These settings with the weight of one required rule, or of the code of one choice by the words
+   * that {@link Lowered#weights()} has for it, set by hand. Whether it is enough is not checked
    * here; an audit tells.
    *
    * @throws IllegalArgumentException unless it is positive and finite
@@ -77,9 +82,9 @@ public final class Lowering {
   /**
    * Lowers the model as it stands now. Linear in the terms of the penalties, multiplied out.
    *
-   * @throws IllegalArgumentException if a weight was set for a rule that the model does not have,
-   *     or the form's whole coefficients would be too large for exact energies, naming the heaviest
-   *     rule
+   * @throws IllegalArgumentException if a weight was set for a rule that the model does not have or
+   *     only prefers, or the form's whole coefficients would be too large for exact energies,
+   *     naming the heaviest rule
    */
   public Lowered lower(Model model) {
     return lower(model.snapshot());
@@ -87,8 +92,28 @@ public final class Lowering {
 
   /** Lowers a statement; as for a model. */
   public Lowered lower(Statement statement) {
+    if (!byName.isEmpty()) {
+      requireKnown(statement);
+    }
+    return new Assembly(statement, this).lowered();
+  }
+
+  private void requireKnown(Statement statement) {
+    Set<String> known = new HashSet<>();
+    statement.decisions().stream()
+        .filter(Choice.class::isInstance)
+        .forEach(choice -> known.add(Assembly.codeName(choice)));
+    statement.rules().stream().map(Rule::name).forEach(known::add);
+    for (Rule rule : statement.rules()) {
+      if (!rule.required() && byName.containsKey(rule.name())) {
+        throw new IllegalArgumentException(
+            "a weight is set for rule '"
+                + rule.name()
+                + "', which is preferred: its cost a unit is its weight; change that");
+      }
+    }
     for (String rule : byName.keySet()) {
-      if (statement.rules().stream().noneMatch(known -> known.name().equals(rule))) {
+      if (!known.contains(rule)) {
         throw new IllegalArgumentException(
             "a weight is set for rule '"
                 + rule
@@ -97,7 +122,6 @@ public final class Lowering {
                 + "' has no rule of that name");
       }
     }
-    return new Assembly(statement, this).lowered();
   }
 
   Weights.Chosen choose(Weights.Facts facts) {

@@ -12,7 +12,7 @@ final class RangeBound implements Weights {
   public Chosen choose(Facts facts) {
     Range objective = facts.objective();
     double width = Math.max(0, objective.width());
-    double weight = above(facts.whole() ? width : felt(width, objective), facts.whole());
+    double weight = above(facts.whole() ? width : felt(objective), facts.whole());
     String reason =
         "above "
             + Weights.shown(width)
@@ -28,9 +28,9 @@ final class RangeBound implements Weights {
    * The width, or what is left of it beside a large constant: a weight that is lost in the rounding
    * of the energies would guard nothing.
    */
-  private static double felt(double width, Range objective) {
+  static double felt(Range objective) {
     double largest = Math.max(Math.abs(objective.lowest()), Math.abs(objective.highest()));
-    return Math.max(width, Math.scalb(largest, -30));
+    return Math.max(objective.width(), Math.scalb(largest, -30));
   }
 
   /**

@@ -1,9 +1,8 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
-import java.util.ArrayList;
-import java.util.BitSet;
-import java.util.List;
+import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 
 /** Small questions about polynomials that several steps of the lowering ask. */
 final class Terms {
@@ -11,12 +10,17 @@ final class Terms {
 
   /** The value on the given bits, of which there may be more than the polynomial has variables. */
   static double value(Polynomial polynomial, boolean[] bits) {
+    return value(polynomial, variable -> bits[variable]);
+  }
+
+  /** The value where the variables are 1 that the predicate says. */
+  static double value(Polynomial polynomial, IntPredicate one) {
     double[] sum = {0};
     polynomial.forEachTerm(
         (coefficient, variables) -> {
           boolean all = true;
           for (int variable : variables) {
-            all &= bits[variable];
+            all &= one.test(variable);
           }
           sum[0] += all ? coefficient : 0;
         });
@@ -51,16 +55,14 @@ final class Terms {
   }
 
   /** The variables that occur, ascending. */
-  static List<Integer> variables(Polynomial polynomial) {
-    BitSet seen = new BitSet();
+  static int[] variables(Polynomial polynomial) {
+    IntStream.Builder all = IntStream.builder();
     polynomial.forEachTerm(
         (coefficient, variables) -> {
           for (int variable : variables) {
-            seen.set(variable);
+            all.add(variable);
           }
         });
-    List<Integer> ascending = new ArrayList<>();
-    seen.stream().forEach(ascending::add);
-    return ascending;
+    return all.build().sorted().distinct().toArray();
   }
 }

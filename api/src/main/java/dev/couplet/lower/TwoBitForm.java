@@ -1,8 +1,8 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
-import java.util.List;
 import java.util.Optional;
+import java.util.function.IntPredicate;
 
 /**
  * The violation of a rule on one or two bits, exactly: any function of two bits is a quadratic
@@ -15,28 +15,24 @@ final class TwoBitForm {
   private TwoBitForm() {}
 
   static Optional<Penalty> of(Limits limits, int size) {
-    List<Integer> variables = Terms.variables(limits.terms());
-    if (variables.isEmpty() || variables.size() > 2) {
+    int[] variables = Terms.variables(limits.terms());
+    if (variables.length == 0 || variables.length > 2) {
       return Optional.empty();
     }
-    int x = variables.get(0);
-    int y = variables.get(variables.size() - 1);
-    double none = violation(limits);
-    double onlyX = violation(limits, x);
+    int x = variables[0];
+    int y = variables[variables.length - 1];
+    double none = violation(limits, v -> false);
+    double onlyX = violation(limits, v -> v == x);
     Polynomial.Builder terms = Polynomial.builder(size).add(none).add(onlyX - none, x);
     if (x != y) {
-      double onlyY = violation(limits, y);
-      double both = violation(limits, x, y);
+      double onlyY = violation(limits, v -> v == y);
+      double both = violation(limits, v -> true);
       terms.add(onlyY - none, y).add(both - onlyX - onlyY + none, x, y);
     }
-    return Optional.of(new Penalty(terms.build(), "exact on " + variables.size() + " bits"));
+    return Optional.of(new Penalty(terms.build(), "exact on " + variables.length + " bits"));
   }
 
-  private static double violation(Limits limits, int... ones) {
-    boolean[] bits = new boolean[limits.terms().size()];
-    for (int one : ones) {
-      bits[one] = true;
-    }
-    return limits.violation(Terms.value(limits.terms(), bits));
+  private static double violation(Limits limits, IntPredicate one) {
+    return limits.violation(Terms.value(limits.terms(), one));
   }
 }
