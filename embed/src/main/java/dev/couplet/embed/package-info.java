@@ -8,7 +8,8 @@
  * with a {@link dev.couplet.embed.Fit}: it fits, it is impossible for a reason, or none was found.
  * {@link dev.couplet.embed.Guests} makes guests of known shape, {@link
  * dev.couplet.embed.Obstructions} the cheap proofs that nothing can fit, and {@link
- * dev.couplet.embed.EmbedderAudit} checks an embedder from a unit test.
+ * dev.couplet.embed.EmbedderAudit} checks an embedder from a unit test. A {@link
+ * dev.couplet.embed.Picture} shows a host and what is on it.
  *
  * <p>Methods live in packages below this one. Promises of every embedder: whatever it returns is
  * valid; the same seed gives the same fit as long as the effort is counted; it ends when told;
