@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 
 class FitCommandTest {
   @TempDir Path folder;
@@ -39,6 +41,26 @@ class FitCommandTest {
     assertEquals("2", run.row().get("longest"));
     assertEquals("1.333", run.row().get("mean_length"));
     assertTrue(run.number("seconds") < 10, run.toString());
+  }
+
+  /**
+   * The triangle template (published figures of the template; found by construction, m + 1 a set).
+   */
+  @ParameterizedTest
+  @CsvSource({"complete:40, cells:4@10x10, 440, 11", "complete:72, cells:4@18x18, 1368, 19"})
+  void completeGuestsFitByTemplate(String guest, String host, String vertices, String longest) {
+    for (String method : List.of("template", "best")) {
+      CommandRun run = fit("--guest " + guest + " --host " + host + " --method " + method);
+      assertEquals(0, run.status(), run.toString());
+      assertEquals(vertices, run.row().get("vertices"), method);
+      assertEquals(longest, run.row().get("longest"), method);
+      assertEquals(longest + ".000", run.row().get("mean_length"), method);
+    }
+  }
+
+  @Test
+  void theBestMethodIsTheStandardOne() {
+    assertEquals("best", fit("--guest cycle:4 --host square:2x2").row().get("method"));
   }
 
   @Test
