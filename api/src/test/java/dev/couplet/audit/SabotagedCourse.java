@@ -15,6 +15,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.SplittableRandom;
+import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.locks.LockSupport;
 import java.util.function.UnaryOperator;
 
@@ -152,14 +153,26 @@ final class SabotagedCourse {
                 OptionalDouble.empty(),
                 OptionalDouble.empty(),
                 OptionalDouble.empty());
-        Thread thread = new Thread(() -> run.watch().listener().accept(progress));
+        CountDownLatch together = new CountDownLatch(2);
+        Thread thread = new Thread(() -> tell(run.watch(), progress, together));
         thread.setUncaughtExceptionHandler((t, e) -> {});
         thread.start();
-        run.watch().listener().accept(progress);
+        tell(run.watch(), progress, together);
         join(thread);
         return super.sample(form, run);
       }
     };
+  }
+
+  /** Many calls side by side, so that some overlap however the threads are scheduled. */
+  private static void tell(Watch watch, Progress progress, CountDownLatch together) {
+    together.countDown();
+    while (together.getCount() > 0) {
+      Thread.onSpinWait();
+    }
+    for (int call = 0; call < 200; call++) {
+      watch.listener().accept(progress);
+    }
   }
 
   static Sampler leavesAThread() {
