@@ -90,7 +90,7 @@ final class Assembly {
   }
 
   private void addPenalty(String name, Kind kind, Penalty penalty) {
-    Weights.Chosen chosen = settings.choose(new Weights.Facts(name, objective, whole));
+    Weights.Chosen chosen = settings.choose(new Weights.Facts(name, statement, objective, whole));
     weights.add(new Weight(name, penalty.form(), chosen.value(), chosen.reason()));
     addSource(name, kind, penalty.terms(), chosen.value());
   }
@@ -167,7 +167,7 @@ final class Assembly {
 
   /** The largest form whose energies are exact, or for real objectives hold most of its digits. */
   private double largest() {
-    double felt = RangeBound.felt(objective);
+    double felt = RangeBound.felt(objective.width(), objective);
     return whole || felt == 0 ? WHOLE_LIMIT : felt * DIGITS_LEFT;
   }
 

@@ -12,7 +12,7 @@ final class RangeBound implements Weights {
   public Chosen choose(Facts facts) {
     Range objective = facts.objective();
     double width = Math.max(0, objective.width());
-    double weight = above(facts.whole() ? width : felt(objective), facts.whole());
+    double weight = above(width, facts);
     String reason =
         "above "
             + Weights.shown(width)
@@ -24,13 +24,18 @@ final class RangeBound implements Weights {
     return new Chosen(weight, reason);
   }
 
+  /** A weight strictly above what can be won, as the numbers of the objective allow. */
+  static double above(double width, Weights.Facts facts) {
+    return above(facts.whole() ? width : felt(width, facts.objective()), facts.whole());
+  }
+
   /**
-   * The width, or what is left of it beside a large constant: a weight that is lost in the rounding
-   * of the energies would guard nothing.
+   * The width, or what is left of it beside large values of the objective: a weight that is lost in
+   * the rounding of the energies would guard nothing.
    */
-  static double felt(Range objective) {
+  static double felt(double width, Range objective) {
     double largest = Math.max(Math.abs(objective.lowest()), Math.abs(objective.highest()));
-    return Math.max(objective.width(), Math.scalb(largest, -30));
+    return Math.max(width, Math.scalb(largest, -30));
   }
 
   /**

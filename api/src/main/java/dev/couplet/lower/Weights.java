@@ -1,6 +1,8 @@
 package dev.couplet.lower;
 
+import dev.couplet.model.Plan;
 import dev.couplet.model.Range;
+import dev.couplet.model.Statement;
 import java.util.Locale;
 
 /**
@@ -16,11 +18,12 @@ public interface Weights {
    * What is known when a weight is chosen.
    *
    * @param rule the rule's name, or words that name a choice's code
+   * @param statement what is lowered
    * @param objective everything that is minimised beside the penalties: its lowest value over all
    *     bit patterns, broken codes included, and its highest under any plan
    * @param whole whether the objective has whole coefficients only
    */
-  record Facts(String rule, Range objective, boolean whole) {}
+  record Facts(String rule, Statement statement, Range objective, boolean whole) {}
 
   /**
    * A weight and why it suffices.
@@ -39,6 +42,18 @@ public interface Weights {
    */
   static Weights rangeBound() {
     return new RangeBound();
+  }
+
+  /**
+   * Strictly above what could be won over a known feasible plan, were every rule broken: its value
+   * less the lowest that the objective can be. Always enough, and lighter than the range bound if
+   * the plan is good: today's plan, or the answer of a first run.
+   *
+   * @throws IllegalArgumentException if the plan is not feasible, naming a rule; when a model is
+   *     lowered also if it is another model, or has become another by later decisions and rules
+   */
+  static Weights incumbentBound(Plan known) {
+    return new IncumbentBound(known);
   }
 
   /**

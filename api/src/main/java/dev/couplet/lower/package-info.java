@@ -10,8 +10,8 @@
  * <p>One step a file, in the order of the work: {@code BitTable} numbers the bits, {@code Limits}
  * tightens a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms
  * ({@code TwoBitForm}, {@code ConflictForm}, {@code SquareForm} with {@code Slack}), {@code
- * RangeBound} weighs it, {@code DegreeReduction} brings every term to degree 2, {@code Assembly}
- * adds all up.
+ * RangeBound} or {@code IncumbentBound} weighs it, {@code DegreeReduction} brings every term to
+ * degree 2, {@code Assembly} adds all up.
  *
  * <p>Every penalty is zero, for the best values of its auxiliary bits, where its rule is kept, and
  * at least 1 elsewhere, broken codes included: so a weight above the objective's whole range
