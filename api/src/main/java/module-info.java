@@ -1,6 +1,6 @@
 /** Forms, models, lowering, audits, and the interface between a caller and a sampler. */
 module dev.couplet.api {
-  requires static transitive org.jspecify;
+  requires static org.jspecify;
 
   exports dev.couplet.audit;
   exports dev.couplet.form;

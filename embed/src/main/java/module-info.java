@@ -1,6 +1,6 @@
 /** Sparse hosts: fitting a dense form onto them, and reading it back. */
 module dev.couplet.embed {
-  requires static transitive org.jspecify;
+  requires static org.jspecify;
   requires transitive dev.couplet.api;
   requires transitive org.jgrapht.core;
 
