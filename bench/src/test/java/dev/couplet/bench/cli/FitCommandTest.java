@@ -44,18 +44,19 @@ class FitCommandTest {
   }
 
   /**
-   * The triangle template (published figures of the template; found by construction, m + 1 a set).
+   * The triangle template takes m + 1 vertices a set on m x m cells (published figures of the
+   * template, found by construction too); the best method does not need more.
    */
   @ParameterizedTest
   @CsvSource({"complete:40, cells:4@10x10, 440, 11", "complete:72, cells:4@18x18, 1368, 19"})
-  void completeGuestsFitByTemplate(String guest, String host, String vertices, String longest) {
-    for (String method : List.of("template", "best")) {
-      CommandRun run = fit("--guest " + guest + " --host " + host + " --method " + method);
-      assertEquals(0, run.status(), run.toString());
-      assertEquals(vertices, run.row().get("vertices"), method);
-      assertEquals(longest, run.row().get("longest"), method);
-      assertEquals(longest + ".000", run.row().get("mean_length"), method);
-    }
+  void completeGuestsFitByTemplate(String guest, String host, int vertices, int longest) {
+    CommandRun template = fit("--guest " + guest + " --host " + host + " --method template");
+    assertEquals(0, template.status(), template.toString());
+    assertEquals(vertices, template.number("vertices"));
+    assertEquals(longest, template.number("longest"));
+    assertEquals(longest, template.number("mean_length"));
+    CommandRun best = fit("--guest " + guest + " --host " + host);
+    assertTrue(best.number("vertices") <= vertices, best.toString());
   }
 
   @Test
