@@ -29,7 +29,8 @@ final class TwoBitForm {
       double both = violation(limits, v -> true);
       terms.add(onlyY - none, y).add(both - onlyX - onlyY + none, x, y);
     }
-    return Optional.of(new Penalty(terms.build(), "exact on " + variables.length + " bits"));
+    String form = variables.length == 1 ? "exact on 1 bit" : "exact on 2 bits";
+    return Optional.of(new Penalty(terms.build(), form));
   }
 
   private static double violation(Limits limits, IntPredicate one) {
