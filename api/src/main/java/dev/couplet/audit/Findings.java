@@ -5,6 +5,19 @@ import java.util.List;
 
 /** What an audit looked at, and what it found wrong. Immutable. */
 public final class Findings {
+  /**
+   * One thing that an audit found wrong.
+   *
+   * @param check the name of the check that failed
+   * @param message what happened, on what input, and how to mend it
+   */
+  public record Finding(String check, String message) {
+    @Override
+    public String toString() {
+      return "[" + check + "] " + message;
+    }
+  }
+
   private static final int SHOWN_PER_CHECK = 3;
 
   private final String subject;

@@ -1,5 +1,6 @@
 package dev.couplet.audit;
 
+import dev.couplet.audit.Findings.Finding;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;

@@ -8,7 +8,6 @@ import dev.couplet.model.Expr;
 import dev.couplet.model.Literal;
 import dev.couplet.model.Model;
 import dev.couplet.model.Plan;
-import dev.couplet.model.PlanDraft;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.SplittableRandom;
@@ -59,7 +58,7 @@ final class RandomModel {
         values.forEach(value -> literals.add(choice.is(value)));
       }
     }
-    PlanDraft draft = model.plan();
+    Plan.Draft draft = model.plan();
     bits.forEach(bit -> draft.set(bit, random.nextBoolean()));
     choices.forEach(choice -> draft.set(choice, random.nextInt(choice.values())));
     return draft.evaluate();

@@ -7,8 +7,8 @@
  * says, and tells how much each weight could be lowered: its {@link
  * dev.couplet.audit.LoweringReport}. {@link dev.couplet.audit.RandomModels} draws small models for
  * property tests. What an audit found wrong are its {@link dev.couplet.audit.Findings}, each a
- * {@link dev.couplet.audit.Finding} with the name of the check and a message that says what
- * happened and how to mend it; {@code orThrow()} turns them into an {@link
+ * {@link dev.couplet.audit.Findings.Finding} with the name of the check and a message that says
+ * what happened and how to mend it; {@code orThrow()} turns them into an {@link
  * java.lang.AssertionError}.
  */
 @CheckReturnValue

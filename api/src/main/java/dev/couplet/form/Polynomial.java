@@ -201,6 +201,18 @@ public final class Polynomial {
     return "Polynomial(" + size + " variables, " + terms() + " terms, degree " + degree() + ")";
   }
 
+  /** Receives the terms of a polynomial, one at a time, in the polynomial's order. */
+  @FunctionalInterface
+  public interface TermVisitor {
+    /**
+     * Receives one term.
+     *
+     * @param coefficient what the product is multiplied by
+     * @param variables the variables of the product, ascending, a new array; none for the constant
+     */
+    void visit(double coefficient, int[] variables);
+  }
+
   /** Collects the terms of a {@link Polynomial}; terms with the same product add up. */
   public static final class Builder {
     private final int size;

@@ -1,6 +1,7 @@
 package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.model.Statement.Objective;
 
 /** Writes a statement in words that a person can proof-read; as long as the statement is. */
 final class Description {

@@ -2,6 +2,7 @@ package dev.couplet.model;
 
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Polynomial;
+import dev.couplet.model.Statement.Objective;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashSet;
@@ -210,7 +211,7 @@ public final class Model {
 
   /** Begins a plan by hand, over the model as it stands now. */
   @CheckReturnValue
-  public PlanDraft plan() {
+  public Plan.Draft plan() {
     return snapshot().plan();
   }
 

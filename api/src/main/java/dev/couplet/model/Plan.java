@@ -1,10 +1,11 @@
 package dev.couplet.model;
 
-import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.State;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * A value for every decision of a model, with what it is worth and which rules it breaks, all
@@ -15,7 +16,6 @@ import java.util.Optional;
  * natural order puts the better plan first: feasible before infeasible, then by value in the
  * model's sense. Immutable.
  */
-@CheckReturnValue
 public final class Plan implements Comparable<Plan> {
   private static final int SHOWN = 40;
 
@@ -184,5 +184,63 @@ public final class Plan implements Comparable<Plan> {
     return decision instanceof Choice<?> choice
         ? find(choice).<Object>map(option -> option).orElse("undecided")
         : value((Bit) decision);
+  }
+
+  /**
+   * A plan being written by hand: set every decision, then evaluate. Belongs to one thread.
+   *
+   * <p>Use it to score what is done today, or as a start for a sampler.
+   */
+  public static final class Draft {
+    private final Statement statement;
+    private final boolean[] literals;
+    private final Set<Decision> decided = new HashSet<>();
+
+    Draft(Statement statement) {
+      this.statement = statement;
+      this.literals = new boolean[statement.literals()];
+    }
+
+    /**
+     * Sets a choice, also a second time.
+     *
+     * @throws IllegalArgumentException if it is of another model, or has no such option
+     */
+    public <T> Draft set(Choice<T> choice, T option) {
+      statement.require(choice);
+      int position = choice.positionOf(option);
+      for (int k = 0; k < choice.values(); k++) {
+        literals[choice.firstLiteral() + k] = k == position;
+      }
+      decided.add(choice);
+      return this;
+    }
+
+    /**
+     * Sets a bit, also a second time.
+     *
+     * @throws IllegalArgumentException if it is of another model
+     */
+    public Draft set(Bit bit, boolean value) {
+      statement.require(bit);
+      literals[bit.index()] = value;
+      decided.add(bit);
+      return this;
+    }
+
+    /**
+     * The plan with these values, checked against the model.
+     *
+     * @throws IllegalStateException naming the first decision that was not set
+     */
+    public Plan evaluate() {
+      for (Decision decision : statement.decisions()) {
+        if (!decided.contains(decision)) {
+          throw new IllegalStateException(
+              "decision '" + decision.name() + "' is not set; set every decision of the plan");
+        }
+      }
+      return statement.plan(State.of(literals));
+    }
   }
 }

@@ -17,6 +17,18 @@ import java.util.Optional;
  */
 @CheckReturnValue
 public final class Statement {
+  /**
+   * One named part of what a model minimises or maximises.
+   *
+   * @param name the name, unique in the model
+   * @param terms a polynomial over the model's literals, in the model's own sense
+   */
+  public record Objective(String name, Polynomial terms) {
+    Objective inLiterals(int literals) {
+      return new Objective(name, terms.inVariables(literals));
+    }
+  }
+
   private final Model owner;
   private final List<Decision> decisions;
   private final Decision[] decisionOf;
@@ -117,8 +129,8 @@ public final class Statement {
   }
 
   /** Begins a plan by hand. */
-  public PlanDraft plan() {
-    return new PlanDraft(this);
+  public Plan.Draft plan() {
+    return new Plan.Draft(this);
   }
 
   /**

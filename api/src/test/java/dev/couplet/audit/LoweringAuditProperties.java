@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.audit.Findings.Finding;
 import dev.couplet.audit.LoweringReport.WeightSlack;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.audit.Spec.Limit;

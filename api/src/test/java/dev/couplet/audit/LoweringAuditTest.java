@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.audit.Findings.Finding;
 import dev.couplet.audit.LoweringReport.WeightSlack;
 import dev.couplet.lower.Lowering;
 import dev.couplet.lower.Weights;

@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.audit.Findings.Finding;
 import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Sampler;
 import java.time.Duration;

@@ -11,7 +11,6 @@ import dev.couplet.model.Expr;
 import dev.couplet.model.Literal;
 import dev.couplet.model.Model;
 import dev.couplet.model.Plan;
-import dev.couplet.model.PlanDraft;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
@@ -90,7 +89,7 @@ final class SpecModel {
   }
 
   Plan plan(int[] values) {
-    PlanDraft draft = model.plan();
+    Plan.Draft draft = model.plan();
     for (int d = 0; d < values.length; d++) {
       if (decisions.get(d) instanceof Choice<?> choice) {
         draft.set(option(choice), values[d]);

@@ -8,7 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTimeout;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import dev.couplet.audit.Finding;
+import dev.couplet.audit.Findings.Finding;
 import dev.couplet.audit.LoweringAudit;
 import dev.couplet.audit.LoweringReport;
 import dev.couplet.audit.RandomModels;

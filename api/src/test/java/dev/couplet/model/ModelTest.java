@@ -13,6 +13,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
+import dev.couplet.model.Statement.Objective;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
@@ -130,7 +131,7 @@ class ModelTest {
   }
 
   private Plan allTrue() {
-    PlanDraft draft = model.plan();
+    Plan.Draft draft = model.plan();
     for (Decision decision : model.snapshot().decisions()) {
       draft.set((Bit) decision, true);
     }

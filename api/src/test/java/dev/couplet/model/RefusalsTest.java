@@ -79,7 +79,7 @@ class RefusalsTest {
     refused(() -> sum(a, b, foreign), "model 'other'");
     refused(() -> model.require("r", foreign.isTrue()), "'other'", "'rounds'");
     refused(() -> model.minimize("m", foreign), "'other'", "'rounds'");
-    PlanDraft draft = model.plan();
+    Plan.Draft draft = model.plan();
     refused(() -> draft.set(foreign, true), "decision 'a'", "'other'", "'rounds'");
     refused(() -> draft.set(foreignVan, "small"), "decision 'van'", "'other'");
     Plan plan = model.plan().set(a, true).set(b, true).set(van, "small").evaluate();
@@ -169,7 +169,7 @@ class RefusalsTest {
 
   @Test
   void decisionsMadeAfterTheSnapshot() {
-    PlanDraft draft = model.plan().set(a, true).set(b, true).set(van, "small");
+    Plan.Draft draft = model.plan().set(a, true).set(b, true).set(van, "small");
     Plan plan = draft.evaluate();
     Bit late = model.bit("late");
     Choice<Integer> lateChoice = model.choice("late choice", List.of(1));
