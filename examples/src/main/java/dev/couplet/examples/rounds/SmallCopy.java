@@ -1,6 +1,6 @@
 package dev.couplet.examples.rounds;
 
-import dev.couplet.model.PlanDraft;
+import dev.couplet.model.Plan;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -99,7 +99,7 @@ final class SmallCopy {
     int vans = data.vans().size();
     long plans = Math.round(StrictMath.pow(vans, data.villages().size()));
     for (long plan = 0; plan < plans; plan++) {
-      PlanDraft draft = rounds.model().plan();
+      Plan.Draft draft = rounds.model().plan();
       long rest = plan;
       for (Village village : data.villages()) {
         draft.set(rounds.vanOf(village), data.vans().get((int) (rest % vans)));
