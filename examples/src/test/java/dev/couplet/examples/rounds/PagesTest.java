@@ -11,7 +11,6 @@ import dev.couplet.lower.Lowering;
 import dev.couplet.lower.Weight;
 import dev.couplet.lower.Weights;
 import dev.couplet.model.Plan;
-import dev.couplet.model.PlanDraft;
 import dev.couplet.sampling.Effort;
 import dev.couplet.solve.Answer;
 import dev.couplet.solve.Solver;
@@ -75,7 +74,7 @@ class PagesTest {
   @Test
   void thePlanPageNamesWhatIsNotKept() {
     RoundsModel rounds = RoundsModel.of(INVENTED);
-    PlanDraft draft = rounds.model().plan();
+    Plan.Draft draft = rounds.model().plan();
     Van small = INVENTED.vans().get(0);
     INVENTED.villages().forEach(village -> draft.set(rounds.vanOf(village), small));
     String page = PlanPage.of(rounds, draft.evaluate());
