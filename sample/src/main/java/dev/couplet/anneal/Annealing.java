@@ -4,10 +4,12 @@ import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Qubo;
 import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.DrawLoop;
+import dev.couplet.kernel.ReplicaRows;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Vigil;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -22,13 +24,20 @@ import java.util.OptionalDouble;
  * <p>Where the run knows exactly-one sets, each sweep also tries to move the 1 of every set to
  * another of its bits, in one step, without climbing over the penalty between them.
  *
+ * <p>If the coefficients are small integers in units of their common divisor (pairs up to 15, a
+ * variable with all its pairs up to 127) and there are 32 draws or more, or as many as time allows,
+ * 64 draws are made at once, with random numbers of their own: each bit of a word belongs to one.
+ * Those are other draws than the same seed gives to a run of fewer draws.
+ *
  * <p>Cost: a sweep takes O(n + d) steps, d the degrees of the variables that flip: O(n + m) at
- * most. Memory: 24 bytes a pair, and 16 bytes a variable and thread. Immutable and thread-safe.
+ * most; made 64 at once, a draw takes about a twentieth of that. Memory: 24 bytes a pair, and 16
+ * bytes a variable and thread. Immutable and thread-safe.
  *
  * <p>Source: Kirkpatrick, Gelatt and Vecchi, "Optimization by simulated annealing" (1983).
  */
 @CheckReturnValue
 public final class Annealing implements Sampler {
+  private static final int MANY = 32;
   private static final Annealing STANDARD =
       new Annealing(
           Cooling.geometric(), OptionalDouble.empty(), OptionalDouble.empty(), Finish.DESCENT);
@@ -89,9 +98,25 @@ public final class Annealing implements Sampler {
       return DrawLoop.unbegun(form, run, vigil);
     }
     Adjacency rows = Adjacency.of(form);
+    Optional<ReplicaRows> replicas = many(run) ? ReplicaRows.of(rows) : Optional.empty();
+    int batch = replicas.isPresent() ? ReplicaAnnealer.BATCH : 1;
     Schedule schedule =
-        new Schedule(cooling, temperatures(rows, run), Sweeps.of(rows, run.effort()));
-    return DrawLoop.run(form, run, vigil, 1, () -> new Annealer(rows, run, schedule, finish));
+        new Schedule(cooling, temperatures(rows, run), Sweeps.of(rows, run.effort(), batch));
+    return DrawLoop.run(
+        form,
+        run,
+        vigil,
+        batch,
+        () ->
+            replicas.isPresent()
+                ? new ReplicaAnnealer(replicas.get(), run, schedule, finish)
+                : new Annealer(rows, run, schedule, finish));
+  }
+
+  /** Whether there are draws enough to be worth making 64 at once, all by single flips. */
+  private static boolean many(Run run) {
+    return run.effort().draws().orElse(Integer.MAX_VALUE) >= MANY
+        && run.structure().exactlyOne().isEmpty();
   }
 
   private Temperatures temperatures(Adjacency rows, Run run) {

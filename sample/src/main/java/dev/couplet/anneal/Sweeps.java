@@ -15,12 +15,12 @@ record Sweeps(int first, int generation) {
   private static final int DRAWS_A_GENERATION = 16;
   private static final double STEPS = 0x1p30;
 
-  static Sweeps of(Adjacency rows, Effort effort) {
+  static Sweeps of(Adjacency rows, Effort effort, int batch) {
     if (effort.sweeps().isPresent()) {
       return new Sweeps(effort.sweeps().getAsInt(), Integer.MAX_VALUE);
     }
     if (effort.draws().isEmpty()) {
-      return new Sweeps(SHORTEST, DRAWS_A_GENERATION);
+      return new Sweeps(SHORTEST, Math.max(batch, DRAWS_A_GENERATION));
     }
     double sweep = 1.0 + rows.size() + 2.0 * rows.pairs();
     int fitting = (int) Math.min(COUNTED, STEPS / sweep);

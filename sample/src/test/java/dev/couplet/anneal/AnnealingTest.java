@@ -129,7 +129,7 @@ class AnnealingTest extends SamplerContract {
                   progress.best().ifPresent(best -> last[1] = best);
                 });
     Draws draws =
-        Annealing.standard().sample(form, Run.of(Effort.draws(50).sweeps(20)).watch(watch));
+        Annealing.standard().sample(form, Run.of(Effort.draws(31).sweeps(20)).watch(watch));
     assertTrue(told[0] > 5);
     assertTrue(last[0] > 0.5 && last[0] <= 1);
     assertTrue(last[1] >= draws.best().energy() && last[1] < 0);
@@ -168,7 +168,7 @@ class AnnealingTest extends SamplerContract {
     Qubo form = Forms.integers(3, 1, 4, 1);
     AtomicLong clock = new AtomicLong();
     Watch ticking = Watch.none().clock(clock::incrementAndGet);
-    Effort effort = Effort.within(Duration.ofNanos(3_000_000)).sweeps(1);
+    Effort effort = Effort.within(Duration.ofNanos(30_000)).sweeps(1);
     Draws draws = Annealing.standard().sample(form, Run.of(effort).watch(ticking));
     assertEquals(End.DEADLINE, draws.end());
     assertTrue(draws.total() <= 1 << 20, "draws: " + draws.total());
