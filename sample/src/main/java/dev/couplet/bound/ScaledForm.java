@@ -84,6 +84,13 @@ final class ScaledForm {
     return slack;
   }
 
+  /** The lowest number that an energy can be, from a number that no energy is below. */
+  double raised(double bound) {
+    return bound < -0x1p60 * Math.scalb(1.0, -shift)
+        ? bound
+        : bound((long) Math.floor(Math.scalb(bound, shift)));
+  }
+
   /** A number that no energy of the form is below, from a lower bound in whole numbers. */
   double bound(long whole) {
     if (slack > 0) {
