@@ -1,5 +1,7 @@
 package dev.couplet.bound;
 
+import dev.couplet.sampling.Vigil;
+
 /**
  * How far from positive semidefinite a symmetric matrix is, proved by Cholesky factors.
  *
@@ -14,13 +16,18 @@ final class PositiveTest {
   private final int size;
   private final double[][] factor;
 
-  PositiveTest(int size) {
+  private final Vigil vigil;
+  private boolean cut;
+
+  PositiveTest(int size, Vigil vigil) {
     this.size = size;
+    this.vigil = vigil;
     this.factor = new double[size][size];
   }
 
   /**
-   * A number d, 0 or more, such that {@code A + d I} has no negative eigenvalue.
+   * A number d, 0 or more, such that {@code A + d I} has no negative eigenvalue; infinite if the
+   * run ends before one is found.
    *
    * @param matrix the lower triangle of A without its diagonal
    */
@@ -32,6 +39,9 @@ final class PositiveTest {
     double fails = 0;
     double passes = scale * 0x1p-40;
     while (!factorise(matrix, diagonal, passes)) {
+      if (cut) {
+        return Double.POSITIVE_INFINITY;
+      }
       fails = passes;
       passes *= 4;
     }
@@ -55,7 +65,16 @@ final class PositiveTest {
   }
 
   private boolean factorise(double[][] matrix, double[] diagonal, double shift) {
+    int work = 0;
     for (int i = 0; i < size; i++) {
+      work += i * i;
+      if (work > Vigil.STEPS / 2) {
+        work = 0;
+        cut = cut || vigil.over();
+      }
+      if (cut) {
+        return false;
+      }
       double[] row = factor[i];
       double rest = diagonal[i] + shift;
       for (int j = 0; j < i; j++) {

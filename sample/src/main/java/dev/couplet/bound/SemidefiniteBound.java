@@ -19,9 +19,15 @@ import java.util.OptionalDouble;
  */
 public final class SemidefiniteBound implements Bound {
   /** Forms with more bits than this are refused. */
-  public static final int MOST_BITS = 2000;
+  public static final int MOST_BITS = 1400;
 
   private static final int CERTIFY_EVERY = 20;
+
+  /** Before so many rounds nothing is said of how the bound will go on. */
+  private static final int PATIENCE = 60;
+
+  /** How much faster than in the last period it may still rise. */
+  private static final double HOPE = 1.5;
 
   private final int rounds;
 
@@ -54,7 +60,8 @@ public final class SemidefiniteBound implements Bound {
   }
 
   /**
-   * The bound, as a stage of a run that has begun; ends as soon as it has reached {@code enough}.
+   * The bound, as a stage of a run that has begun; ends as soon as it has reached {@code enough},
+   * or rises so slowly that it will not.
    *
    * @throws IllegalArgumentException if the form is too large
    */
@@ -67,15 +74,18 @@ public final class SemidefiniteBound implements Bound {
               + MOST_BITS
               + "; use another bound");
     }
-    SemidefiniteRounds work = new SemidefiniteRounds(form);
+    SemidefiniteRounds work = new SemidefiniteRounds(form, enough, vigil);
     double best = Double.NEGATIVE_INFINITY;
     for (int round = 1; round <= rounds && !vigil.over(); round++) {
-      boolean last = round == rounds;
       work.round();
-      if (last || round % CERTIFY_EVERY == 1) {
+      if (round == rounds || round % CERTIFY_EVERY == 1) {
+        double before = best;
         best = Math.max(best, work.certified());
         vigil.report(OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.of(best));
-        if (best >= enough || best >= work.goal()) {
+        double periods = (double) (rounds - round) / CERTIFY_EVERY;
+        boolean hopeless = best + HOPE * periods * (best - before) < enough;
+        if (best >= work.goal()
+            || (enough < Double.POSITIVE_INFINITY && round > PATIENCE && hopeless)) {
           break;
         }
       }

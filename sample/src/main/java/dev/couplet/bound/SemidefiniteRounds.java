@@ -3,6 +3,7 @@ package dev.couplet.bound;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.sampling.Vigil;
 
 /**
  * The state of one semidefinite bound in work. Spin 0 stands for the constant +1, so that fields
@@ -24,7 +25,7 @@ final class SemidefiniteRounds {
   private final UnitVectors vectors;
   private final Triangles triangles;
   private final PositiveTest test;
-  private double goal = Double.POSITIVE_INFINITY;
+  private double goal;
 
   /** How far a step goes, as a share of what it would take to close the gap at once. */
   private double share = 1;
@@ -32,8 +33,14 @@ final class SemidefiniteRounds {
   private double estimate = Double.NEGATIVE_INFINITY;
   private int round;
 
-  SemidefiniteRounds(Qubo form) {
+  /**
+   * Begins a bound.
+   *
+   * @param enough an energy that the bound need not exceed
+   */
+  SemidefiniteRounds(Qubo form, double enough, Vigil vigil) {
     this.form = form;
+    this.goal = enough;
     scaled = new ScaledForm(form);
     Ising spins = form.toIsing();
     constant = spins.constant();
@@ -45,9 +52,9 @@ final class SemidefiniteRounds {
     }
     spins.forEachPair((i, j, value) -> coupling[i + 1][j + 1] = coupling[j + 1][i + 1] = value / 2);
     matrix = new double[size][];
-    vectors = new UnitVectors(size);
-    triangles = new Triangles(size, 8 * size);
-    test = new PositiveTest(size);
+    vectors = new UnitVectors(size, vigil);
+    triangles = new Triangles(size, 8 * size, vigil);
+    test = new PositiveTest(size, vigil);
     refill();
   }
 
@@ -58,7 +65,7 @@ final class SemidefiniteRounds {
     triangles.subtractFrom(matrix);
   }
 
-  /** The lowest energy seen: no bound can be above it. */
+  /** What the bound need not exceed: the lowest energy seen, unless less is enough. */
   double goal() {
     return goal;
   }

@@ -1,5 +1,6 @@
 package dev.couplet.bound;
 
+import dev.couplet.sampling.Vigil;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
@@ -52,12 +53,14 @@ final class Triangles {
 
   private final int size;
   private final int most;
+  private final Vigil vigil;
   private final List<Triangle> active = new ArrayList<>();
   private final Set<Long> known = new HashSet<>();
   private double total;
 
-  Triangles(int size, int most) {
+  Triangles(int size, int most, Vigil vigil) {
     this.size = size;
+    this.vigil = vigil;
     this.most = most;
   }
 
@@ -136,7 +139,7 @@ final class Triangles {
       }
     }
     PriorityQueue<Triangle> found = new PriorityQueue<>(BY_EXCESS);
-    for (int k = 0; k < size; k++) {
+    for (int k = 0; k < size && !vigil.over(); k++) {
       for (int j = 0; j < k; j++) {
         for (int i = 0; i < j; i++) {
           look(i, j, k, product[j][i], product[k][i], product[k][j], found);

@@ -1,5 +1,6 @@
 package dev.couplet.bound;
 
+import dev.couplet.sampling.Vigil;
 import java.util.Arrays;
 import java.util.SplittableRandom;
 
@@ -11,14 +12,16 @@ import java.util.SplittableRandom;
  */
 final class UnitVectors {
   private final int size;
+  private final Vigil vigil;
   private final int rank;
   private final double[][] vector;
 
   /** The length of each vector's field: what is gained by its being where it is. */
   final double[] pull;
 
-  UnitVectors(int size) {
+  UnitVectors(int size, Vigil vigil) {
     this.size = size;
+    this.vigil = vigil;
     this.rank = (int) Math.ceil(Math.sqrt(2.0 * size)) + 1;
     this.vector = new double[size][rank];
     this.pull = new double[size];
@@ -46,13 +49,17 @@ final class UnitVectors {
   }
 
   /**
-   * Turns every vector once; returns the energy, the sum over all ordered pairs of the matrix times
-   * the inner product, as it was met on the way.
+   * Turns every vector once, unless the run ends; returns the energy, the sum over all ordered
+   * pairs of the matrix times the inner product, as it was met on the way.
    */
   double sweep(double[][] matrix) {
     double[] field = new double[rank];
     double sum = 0;
+    int lookEvery = 1 + Vigil.STEPS / 2 / (size * rank);
     for (int i = 0; i < size; i++) {
+      if (i % lookEvery == 0 && vigil.over()) {
+        break;
+      }
       double length = field(matrix[i], i, field);
       pull[i] = length;
       sum -= length;

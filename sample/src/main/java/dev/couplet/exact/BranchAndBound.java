@@ -14,8 +14,9 @@ import java.util.SplittableRandom;
 /**
  * Finds and proves the minimum of a form by branch and bound (Land and Doig 1960), depth first: at
  * every node the form is reduced and split into parts, small and thin parts are solved outright,
- * and bounds leave out what cannot be better than the best state known. A short tabu search from
- * the run's starts and from random states gives the first such state.
+ * and bounds, the roof dual or for dense parts the semidefinite one, leave out what cannot be
+ * better than the best state known. A short tabu search from the run's starts and from random
+ * states gives the first such state.
  *
  * <p>As a sampler it returns the best state found and a bound on all energies; they meet when the
  * run was not cut short, up to rounding if the form's energies are rounded. The number of draws and

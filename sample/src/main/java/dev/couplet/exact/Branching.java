@@ -2,6 +2,7 @@ package dev.couplet.exact;
 
 import dev.couplet.bound.RoofDual;
 import dev.couplet.bound.Rounding;
+import dev.couplet.bound.SemidefiniteBound;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.reduce.Reduced;
@@ -31,6 +32,11 @@ final class Branching {
 
   /** Parts whose elimination takes at most so many steps are eliminated. */
   private static final double FEW_STEPS = 1 << 20;
+
+  private static final int MOST_SEMIDEFINITE = 300;
+  private static final int ROUNDS = 200;
+  private static final int ROOT_ROUNDS = 300;
+  private static final int FEW_ROUNDS = 41;
 
   private final Vigil vigil;
   private final long mostNodes;
@@ -98,12 +104,16 @@ final class Branching {
       Outcome all = direct.get();
       return all.energy() < cutoff ? all : Outcome.none(all.bound());
     }
-    return over() ? Outcome.none(bound) : branch(part, cutoff, bound);
+    double raised = Math.max(bound, semidefinite(part, cutoff));
+    return over() || raised >= cutoff ? Outcome.none(raised) : branch(part, cutoff, raised);
   }
 
   private static boolean small(Qubo part) {
-    boolean dense = 4L * part.pairs() > (long) part.size() * part.size();
-    return dense && part.size() <= FEW_DENSE_BITS;
+    return dense(part) && part.size() <= FEW_DENSE_BITS;
+  }
+
+  private static boolean dense(Qubo part) {
+    return 4L * part.pairs() > (long) part.size() * part.size();
   }
 
   private Outcome enumerate(Qubo part, double cutoff, double bound) {
@@ -130,6 +140,23 @@ final class Branching {
     Draws draws = elimination.sample(part, Run.of(Effort.draws(1)));
     double bound = draws.bound().orElseThrow();
     return Optional.of(Outcome.found(draws.best().state(), draws.best().energy(), bound));
+  }
+
+  /**
+   * The bound for dense parts, and for the whole form, so that a search cut short has a good one.
+   */
+  private double semidefinite(Qubo part, double cutoff) {
+    boolean whole = nodes == 1 && part.pairs() > 3L * part.size();
+    if (part.size() > MOST_SEMIDEFINITE || over() || !(whole || dense(part))) {
+      return Double.NEGATIVE_INFINITY;
+    }
+    SemidefiniteBound method = SemidefiniteBound.standard();
+    if (nodes > 1) {
+      return method.rounds(ROUNDS).below(part, cutoff, vigil);
+    }
+    // However far it is from enough: this is what a search cut short will have.
+    int rounds = dense(part) ? ROOT_ROUNDS : FEW_ROUNDS;
+    return method.rounds(rounds).below(part, Double.POSITIVE_INFINITY, vigil);
   }
 
   private Outcome branch(Qubo part, double cutoff, double bound) {

@@ -63,8 +63,9 @@ final class WarmStart {
     double record = energy;
     State recordState = from;
     int steps = Math.max(2 * size, WORK / BEGINNINGS / size);
+    int lookEvery = 1 + Vigil.STEPS / 4 / size;
     for (int step = 0; step < steps; step++) {
-      if (step % 256 == 0 && vigil.over()) {
+      if (step % lookEvery == 0 && vigil.over()) {
         break;
       }
       int next = next(freeAt, step, record - energy);

@@ -9,10 +9,13 @@ import dev.couplet.exact.TestForms;
 import dev.couplet.exact.TestForms.Regime;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
+import dev.couplet.form.State;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
+import java.time.Duration;
+import java.util.concurrent.atomic.AtomicLong;
 import org.junit.jupiter.api.Test;
 
 class SemidefiniteBoundTest {
@@ -92,9 +95,24 @@ class SemidefiniteBoundTest {
     assertEquals(Double.NEGATIVE_INFINITY, BOUND.below(TestForms.random(Regime.DENSE, 10, 3), run));
   }
 
+  /** The clock moves 1 ms a look: rounds, triangles and certificates all end soon after. */
+  @Test
+  void aDeadlineEndsTheRun() {
+    Qubo form = TestForms.random(Regime.DENSE, 60, 3);
+    double minimumAtMost = form.value(State.zeros(60));
+    for (int millis = 1; millis < 4000; millis += 371) {
+      AtomicLong looks = new AtomicLong();
+      Watch watch = Watch.none().clock(() -> looks.getAndIncrement() * 1_000_000);
+      Run run = Run.of(Effort.within(Duration.ofMillis(millis)));
+      double bound = BOUND.below(form, run.watch(watch));
+      assertTrue(bound <= minimumAtMost);
+      assertTrue(looks.get() <= millis + 2, looks + " looks for " + millis);
+    }
+  }
+
   @Test
   void refusesWhatItCannotDo() {
     assertThrows(IllegalArgumentException.class, () -> BOUND.rounds(0));
-    assertThrows(IllegalArgumentException.class, () -> BOUND.below(Qubo.builder(2001).build()));
+    assertThrows(IllegalArgumentException.class, () -> BOUND.below(Qubo.builder(1401).build()));
   }
 }

@@ -70,6 +70,13 @@ class BranchAndBoundTest {
     proves(-n / 2.0, complete.build().toQubo());
   }
 
+  /** One bit more than is enumerated at once: the semidefinite bound does most of the work. */
+  @Test
+  void denseForm() {
+    Qubo form = TestForms.random(Regime.DENSE, 31, 2);
+    proves(Enumeration.standard().levels(form, 1).minimum(), form);
+  }
+
   @Test
   void noBits() {
     Draws draws = SEARCH.sample(Qubo.builder(0).addConstant(-2).build(), EFFORT);
