@@ -1,7 +1,5 @@
 package dev.couplet.kernel;
 
-import java.util.Arrays;
-
 /**
  * Sums the gains of the variables of one block, for 64 states at once, digit by digit.
  *
@@ -86,8 +84,8 @@ final class ReplicaGains {
   }
 
   private void add(long[][] mask, int length) {
-    Arrays.fill(carry, 0, length, 0);
-    for (int b = 0; b < weightDigits; b++) {
+    WordLoops.addFirstMasked(digit[0], y, x, mask[0], carry, length);
+    for (int b = 1; b < weightDigits; b++) {
       WordLoops.addMasked(digit[b], y, x, mask[b], carry, length);
     }
     carryFrom(weightDigits, length);

@@ -43,6 +43,16 @@ final class WordLoops {
     }
   }
 
+  /** Adds y xor x, where a mask is 1, to a digit, and gives the carry. */
+  static void addFirstMasked(
+      long[] digit, long[] y, long[] x, long[] mask, long[] carry, int length) {
+    for (int k = 0; k < length; k++) {
+      long a = (y[k] ^ x[k]) & mask[k];
+      carry[k] = digit[k] & a;
+      digit[k] ^= a;
+    }
+  }
+
   /** Adds y xor x, where a mask is 1, and the carry to a digit, and gives the new carry. */
   static void addMasked(long[] digit, long[] y, long[] x, long[] mask, long[] carry, int length) {
     for (int k = 0; k < length; k++) {
