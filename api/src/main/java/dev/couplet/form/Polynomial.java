@@ -129,7 +129,7 @@ public final class Polynomial {
   /** This polynomial with every coefficient multiplied by {@code number}. */
   @CheckReturnValue
   public Polynomial times(double number) {
-    return builder(size).add(this, number).build();
+    return number == 1 ? this : builder(size).add(this, number).build();
   }
 
   /** The product with another polynomial in the same variables; all pairs of terms are formed. */

@@ -9,7 +9,7 @@ import java.util.List;
 import java.util.Map;
 
 /**
- * An expression multiplied out: coefficients and, for each, the literals of its product. Terms with
+ * Multiplies an expression out: coefficients and, for each, the literals of its product. Terms with
  * the same product are not merged in the end, but they are before they are multiplied on, so that a
  * power of a sum has no more terms than it must.
  *
@@ -21,7 +21,8 @@ final class Expansion<N> {
   private static final int[] NONE = {};
   private static final int MERGED_ABOVE = 2;
 
-  private record Pending<N>(Expr expr, N factor) {}
+  /** What is still to be walked: an expression, of a sum the parts from a position on. */
+  private record Pending<N>(Expr expr, N factor, int from) {}
 
   /** A product's literals, ascending, each once. */
   private static final class Key {
@@ -42,96 +43,133 @@ final class Expansion<N> {
     }
   }
 
-  private final Arithmetic<N> arithmetic;
-  final List<N> coefficients = new ArrayList<>();
-  final List<int[]> products = new ArrayList<>();
-
-  private Expansion(Arithmetic<N> arithmetic) {
-    this.arithmetic = arithmetic;
+  /** Receives the terms, in the order of the expression. */
+  @FunctionalInterface
+  interface Sink<N> {
+    void add(N coefficient, int[] product);
   }
 
-  static <N> Expansion<N> of(Expr expr, Arithmetic<N> arithmetic) {
-    Expansion<N> expansion = new Expansion<>(arithmetic);
-    expansion.walk(expr);
-    return expansion;
+  private final Arithmetic<N> arithmetic;
+  private final Sink<N> sink;
+
+  private Expansion(Arithmetic<N> arithmetic, Sink<N> sink) {
+    this.arithmetic = arithmetic;
+    this.sink = sink;
+  }
+
+  static <N> void walk(Expr expr, Arithmetic<N> arithmetic, Sink<N> sink) {
+    new Expansion<>(arithmetic, sink).walk(expr);
   }
 
   private void walk(Expr root) {
     Deque<Pending<N>> pending = new ArrayDeque<>();
-    pending.push(new Pending<>(root, arithmetic.of(1)));
+    pending.push(new Pending<>(root, arithmetic.of(1), 0));
     while (!pending.isEmpty()) {
       Pending<N> next = pending.pop();
       N factor = next.factor();
       if (next.expr() instanceof Literal literal) {
         addLiteral(literal, factor);
       } else if (next.expr() instanceof Node.Constant constant) {
-        add(arithmetic.times(factor, arithmetic.of(constant.value)), NONE);
+        sink.add(arithmetic.times(factor, arithmetic.of(constant.value)), NONE);
       } else if (next.expr() instanceof Node.Scaled scaled) {
         N inner = arithmetic.times(factor, arithmetic.of(scaled.factor));
-        pending.push(new Pending<>(scaled.part, inner));
+        pending.push(new Pending<>(scaled.part, inner, 0));
       } else if (next.expr() instanceof Node.Product product) {
-        addProduct(product, factor);
-      } else if (next.expr() instanceof Node.Sum sum) {
-        for (int i = sum.parts.size() - 1; i >= 0; i--) {
-          pending.push(new Pending<>(sum.parts.get(i), factor));
-        }
+        addProduct(product.factors(), factor);
+      } else if (next.expr() instanceof Node.Sum sum && next.from() < sum.parts.size()) {
+        pending.push(new Pending<>(sum, factor, next.from() + 1));
+        pending.push(new Pending<>(sum.parts.get(next.from()), factor, 0));
       }
     }
   }
 
   private void addLiteral(Literal literal, N factor) {
     if (literal.negated()) {
-      add(factor, NONE);
-      add(arithmetic.times(factor, arithmetic.of(-1)), new int[] {literal.index()});
+      sink.add(factor, NONE);
+      sink.add(arithmetic.times(factor, arithmetic.of(-1)), new int[] {literal.index()});
     } else {
-      add(factor, new int[] {literal.index()});
+      sink.add(factor, new int[] {literal.index()});
     }
   }
 
-  private void addProduct(Node.Product product, N factor) {
-    Expansion<N> result = new Expansion<>(arithmetic);
-    result.add(factor, NONE);
-    for (Expr part : product.factors()) {
-      result = result.times(of(part, arithmetic));
-    }
-    coefficients.addAll(result.coefficients);
-    products.addAll(result.products);
-  }
-
-  private Expansion<N> times(Expansion<N> other) {
-    Expansion<N> left = merged();
-    Expansion<N> right = other.merged();
-    Expansion<N> result = new Expansion<>(arithmetic);
-    for (int a = 0; a < left.products.size(); a++) {
-      for (int b = 0; b < right.products.size(); b++) {
-        N coefficient = arithmetic.times(left.coefficients.get(a), right.coefficients.get(b));
-        result.add(coefficient, join(left.products.get(a), right.products.get(b)));
+  /** Numbers and plain literals make one term; only what else there is gets multiplied out. */
+  private void addProduct(List<Expr> factors, N factor) {
+    int[] plain = new int[factors.size()];
+    int count = 0;
+    N coefficient = factor;
+    List<Expr> others = new ArrayList<>();
+    for (Expr part : factors) {
+      if (part instanceof Literal literal && !literal.negated()) {
+        plain[count++] = literal.index();
+      } else if (part instanceof Node.Constant constant) {
+        coefficient = arithmetic.times(coefficient, arithmetic.of(constant.value));
+      } else {
+        others.add(part);
       }
     }
-    return result;
+    int[] product = count == plain.length ? plain : Arrays.copyOf(plain, count);
+    if (others.isEmpty()) {
+      sink.add(coefficient, product);
+      return;
+    }
+    Terms<N> result = new Terms<>(arithmetic);
+    result.add(coefficient, product);
+    for (Expr part : others) {
+      Terms<N> next = new Terms<>(arithmetic);
+      walk(part, arithmetic, next);
+      result = result.times(next);
+    }
+    for (int t = 0; t < result.products.size(); t++) {
+      sink.add(result.coefficients.get(t), result.products.get(t));
+    }
   }
 
-  private Expansion<N> merged() {
-    if (products.size() <= MERGED_ABOVE) {
-      return this;
+  /** Terms on their way to a product. */
+  private static final class Terms<N> implements Sink<N> {
+    private final Arithmetic<N> arithmetic;
+    private final List<N> coefficients = new ArrayList<>(2);
+    private final List<int[]> products = new ArrayList<>(2);
+
+    Terms(Arithmetic<N> arithmetic) {
+      this.arithmetic = arithmetic;
     }
-    Map<Key, N> sums = new LinkedHashMap<>();
-    for (int t = 0; t < products.size(); t++) {
-      sums.merge(new Key(products.get(t)), coefficients.get(t), arithmetic::plus);
+
+    @Override
+    public void add(N coefficient, int[] product) {
+      coefficients.add(coefficient);
+      products.add(product);
     }
-    Expansion<N> merged = new Expansion<>(arithmetic);
-    sums.forEach((key, sum) -> merged.add(sum, key.literals));
-    return merged;
+
+    Terms<N> times(Terms<N> other) {
+      Terms<N> left = merged();
+      Terms<N> right = other.merged();
+      Terms<N> result = new Terms<>(arithmetic);
+      for (int a = 0; a < left.products.size(); a++) {
+        for (int b = 0; b < right.products.size(); b++) {
+          N coefficient = arithmetic.times(left.coefficients.get(a), right.coefficients.get(b));
+          result.add(coefficient, join(left.products.get(a), right.products.get(b)));
+        }
+      }
+      return result;
+    }
+
+    private Terms<N> merged() {
+      if (products.size() <= MERGED_ABOVE) {
+        return this;
+      }
+      Map<Key, N> sums = new LinkedHashMap<>();
+      for (int t = 0; t < products.size(); t++) {
+        sums.merge(new Key(products.get(t)), coefficients.get(t), arithmetic::plus);
+      }
+      Terms<N> merged = new Terms<>(arithmetic);
+      sums.forEach((key, sum) -> merged.add(sum, key.literals));
+      return merged;
+    }
   }
 
   private static int[] join(int[] left, int[] right) {
     int[] joined = Arrays.copyOf(left, left.length + right.length);
     System.arraycopy(right, 0, joined, left.length, right.length);
     return joined;
-  }
-
-  private void add(N coefficient, int[] product) {
-    coefficients.add(coefficient);
-    products.add(product);
   }
 }

@@ -193,20 +193,29 @@ public final class Model {
               + objectives.get(0).name()
               + "' does the opposite; negate one of them with times(-1)");
     }
-    Expansion<Double> expansion = Expansion.of(expr, Arithmetic.DOUBLES);
-    Polynomial.Builder terms = Polynomial.builder(decisionOfLiteral.size());
-    double magnitude = expansion.coefficients.stream().mapToDouble(Math::abs).sum();
-    Check.finite(
-        "the sum of the coefficients of objective '" + objectiveName + "', multiplied out,",
-        magnitude);
-    for (int t = 0; t < expansion.products.size(); t++) {
-      terms.add(expansion.coefficients.get(t), expansion.products.get(t));
-    }
-    Objective objective = new Objective(objectiveName, terms.build());
+    Objective objective = new Objective(objectiveName, multipliedOut(objectiveName, expr));
     claim(statementNames, "rule or objective", objectiveName);
     objectives.add(objective);
     sense = wanted;
     return objective;
+  }
+
+  private Polynomial multipliedOut(String objectiveName, Expr expr) {
+    Polynomial.Builder terms = Polynomial.builder(decisionOfLiteral.size());
+    double[] magnitude = {0};
+    Expansion.walk(
+        expr,
+        Arithmetic.DOUBLES,
+        (coefficient, product) -> {
+          magnitude[0] += Math.abs(coefficient);
+          if (!Double.isFinite(magnitude[0])) {
+            Check.finite(
+                "the sum of the coefficients of objective '" + objectiveName + "', multiplied out,",
+                magnitude[0]);
+          }
+          terms.add(coefficient, product);
+        });
+    return terms.build();
   }
 
   /** Begins a plan by hand, over the model as it stands now. */

@@ -83,6 +83,9 @@ abstract sealed class Node extends Expr {
 
     /** The factors, left to right, with those of products among them and numbers told apart. */
     List<Expr> factors() {
+      if (left instanceof Literal && right instanceof Literal) {
+        return List.of(left, right);
+      }
       List<Expr> factors = new ArrayList<>();
       Deque<Expr> pending = new ArrayDeque<>(List.of(left, right));
       while (!pending.isEmpty()) {

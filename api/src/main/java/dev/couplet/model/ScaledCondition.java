@@ -4,6 +4,8 @@ import dev.couplet.form.Polynomial;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.math.MathContext;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Locale;
 
 /**
@@ -18,32 +20,49 @@ import java.util.Locale;
 record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecimal unit) {
   private static final BigDecimal LIMIT = BigDecimal.valueOf(1L << 51);
 
+  /** The terms of the condition as they come, in exact decimals. */
+  private static final class Terms {
+    final List<BigDecimal> coefficients = new ArrayList<>();
+    final List<int[]> products = new ArrayList<>();
+
+    static Terms of(Condition condition) {
+      Terms terms = new Terms();
+      Expansion.walk(
+          condition.expr(),
+          Arithmetic.DECIMALS,
+          (coefficient, product) -> {
+            terms.coefficients.add(coefficient);
+            terms.products.add(product);
+          });
+      return terms;
+    }
+  }
+
   static ScaledCondition of(String rule, Condition condition, int literals) {
-    Expansion<BigDecimal> expansion = Expansion.of(condition.expr(), Arithmetic.DECIMALS);
-    int places = places(expansion, condition);
+    Terms given = Terms.of(condition);
+    int places = places(given.coefficients, condition);
     BigDecimal constant = BigDecimal.ZERO;
     BigDecimal magnitude = BigDecimal.ZERO;
     Polynomial.Builder terms = Polynomial.builder(literals);
-    for (int t = 0; t < expansion.products.size(); t++) {
-      BigDecimal scaled = scaled(rule, expansion.coefficients.get(t), places);
-      if (expansion.products.get(t).length == 0) {
+    for (int t = 0; t < given.products.size(); t++) {
+      BigDecimal scaled = scaled(rule, given.coefficients.get(t), places);
+      if (given.products.get(t).length == 0) {
         constant = constant.add(scaled);
       } else {
         magnitude = magnitude.add(scaled.abs());
-        terms.add(scaled.doubleValue(), expansion.products.get(t));
+        terms.add(scaled.doubleValue(), given.products.get(t));
       }
     }
     double lowest = limit(rule, condition.lowest(), constant, places);
     double highest = limit(rule, condition.highest(), constant, places);
     requireExact(rule, magnitude);
-    return new ScaledCondition(
-            terms.build(), lowest, highest, BigDecimal.ONE.scaleByPowerOfTen(-places))
-        .reduced();
+    BigDecimal unit = BigDecimal.ONE.scaleByPowerOfTen(-places);
+    return new ScaledCondition(terms.build(), lowest, highest, unit).reduced();
   }
 
-  private static int places(Expansion<BigDecimal> expansion, Condition condition) {
+  private static int places(List<BigDecimal> coefficients, Condition condition) {
     int places = 0;
-    for (BigDecimal coefficient : expansion.coefficients) {
+    for (BigDecimal coefficient : coefficients) {
       places = Math.max(places, coefficient.stripTrailingZeros().scale());
     }
     for (double limit : new double[] {condition.lowest(), condition.highest()}) {

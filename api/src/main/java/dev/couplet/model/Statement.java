@@ -50,9 +50,16 @@ public final class Statement {
     this.rules = rules.stream().map(rule -> rule.inLiterals(literals)).toList();
     this.objectives = objectives.stream().map(part -> part.inLiterals(literals)).toList();
     this.sense = sense;
-    Polynomial.Builder sum = Polynomial.builder(decisionOf.length);
+    this.objective = sum(this.objectives, literals);
+  }
+
+  private static Polynomial sum(List<Objective> objectives, int literals) {
+    if (objectives.size() == 1) {
+      return objectives.get(0).terms();
+    }
+    Polynomial.Builder sum = Polynomial.builder(literals);
     objectives.forEach(part -> sum.add(part.terms(), 1));
-    this.objective = sum.build();
+    return sum.build();
   }
 
   static Decision[] decisionOf(List<Decision> decisions) {

@@ -26,6 +26,9 @@ final class Text {
 
   /** The decimal with the fewest digits that the double stands for. */
   static BigDecimal decimal(double value) {
+    if (value == Math.rint(value) && Math.abs(value) < 0x1p53) {
+      return BigDecimal.valueOf((long) value);
+    }
     BigDecimal exact = new BigDecimal(value);
     for (int digits = 1; digits < 17; digits++) {
       BigDecimal rounded = exact.round(new MathContext(digits));
