@@ -7,15 +7,17 @@ import java.util.SplittableRandom;
  * Finds the host vertex from which the cheapest paths to a number of trees cost least together, its
  * own price counted once; among equals, one at random.
  *
- * <p>One spread from each tree adds up the costs. No vertex further from a tree than the best total
- * can be the best, so spreads stop at a limit: first the total found when the same guest vertex was
- * laid the last time, then more if that was not enough. The answer does not depend on the limit.
+ * <p>One spread from each tree adds up the costs, within a limit: somewhat more than the total
+ * found when the same guest vertex was laid the last time, then more if that was not enough. A
+ * vertex whose costs exceed the limit is out, and a spread ends when it has reached all that are
+ * still in; so each is more local than the one before. The answer does not depend on the limit.
  */
 final class RootFinder {
   /** Told instead of a host vertex: there is none, or the run is over. */
   static final int NONE = -1;
 
   private static final long FIRST_LIMIT = 256;
+  private static final int OUT = -1;
 
   private final Trees trees;
   private final Prices prices;
@@ -24,7 +26,7 @@ final class RootFinder {
   private final SplittableRandom random;
   private final long[] lastTotal;
 
-  /** Of a host vertex: how many spreads have reached it, and what they cost together. */
+  /** Of a host vertex: how many spreads have reached it or OUT, and what they cost together. */
   private final int[] reached;
 
   private final long[] sum;
@@ -53,68 +55,71 @@ final class RootFinder {
 
   /** The best root for guest vertex {@code v} towards the first {@code count} of some trees. */
   int find(int v, int[] towards, int count) {
-    long limit = lastTotal[v];
+    long limit = lastTotal[v] + lastTotal[v] / 8;
     while (true) {
       int root = findWithin(limit, towards, count);
-      if (root != NONE && bestTotal <= limit) {
+      if (root != NONE) {
         lastTotal[v] = bestTotal;
         return root;
       }
-      boolean nowhere = root == NONE && !cutOff;
-      if (nowhere || pace.over(0)) {
+      if (!cutOff || pace.over(0)) {
         return NONE;
       }
-      limit = root != NONE ? bestTotal : 2 * limit;
+      limit *= 2;
     }
   }
 
   private int findWithin(long limit, int[] towards, int count) {
     candidateCount = 0;
     cutOff = false;
-    int alive = 0;
-    for (int t = 0; t < count; t++) {
-      alive = reach(towards[t], t, limit);
-      if (alive == 0) {
-        break;
-      }
+    int alive = Integer.MAX_VALUE;
+    for (int t = 0; t < count && alive > 0; t++) {
+      alive = reach(towards[t], t, alive, limit);
     }
-    int root = alive == 0 ? NONE : best(count);
+    int root = alive > 0 ? best(count) : NONE;
     for (int c = 0; c < candidateCount; c++) {
       reached[candidates[c]] = 0;
     }
     return root;
   }
 
-  /** Spreads from tree number t; tells how many vertices all spreads so far have reached. */
-  private int reach(int tree, int t, long limit) {
+  /** Spreads from tree number t to all vertices in so far; tells how many are in after it. */
+  private int reach(int tree, int t, int before, long limit) {
     spread.begin();
     for (int node = trees.first[tree]; node != Trees.NONE; node = trees.next[node]) {
       spread.source(trees.host[node]);
     }
+    int toReach = before;
     int alive = 0;
-    int h = spread.settle(prices.cost, limit);
-    for (; h >= 0; h = spread.settle(prices.cost, limit)) {
+    while (toReach > 0) {
+      int h = spread.settle(prices.cost, limit);
+      if (h < 0) {
+        break;
+      }
       if (reached[h] == t) {
-        alive++;
-        add(h, t);
+        toReach--;
+        alive += add(h, t, limit) ? 1 : 0;
       }
       if (pace.over(spread.degree(h) + 1)) {
         return 0;
       }
     }
-    cutOff |= spread.more();
+    cutOff |= spread.more() && toReach > 0;
     return alive;
   }
 
-  /** The vertex's own price is left out, as the root pays it only once. */
-  private void add(int h, int t) {
+  /** Adds a cost and tells whether the vertex is still in; its own price is paid only once. */
+  private boolean add(int h, int t, long limit) {
     if (t == 0) {
       candidates[candidateCount++] = h;
       sum[h] = 0;
     }
-    reached[h]++;
     int distance = spread.distance[h];
     sum[h] += distance == 0 ? 0 : distance - prices.cost[h];
+    boolean in = sum[h] + prices.cost[h] <= limit;
+    reached[h] = in ? t + 1 : OUT;
+    cutOff |= !in;
+    return in;
   }
 
   private int best(int count) {
