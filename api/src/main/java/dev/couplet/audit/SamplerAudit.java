@@ -23,9 +23,9 @@ import java.util.Optional;
  *       it), {@code seed}, {@code end}, {@code returns}
  *   <li>randomness: {@code repeat} (same seed, same draws), {@code threads} (however many), {@code
  *       apart} (draws do not share random numbers), {@code shared instance} (many callers at once)
- *   <li>the course of a run: {@code target}, {@code starts}, {@code stop}, {@code interrupt},
- *       {@code deadline} (on a clock of the audit's own), {@code listener}, {@code listener
- *       throws}, {@code threads end}
+ *   <li>the course of a run: {@code target}, {@code starts}, {@code structure} (refused if it does
+ *       not fit), {@code stop}, {@code interrupt}, {@code deadline} (on a clock of the audit's
+ *       own), {@code listener}, {@code listener throws}, {@code threads end}
  * </ul>
  *
  * <p>A method with a limit may refuse forms of more than 12 variables, by an

@@ -4,10 +4,11 @@ import dev.couplet.form.State;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.StopSignal;
+import dev.couplet.sampling.Structure;
 import dev.couplet.sampling.Watch;
 import java.util.List;
 
-/** Starts are honoured, and refused if they do not fit. */
+/** Starts are honoured; starts and structures that do not fit are refused. */
 final class StartChecks {
   private StartChecks() {}
 
@@ -15,36 +16,40 @@ final class StartChecks {
     for (Specimen specimen : trials.specimens()) {
       int size = specimen.size();
       State fits = State.zeros(size);
-      expectRefusal(trials, specimen, List.of(State.zeros(size + 1)));
-      expectRefusal(trials, specimen, List.of(fits, State.zeros(size + 1)));
+      State longer = State.zeros(size + 1);
+      expectRefusal(trials, specimen, run(List.of(longer)), "a start of " + (size + 1));
+      expectRefusal(trials, specimen, run(List.of(fits, longer)), "a start of " + (size + 1));
+      Run structured = run(List.of()).structure(Structure.exactlyOne(List.of(List.of(size))));
+      expectRefusal(trials, specimen, structured, "a structure with bit " + size + " of");
       trials.draws(specimen, Trials.SHORT).ifPresent(draws -> from(trials, specimen, draws));
     }
   }
 
-  private static void expectRefusal(Trials trials, Specimen specimen, List<State> starts) {
-    Outcome outcome = trials.call(specimen, () -> Run.of(Trials.SHORT).starts(starts));
-    String has = String.valueOf(specimen.size());
-    String given = String.valueOf(specimen.size() + 1);
+  private static Run run(List<State> starts) {
+    return Run.of(Trials.SHORT).starts(starts);
+  }
+
+  private static void expectRefusal(Trials trials, Specimen specimen, Run run, String misfit) {
+    Outcome outcome = trials.call(specimen, () -> run);
     boolean refused =
         outcome
             .thrown()
             .filter(IllegalArgumentException.class::isInstance)
-            .map(Throwable::getMessage)
-            .filter(message -> message.contains(has) && message.contains(given))
+            .filter(refusal -> Trials.names(refusal, specimen.size()))
             .isPresent();
     trials
         .notes()
         .expect(
-            "starts",
+            run.starts().isEmpty() ? "structure" : "starts",
             refused,
             () ->
                 specimen
-                    + ": a start of "
-                    + given
-                    + " variables has to be refused with an"
-                    + " IllegalArgumentException that names both sizes, got "
+                    + ": "
+                    + misfit
+                    + " variables has to be refused with an IllegalArgumentException that names"
+                    + " the size of the form, got "
                     + outcome
-                    + "; call run.requireStartsOf(form.size()) first");
+                    + "; call run.requireFit(form.size()) first");
   }
 
   private static void from(Trials trials, Specimen specimen, Draws known) {

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Supplier;
+import java.util.regex.Pattern;
 
 /**
  * Runs of one sampler on the forms it takes; what has to hold of every run is checked on each.
@@ -67,11 +68,16 @@ final class Trials {
   }
 
   private void expectReason(Specimen specimen, Throwable refusal) {
-    String message = String.valueOf(refusal.getMessage());
     notes.expect(
         "forms",
-        message.contains(String.valueOf(specimen.size())),
-        () -> specimen + " is refused with '" + message + "'; say which size is too large");
+        names(refusal, specimen.size()),
+        () -> specimen + " is refused with " + refusal + "; say which size is too large");
+  }
+
+  /** Whether a message holds a number, not as part of a longer one. */
+  static boolean names(Throwable refusal, int number) {
+    String message = String.valueOf(refusal.getMessage());
+    return Pattern.compile("(?<!\\d)" + number + "(?!\\d)").matcher(message).find();
   }
 
   /** A run that has to return draws, all of it checked; empty if it did not. */

@@ -2,6 +2,7 @@ package dev.couplet.sampling;
 
 import dev.couplet.form.State;
 import java.util.List;
+import java.util.Objects;
 
 /**
  * One call of a sampler, apart from the form: how much work, how watched, from where, and what is
@@ -16,6 +17,9 @@ import java.util.List;
 public record Run(Effort effort, Watch watch, List<State> starts, Structure structure) {
   /** Copies the list of starts. */
   public Run {
+    Objects.requireNonNull(effort, "effort");
+    Objects.requireNonNull(watch, "watch");
+    Objects.requireNonNull(structure, "structure");
     starts = List.copyOf(starts);
   }
 
@@ -50,11 +54,12 @@ public record Run(Effort effort, Watch watch, List<State> starts, Structure stru
   }
 
   /**
-   * Insists that every start fits a form.
+   * Insists that starts and structure fit a form of so many variables; every sampler does so first.
    *
-   * @throws IllegalArgumentException naming the first start of another size
+   * @throws IllegalArgumentException naming the first start of another size, or the first bit of
+   *     the structure that the form does not have
    */
-  public void requireStartsOf(int size) {
+  public void requireFit(int size) {
     for (int k = 0; k < starts.size(); k++) {
       if (starts.get(k).size() != size) {
         throw new IllegalArgumentException(
@@ -67,5 +72,6 @@ public record Run(Effort effort, Watch watch, List<State> starts, Structure stru
                 + "; pass states of the form that is sampled");
       }
     }
+    structure.requireWithin(size);
   }
 }

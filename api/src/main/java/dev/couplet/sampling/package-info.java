@@ -19,8 +19,9 @@
  *       asked for before the start counts; then the result is no worse than the first start given.
  *       An interrupt of the calling thread is a stop, and its flag stays set.
  *   <li>A target ends the run at the lowest-numbered draw that reaches it; later draws are dropped.
- *   <li>Starts of another size are refused. A listener hears of every run at least once, and what
- *       it throws reaches the caller as it is.
+ *   <li>Starts of another size are refused, as is a structure of bits that the form does not have.
+ *       A listener hears of every run at least once, and what it throws reaches the caller as it
+ *       is.
  *   <li>Samplers are immutable and can be shared between threads; the threads of a run end with it.
  * </ul>
  *

@@ -40,7 +40,7 @@ class HonestSampler implements Sampler {
   }
 
   void check(Qubo form, Run run) {
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
   }
 
   boolean over(Vigil vigil) {

@@ -23,7 +23,7 @@ final class ProvingSampler implements Sampler {
       throw new IllegalArgumentException(
           "the form has " + form.size() + " variables, at most " + LIMIT + " can be enumerated");
     }
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     Vigil vigil = run.begin();
     State best = run.starts().isEmpty() ? State.zeros(form.size()) : run.starts().get(0);
     double target = run.effort().target().orElse(Double.NEGATIVE_INFINITY);

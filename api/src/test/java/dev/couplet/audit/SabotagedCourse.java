@@ -7,6 +7,7 @@ import dev.couplet.sampling.End;
 import dev.couplet.sampling.Progress;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
+import dev.couplet.sampling.Structure;
 import dev.couplet.sampling.Vigil;
 import dev.couplet.sampling.Watch;
 import java.time.Duration;
@@ -198,9 +199,13 @@ final class SabotagedCourse {
     return deaf(run -> run.starts().isEmpty() ? run : run.starts(run.starts().subList(0, 1)));
   }
 
+  static Sampler takesAnyStructure() {
+    return deaf(run -> run.structure(Structure.none()));
+  }
+
   static Sampler ignoresStarts() {
     return (form, run) -> {
-      run.requireStartsOf(form.size());
+      run.requireFit(form.size());
       return HONEST.sample(form, run.starts(List.of()));
     };
   }

@@ -34,13 +34,17 @@ class SamplerAuditTest {
         breaks("stop", "always says done", Sabotaged.alwaysSaysDone()),
         breaks("end", "never says done", Sabotaged.neverSaysDone()),
         breaks("returns", "null", Sabotaged.returnsNull()),
-        breaks("forms", "refuses silently", Sabotaged.refusesMoreThan(20, "no")),
-        breaks("returns", "refuses early", Sabotaged.refusesMoreThan(8, "10 is too large")),
-        breaks("returns", "no variables", Sabotaged.failsWithoutVariables()),
         breaks("repeat", "goes on from the last run", Sabotaged.goesOnFromTheLastRun()),
         breaks("threads", "one stream a thread", Sabotaged.oneStreamAThread()),
         breaks("apart", "one stream for all", Sabotaged.oneStreamForAllDraws()),
         breaks("shared instance", "seed in a field", Sabotaged.keepsTheSeedInAField()));
+  }
+
+  static Stream<Arguments> spoiledLimits() {
+    return Stream.of(
+        breaks("forms", "refuses silently", Sabotaged.refusesMoreThan(20, "no")),
+        breaks("returns", "refuses early", Sabotaged.refusesMoreThan(8, "10 is too large")),
+        breaks("returns", "no variables", Sabotaged.failsWithoutVariables()));
   }
 
   static Stream<Arguments> spoiledCourses() {
@@ -56,6 +60,7 @@ class SamplerAuditTest {
         breaks("interrupt", "throws", SabotagedCourse.throwsWhenInterrupted()),
         breaks("starts", "takes any", SabotagedCourse.takesAnyStart()),
         breaks("starts", "checks the first", SabotagedCourse.checksTheFirstStartOnly()),
+        breaks("structure", "takes any", SabotagedCourse.takesAnyStructure()),
         breaks("starts", "ignored", SabotagedCourse.ignoresStarts()),
         breaks("target", "ignored", SabotagedCourse.ignoresTheTarget()),
         breaks("target", "goes on", SabotagedCourse.goesOnAfterTheTarget()),
@@ -63,13 +68,31 @@ class SamplerAuditTest {
         breaks("target", "ends at the round", SabotagedCourse.endsAtTheRoundOfTheTarget()));
   }
 
-  @ParameterizedTest(name = "{0}: {1}")
-  @MethodSource({"spoiledResults", "spoiledCourses"})
-  void everySabotageIsCaughtByItsCheck(String check, String how, Sampler sampler) {
-    Findings findings = SamplerAudit.contract(sampler).run();
+  private static void assertCaught(String check, SamplerAudit audit) {
+    Findings findings = audit.run();
     assertTrue(findings.all().stream().anyMatch(f -> f.check().equals(check)), findings::toString);
     AssertionError error = assertThrows(AssertionError.class, findings::orThrow);
     assertTrue(error.getMessage().contains("\n  [" + check + "] "), error::getMessage);
+  }
+
+  @ParameterizedTest(name = "{0}: {1}")
+  @MethodSource("spoiledLimits")
+  void aBadLimitIsCaught(String check, String how, Sampler sampler) {
+    assertCaught(check, SamplerAudit.contract(sampler));
+  }
+
+  /** Three of the audit's own forms are enough to catch these, in a fifth of the time. */
+  @ParameterizedTest(name = "{0}: {1}")
+  @MethodSource({"spoiledResults", "spoiledCourses"})
+  void everySabotageIsCaughtByItsCheck(String check, String how, Sampler sampler) {
+    List<String> names = List.of("all zero", "frustrated triangle", "dense integers");
+    List<Qubo> few =
+        Gallery.all().stream()
+            .filter(specimen -> names.contains(specimen.name()))
+            .map(Specimen::form)
+            .toList();
+    assertEquals(names.size(), few.size());
+    assertCaught(check, SamplerAudit.contract(sampler).forms(few));
   }
 
   /** These work on to the end of what they were asked for, so they get one small form only. */
@@ -85,9 +108,8 @@ class SamplerAuditTest {
   @MethodSource("runaways")
   void aRunawayIsCaught(String check, String how, Sampler sampler) {
     Qubo form = Qubo.builder(3).addPair(0, 1, -1).addPair(1, 2, 1).addLinear(1, -1).build();
-    Findings findings =
-        SamplerAudit.contract(sampler).forms(List.of(form)).patience(Duration.ofSeconds(2)).run();
-    assertTrue(findings.all().stream().anyMatch(f -> f.check().equals(check)), findings::toString);
+    Duration patience = Duration.ofSeconds(2);
+    assertCaught(check, SamplerAudit.contract(sampler).forms(List.of(form)).patience(patience));
   }
 
   static Stream<Arguments> honest() {
@@ -119,6 +141,7 @@ class SamplerAuditTest {
             "shared instance",
             "target",
             "starts",
+            "structure",
             "stop",
             "interrupt",
             "deadline",

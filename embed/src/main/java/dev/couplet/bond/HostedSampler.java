@@ -70,8 +70,7 @@ public final class HostedSampler implements Sampler {
    * @throws IllegalArgumentException if the embedding does not carry the form
    */
   public HostedDraws observe(Qubo form, Run run) {
-    run.requireStartsOf(form.size());
-    run.structure().requireWithin(form.size());
+    run.requireFit(form.size());
     Ising guest = form.toIsing();
     HostedForm hosted = HostedForm.of(embedding, guest, bonds);
     Reading reading = new Reading(form, guest, hosted);

@@ -92,8 +92,7 @@ public final class Annealing implements Sampler {
   @Override
   public Draws sample(Qubo form, Run run) {
     Vigil vigil = run.begin();
-    run.requireStartsOf(form.size());
-    run.structure().requireWithin(form.size());
+    run.requireFit(form.size());
     if (vigil.over()) {
       return DrawLoop.unbegun(form, run, vigil);
     }

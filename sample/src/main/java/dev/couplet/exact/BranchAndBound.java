@@ -53,7 +53,7 @@ public final class BranchAndBound implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     Vigil vigil = run.begin();
     SplittableRandom random = new SplittableRandom(run.effort().seed());
     State best = WarmStart.of(form, run.starts(), random, vigil);

@@ -83,7 +83,7 @@ public final class Elimination implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     Vigil vigil = run.begin();
     ConditionedSweeps sweeps = prepared(form, false);
     sweeps.run(run.effort().threads(), false, vigil);

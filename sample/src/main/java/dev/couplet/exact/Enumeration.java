@@ -61,7 +61,7 @@ public final class Enumeration implements Sampler {
   @Override
   public Draws sample(Qubo form, Run run) {
     requireSmall(form);
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     Vigil vigil = run.begin();
     Levels levels = search(form, 1, run.effort(), vigil);
     List<State> states = new ArrayList<>(levels.lowest());

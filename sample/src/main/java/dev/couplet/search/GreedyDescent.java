@@ -39,7 +39,7 @@ public final class GreedyDescent implements Sampler {
   @Override
   public Draws sample(Qubo form, Run run) {
     Vigil vigil = run.begin();
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     if (vigil.over()) {
       return DrawLoop.unbegun(form, run, vigil);
     }

@@ -59,7 +59,7 @@ public final class Tabu implements Sampler {
   @Override
   public Draws sample(Qubo form, Run run) {
     Vigil vigil = run.begin();
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     if (vigil.over()) {
       return DrawLoop.unbegun(form, run, vigil);
     }

@@ -14,7 +14,7 @@ final class FormSolver {
   private FormSolver() {}
 
   static Draws sample(Qubo form, Run run) {
-    run.requireStartsOf(form.size());
+    run.requireFit(form.size());
     if (enumerable(form, run)) {
       return Enumeration.standard().sample(form, run);
     }
