@@ -15,9 +15,12 @@ import java.util.OptionalDouble;
  * problem: a review, 2007). For forms without cycles it reaches the minimum, in general at most the
  * roof dual (Hammer, Hansen and Simeone 1984).
  *
- * <p>Time O(n + m) a round, memory O(n + m). Rounds end early when one gains nothing.
+ * <p>Time O(n + m) a round, memory O(n + m). Rounds end early when four in a row gain nothing.
  */
 public final class SplitBound implements Bound {
+  /** Shares still move while the bound stands still: a round or two without gain prove nothing. */
+  private static final int PATIENCE = 4;
+
   private final int rounds;
 
   private SplitBound(int rounds) {
@@ -49,12 +52,14 @@ public final class SplitBound implements Bound {
     Shares shares = new Shares(scaled);
     long best = shares.bound();
     int most = run.effort().sweeps().orElse(rounds);
+    int idle = 0;
     for (int round = 0; round < most; round++) {
       if (!shares.improve(round % 2 == 0, vigil)) {
         break;
       }
       long bound = shares.bound();
-      if (bound <= best) {
+      idle = bound <= best ? idle + 1 : 0;
+      if (idle == PATIENCE) {
         break;
       }
       best = bound;

@@ -7,7 +7,9 @@ import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
+import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Structure;
+import dev.couplet.search.Relinking;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -16,6 +18,9 @@ import java.util.OptionalDouble;
  * win.
  */
 final class DrawStage {
+  private static final int DENSE_DEGREE = 20;
+  private static final int LARGE = 100;
+
   private DrawStage() {}
 
   static Draws run(
@@ -28,9 +33,19 @@ final class DrawStage {
     Effort effort = course.left();
     double stopAt = Math.max(bound, target.orElse(Double.NEGATIVE_INFINITY));
     Run run = new Run(effort.target(stopAt), course.watch(), starts, structure);
-    Draws draws = Annealing.standard().sample(form, run);
+    Draws draws = method(form, run).sample(form, run);
     course.finished("draws", draws.total() + " draws, " + draws.rows().size() + " different");
     return draws;
+  }
+
+  /** Path relinking on large dense forms with time to spend; annealing knows structure. */
+  private static Sampler method(Qubo form, Run run) {
+    boolean dense = form.pairs() >= DENSE_DEGREE / 2L * form.size();
+    boolean plain = run.structure().exactlyOne().isEmpty();
+    boolean timed = run.effort().limit().isPresent() && run.effort().draws().isEmpty();
+    return dense && plain && timed && form.size() >= LARGE
+        ? Relinking.standard()
+        : Annealing.standard();
   }
 
   /** Why the run ended as the caller sees it: reaching the bound is not a target of theirs. */

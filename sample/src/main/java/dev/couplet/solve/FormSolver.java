@@ -3,11 +3,16 @@ package dev.couplet.solve;
 import dev.couplet.exact.Enumeration;
 import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Draws;
+import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
 import java.time.Duration;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** Solves a form without a model: enumeration where that is cheap, else a bound and draws. */
+/**
+ * Solves a form without a model: enumeration where that is cheap, else a try at a proof, a bound,
+ * and draws.
+ */
 final class FormSolver {
   private static final int FEW_BITS = 24;
 
@@ -19,11 +24,35 @@ final class FormSolver {
       return Enumeration.standard().sample(form, run);
     }
     Course course = new Course(run.effort(), run.watch());
-    double bound = BoundStage.byForm(form, course);
+    Optional<Draws> proof = ProofStage.run(form, run.starts(), course);
+    if (proof.isPresent() && (proof.get().proved() || course.vigil().over())) {
+      return proof.get().end(endOf(proof.get(), course));
+    }
+    return drawn(form, run, proof, course);
+  }
+
+  /** A proof that came in time is all the work there is; else what ended the run counts. */
+  private static End endOf(Draws proof, Course course) {
+    OptionalDouble target = course.effort().target();
+    if (target.isPresent() && proof.best().energy() <= target.getAsDouble()) {
+      return End.TARGET;
+    }
+    return proof.proved() ? End.DONE : course.vigil().reason();
+  }
+
+  private static Draws drawn(Qubo form, Run run, Optional<Draws> proof, Course course) {
+    double ofProof =
+        proof
+            .map(Draws::bound)
+            .filter(OptionalDouble::isPresent)
+            .map(OptionalDouble::getAsDouble)
+            .orElse(Double.NEGATIVE_INFINITY);
+    double bound = Math.max(ofProof, BoundStage.byForm(form, course));
     OptionalDouble target = run.effort().target();
     Draws draws = DrawStage.run(form, run.starts(), run.structure(), bound, target, course);
-    Draws ended = draws.end(DrawStage.end(draws, target));
-    return ended.bound(Math.min(bound, draws.best().energy()));
+    End end = DrawStage.end(draws, target);
+    Draws best = proof.filter(known -> known.best().energy() < draws.best().energy()).orElse(draws);
+    return best.end(end).bound(Math.min(bound, best.best().energy()));
   }
 
   /** A state takes about a nanosecond; half the time may go into a proof. */

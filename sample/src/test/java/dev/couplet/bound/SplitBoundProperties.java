@@ -9,6 +9,7 @@ import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Run;
 import java.util.SplittableRandom;
+import net.jqwik.api.Example;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.IntRange;
@@ -34,7 +35,17 @@ class SplitBoundProperties {
    * On a form without cycles the linear relaxation is tight (from memory; Wainwright et al. 2005).
    */
   @Property(tries = 500)
-  void tightWithoutCycles(@ForAll @IntRange(min = 0, max = 12) int size, @ForAll long seed) {
+  void tightOnRandomTrees(@ForAll @IntRange(min = 0, max = 12) int size, @ForAll long seed) {
+    tightWithoutCycles(size, seed);
+  }
+
+  /** A tree on which the bound stands still for a round before it rises to the minimum. */
+  @Example
+  void tightAfterARoundWithoutGain() {
+    tightWithoutCycles(5, 3041711984275448930L);
+  }
+
+  private static void tightWithoutCycles(int size, long seed) {
     SplittableRandom random = new SplittableRandom(seed);
     Qubo.Builder tree = Qubo.builder(size);
     for (int i = 0; i < size; i++) {

@@ -3,8 +3,13 @@ package dev.couplet.bench.cli;
 import dev.couplet.anneal.Annealing;
 import dev.couplet.anneal.Cooling;
 import dev.couplet.anneal.Finish;
+import dev.couplet.exact.BranchAndBound;
+import dev.couplet.exact.Elimination;
 import dev.couplet.exact.Enumeration;
 import dev.couplet.sampling.Sampler;
+import dev.couplet.search.GreedyDescent;
+import dev.couplet.search.Relinking;
+import dev.couplet.search.Tabu;
 import dev.couplet.solve.Solver;
 import java.util.Iterator;
 import java.util.LinkedHashMap;
@@ -22,7 +27,12 @@ final class Methods {
   static {
     SAMPLERS.put("solver", Solver.standard());
     SAMPLERS.put("annealing", Annealing.standard());
+    SAMPLERS.put("tabu", Tabu.standard());
+    SAMPLERS.put("relink", Relinking.standard());
+    SAMPLERS.put("descent", GreedyDescent.standard());
     SAMPLERS.put("enumeration", Enumeration.standard());
+    SAMPLERS.put("elimination", Elimination.standard());
+    SAMPLERS.put("branch", BranchAndBound.standard());
 
     THERMAL.put("annealing", Methods::annealing);
   }
