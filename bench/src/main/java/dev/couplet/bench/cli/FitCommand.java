@@ -17,6 +17,7 @@ import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.function.Function;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
@@ -93,25 +94,15 @@ final class FitCommand implements Callable<Integer> {
       description = "One of ${COMPLETION-CANDIDATES} (default: ${DEFAULT-VALUE}).")
   private String method = Embedders.STANDARD;
 
-  @Option(
-      names = "--seed",
-      paramLabel = "N",
-      description = "The seed of all random numbers (default: ${DEFAULT-VALUE}).")
-  private long seed = 1;
-
-  @Option(
-      names = "--seconds",
-      paramLabel = "S",
-      description = "The time the method may take (default: ${DEFAULT-VALUE}).")
-  private double seconds = 10;
+  @Mixin private TimedOptions timed = new TimedOptions();
 
   @Override
   public Integer call() throws IOException {
     Embedder embedder = Embedders.named(method);
-    Effort effort = Effort.within(Options.seconds(seconds)).seed(seed);
-    Guest guest = GraphReader.guest(guestText, seed);
+    Effort effort = timed.effort();
+    Guest guest = GraphReader.guest(guestText, timed.seed());
     Host whole = GraphReader.host(hostText);
-    Host host = whole.without(Faults.seeded(whole, faults, 0, seed));
+    Host host = whole.without(Faults.seeded(whole, faults, 0, timed.seed()));
     PrintWriter err = spec.commandLine().getErr();
     long began = System.nanoTime();
     Fit fit = fit(embedder, guest, host, effort, err);
@@ -136,7 +127,7 @@ final class FitCommand implements Callable<Integer> {
         guest.name(),
         faults == 0 ? host.name() : host.name() + " faults:" + Table.value(faults),
         method,
-        Long.toString(seed),
+        Long.toString(timed.seed()),
         answer(fit),
         cell(found, embedding -> Integer.toString(embedding.total())),
         cell(found, embedding -> Integer.toString(embedding.longest())),

@@ -49,17 +49,7 @@ final class SolveCommand implements Callable<Integer> {
 
   @Mixin private Inputs inputs = new Inputs();
 
-  @Option(
-      names = "--seconds",
-      paramLabel = "S",
-      description = "The time the method may take (default: ${DEFAULT-VALUE}).")
-  private double seconds = 10;
-
-  @Option(
-      names = "--seed",
-      paramLabel = "N",
-      description = "The seed of all random numbers (default: ${DEFAULT-VALUE}).")
-  private long seed = 1;
+  @Mixin private TimedOptions timed = new TimedOptions();
 
   @Option(
       names = "--threads",
@@ -83,7 +73,7 @@ final class SolveCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     Methods.Method chosen = Methods.named(method);
-    Effort effort = Effort.within(Options.seconds(seconds)).seed(seed).threads(threads);
+    Effort effort = timed.effort().threads(threads);
     Instance instance = inputs.read();
     if (target != null) {
       effort = effort.target(instance.energy(target));
@@ -105,7 +95,7 @@ final class SolveCommand implements Callable<Integer> {
     if (attempt.bound().isPresent()) {
       return attempt;
     }
-    Effort share = Effort.within(Options.seconds(seconds / 10));
+    Effort share = timed.share(0.1);
     return attempt.bound(SplitBound.standard().below(attempt.instance().form(), Run.of(share)));
   }
 }
