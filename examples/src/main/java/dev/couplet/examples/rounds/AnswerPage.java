@@ -5,7 +5,7 @@ import dev.couplet.solve.Proof;
 import java.util.stream.Collectors;
 
 /**
- * The last page of the report: what the plan is worth, how good any plan can be, what is proved.
+ * The sixth page of the report: what the plan is worth, how good any plan can be, what is proved.
  */
 final class AnswerPage {
   private final RoundsModel rounds;

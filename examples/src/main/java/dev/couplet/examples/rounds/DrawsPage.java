@@ -7,7 +7,7 @@ import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.End;
 import java.util.List;
 
-/** A page of the report: states drawn from the form, and the plans they stand for. */
+/** The fourth page of the report: states drawn from the form, and the plans they stand for. */
 final class DrawsPage {
   private DrawsPage() {}
 
@@ -27,7 +27,8 @@ final class DrawsPage {
     return Sheet.headed("4. Draws from the form, by annealing").table(table).toString();
   }
 
-  private static long feasible(Lowered lowered, Draws draws) {
+  /** How many of the draws stand for a plan that keeps all required rules. */
+  static long feasible(Lowered lowered, Draws draws) {
     return draws.rows().stream()
         .filter(draw -> lowered.plan(draw.state()).feasible())
         .mapToLong(draw -> draw.multiplicity())

@@ -15,7 +15,7 @@ import picocli.CommandLine.Option;
     description =
         "Decides which van of a mobile library serves which village, so that the villages of a van"
             + " lie close together. Prints the model, its lowering to a quadratic form, an audit of"
-            + " the lowering, the plan, and how good it is.",
+            + " the lowering, the plan, how good it is, and a small copy of it on a sparse host.",
     footer = {
       "",
       "The folder of --data holds five files in UTF-8; the first line of each names its columns:",
@@ -60,7 +60,10 @@ final class Options {
   @Option(
       names = "--svg",
       paramLabel = "FILE",
-      description = "Draws the plan as a map into this file.")
+      description = {
+        "Draws the plan as a map into this file, and the embedding of the small copy into one beside"
+            + " it whose name ends in -host."
+      })
   private @Nullable Path svg;
 
   @Option(
@@ -87,6 +90,7 @@ final class Options {
       throw new BadInput("--threads " + threads + ": give a number from 1 to 1024");
     }
     svg().ifPresent(Options::requireWritable);
+    hostSvg().ifPresent(Options::requireWritable);
     return this;
   }
 
@@ -119,5 +123,17 @@ final class Options {
 
   Optional<Path> svg() {
     return Optional.ofNullable(svg);
+  }
+
+  /** The file beside it for the embedding: map-host.svg beside map.svg. */
+  Optional<Path> hostSvg() {
+    return svg()
+        .flatMap(file -> Optional.ofNullable(file.getFileName()))
+        .flatMap(name -> svg().map(file -> file.resolveSibling(hostName(name.toString()))));
+  }
+
+  private static String hostName(String name) {
+    int dot = name.lastIndexOf('.');
+    return dot <= 0 ? name + "-host" : name.substring(0, dot) + "-host" + name.substring(dot);
   }
 }

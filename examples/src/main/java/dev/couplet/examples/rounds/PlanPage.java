@@ -5,7 +5,7 @@ import dev.couplet.model.Unmet;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
-/** A page of the report: which van serves which villages, loads, and what is not kept. */
+/** The fifth page of the report: which van serves which villages, loads, and what is not kept. */
 final class PlanPage {
   private static final int BAR = 12;
 

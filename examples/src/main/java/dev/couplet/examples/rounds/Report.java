@@ -3,8 +3,8 @@ package dev.couplet.examples.rounds;
 import dev.couplet.anneal.Annealing;
 import dev.couplet.audit.LoweringAudit;
 import dev.couplet.audit.LoweringReport;
+import dev.couplet.embed.Picture;
 import dev.couplet.lower.Lowered;
-import dev.couplet.lower.Lowering;
 import dev.couplet.model.Plan;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
@@ -17,11 +17,11 @@ import java.io.PrintStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.function.Function;
 
 /** Goes the way from data to answer, and prints a page after each step. */
 final class Report {
   private static final int DRAWS = 100;
-  private static final double SHARE_OF_DRAWS = 0.5;
 
   private final Options options;
   private final PrintStream out;
@@ -44,13 +44,19 @@ final class Report {
     page(title(data));
     page(ModelPage.of(rounds));
     page(LoweringPage.of(rounds, lowered));
-    LoweringReport audit = audit(RoundsModel.of(SmallCopy.of(data)));
+    RoundsModel copy = RoundsModel.of(SmallCopy.of(data));
+    Lowered loweredCopy = lower(copy);
+    LoweringReport audit = LoweringAudit.exhaustive(loweredCopy);
+    page(AuditPage.of(copy, loweredCopy, audit));
     Draws draws = draw(lowered);
     page(DrawsPage.of(lowered, draws));
     Answer answer = solve(rounds, lowered.read(draws).best());
     page(PlanPage.of(rounds, answer.plan()));
-    out.print(AnswerPage.of(rounds, answer));
-    options.svg().ifPresent(file -> draw(file, rounds, answer));
+    page(AnswerPage.of(rounds, answer));
+    HostRun hosted = host(loweredCopy);
+    out.print(HostPage.of(hosted));
+    options.svg().ifPresent(file -> drawMap(file, rounds, answer));
+    options.hostSvg().ifPresent(file -> drawHost(file, hosted));
     return answer.plan().feasible() && audit.passed() ? 0 : 1;
   }
 
@@ -84,61 +90,72 @@ final class Report {
   /** Coordinates and crates may each be in range and still be too much together. */
   private static Lowered lower(RoundsModel rounds) {
     try {
-      return Lowering.standard().lower(rounds.model());
+      return RoundsWeights.lowering(rounds).lower(rounds.model());
     } catch (IllegalArgumentException tooLarge) {
       throw new BadInput("the numbers are too large together: " + tooLarge.getMessage());
     }
   }
 
-  private LoweringReport audit(RoundsModel copy) {
-    Lowered lowered = lower(copy);
-    LoweringReport report = LoweringAudit.exhaustive(lowered);
-    page(AuditPage.of(copy, lowered, report));
-    return report;
-  }
-
   private Draws draw(Lowered lowered) {
-    Duration limit = options.time(SHARE_OF_DRAWS);
-    Effort effort =
-        Effort.draws(DRAWS).limit(limit).seed(options.seed()).threads(options.threads());
-    ProgressBar bar = new ProgressBar(err, "drawing", limit);
-    Run run = Run.of(effort).watch(watch(bar)).structure(lowered.structure());
-    try {
-      return Annealing.standard().sample(lowered.qubo(), run);
-    } finally {
-      bar.clear();
-    }
+    Run run = Run.of(draws()).structure(lowered.structure());
+    return watched(
+        "drawing", watch -> Annealing.standard().sample(lowered.qubo(), run.watch(watch)));
   }
 
   private Answer solve(RoundsModel rounds, Plan start) {
-    Duration limit = options.time(1 - SHARE_OF_DRAWS);
-    Effort effort = Effort.within(limit).seed(options.seed()).threads(options.threads());
-    ProgressBar bar = new ProgressBar(err, "solving", limit);
+    Effort effort = Effort.within(half()).seed(options.seed()).threads(options.threads());
+    return watched("solving", watch -> solver(rounds, start).solve(rounds.model(), effort, watch));
+  }
+
+  private HostRun host(Lowered copy) {
+    return watched("hosting", watch -> HostRun.of(copy, draws(), watch));
+  }
+
+  private Effort draws() {
+    return Effort.draws(DRAWS).limit(half()).seed(options.seed()).threads(options.threads());
+  }
+
+  private Duration half() {
+    return options.time(0.5);
+  }
+
+  /** A plan that leaves no village open is worth beginning from. */
+  private static Solver solver(RoundsModel rounds, Plan start) {
+    Solver solver = Solver.standard().with(RoundsWeights.lowering(rounds));
+    return start.feasible() ? solver.from(start) : solver;
+  }
+
+  /** Shows the progress of a step on a terminal, and wipes it away afterwards. */
+  private <T> T watched(String doing, Function<Watch, T> step) {
+    if (!onTerminal) {
+      return step.apply(Watch.none());
+    }
+    ProgressBar bar = new ProgressBar(err, doing, half());
     try {
-      return solver(start).solve(rounds.model(), effort, watch(bar));
+      return step.apply(Watch.none().progress(bar::show));
     } finally {
       bar.clear();
     }
   }
 
-  /** A plan that leaves no village open is worth beginning from. */
-  private static Solver solver(Plan start) {
-    return start.feasible() ? Solver.standard().from(start) : Solver.standard();
+  private void drawMap(Path file, RoundsModel rounds, Answer answer) {
+    String summary = AnswerPage.summary(answer);
+    write(file, RoundsMap.svg(rounds.data(), rounds.rounds(answer.plan()), summary));
+    out.println();
+    out.println("The map is drawn in " + file);
   }
 
-  private Watch watch(ProgressBar bar) {
-    return onTerminal ? Watch.none().progress(bar::show) : Watch.none();
+  private void drawHost(Path file, HostRun hosted) {
+    Picture picture = hosted.fit().embedding().map(Picture::of).orElse(Picture.of(hosted.host()));
+    write(file, picture.title("The small copy on a sparse host").toSvg());
+    out.println("The host is drawn in " + file);
   }
 
-  private void draw(Path file, RoundsModel rounds, Answer answer) {
-    String svg =
-        RoundsMap.svg(rounds.data(), rounds.rounds(answer.plan()), AnswerPage.summary(answer));
+  private static void write(Path file, String text) {
     try {
-      Files.writeString(file, svg);
+      Files.writeString(file, text);
     } catch (IOException e) {
       throw new BadInput("--svg " + file + ": the file cannot be written");
     }
-    out.println();
-    out.println("The map is drawn in " + file);
   }
 }

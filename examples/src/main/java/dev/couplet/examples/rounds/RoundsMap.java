@@ -76,14 +76,28 @@ final class RoundsMap {
         svg.append(mark(k).svg(x(village), y(village))).append('\n');
       }
     }
+    for (Village village : unserved()) {
+      ring(x(village), y(village));
+    }
+  }
+
+  /** The villages that the plan leaves open. */
+  private List<Village> unserved() {
+    return data.villages().stream()
+        .filter(village -> rounds.stream().noneMatch(round -> round.villages().contains(village)))
+        .toList();
+  }
+
+  private void ring(double x, double y) {
+    add("<circle cx=\"%.1f\" cy=\"%.1f\" r=\"6\" fill=\"white\" stroke=\"#444444\"/>\n", x, y);
   }
 
   private void names() {
     MapLabels labels = new MapLabels(FRAME.grown(-4));
     labels.addMark(FRAME.right() - 24, FRAME.top() + 20);
+    data.villages().forEach(village -> labels.addMark(x(village), y(village)));
     for (Round round : rounds) {
       for (Village village : round.villages()) {
-        labels.addMark(x(village), y(village));
         for (Village other : round.villages()) {
           labels.addLine(x(village), y(village), x(other), y(other));
         }
@@ -127,6 +141,11 @@ final class RoundsMap {
       text(LEGEND_LEFT + 30, y, " font-weight=\"bold\"", round.van().toString());
       String load = round.crates() + " of " + round.van().capacity() + " crates";
       text(LEGEND_LEFT + 30, y + 19, "", load + ", " + round.metres() + " m");
+    }
+    if (!unserved().isEmpty()) {
+      y += LEGEND_STEP;
+      ring(LEGEND_LEFT + 10, y);
+      text(LEGEND_LEFT + 30, y + 5, "", "no van");
     }
     text(LEGEND_LEFT, y + LEGEND_STEP, " fill=\"#444444\"", "Numbers by names: crates");
   }

@@ -4,9 +4,11 @@
  * <p>The scenario and its data are invented. Read in the order of the work: {@code Village}, {@code
  * Van}, {@code Wish} and {@code Pair} are the business; {@code RoundsReader} reads them from a
  * folder of CSV files and {@code RoundsCheck} refuses what cannot work; {@code RoundsModel} states
- * the problem; {@link dev.couplet.examples.rounds.Rounds} lowers, audits and solves it. Each page
- * of the report is one class ({@code ModelPage}, {@code LoweringPage}, {@code AuditPage}, {@code
- * PlanPage}, {@code AnswerPage}), and {@code RoundsMap} draws the plan.
+ * the problem, {@code RoundsWeights} says how heavy its rules weigh; {@link
+ * dev.couplet.examples.rounds.Rounds} lowers, audits and solves it. Each page of the report is one
+ * class ({@code ModelPage}, {@code LoweringPage}, {@code AuditPage}, {@code DrawsPage}, {@code
+ * PlanPage}, {@code AnswerPage}), and {@code RoundsMap} draws the plan. A second part, {@code
+ * HostRun} with {@code HostPage}, carries a small copy of the problem onto a sparse host and back.
  */
 @NullMarked
 package dev.couplet.examples.rounds;

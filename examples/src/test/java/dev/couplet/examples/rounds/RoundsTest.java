@@ -27,7 +27,8 @@ class RoundsTest {
   @Test
   void theReportHasAPageForEachStepAndFitsTheScreen() {
     String out = Outcome.of().out();
-    List<String> headings = List.of("The model", "lowering", "audit", "Draws", "plan", "How good");
+    List<String> headings =
+        List.of("The model", "lowering", "audit", "Draws", "plan", "How good", "sparse host");
     int from = 0;
     for (int page = 1; page <= headings.size(); page++) {
       int at = out.indexOf("\n" + page + ". ", from);
