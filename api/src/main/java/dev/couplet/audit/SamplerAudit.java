@@ -31,8 +31,9 @@ import java.util.Optional;
  * <p>A method with a limit may refuse forms of more than 12 variables, by an
  * IllegalArgumentException that names the size; {@code forms} checks that. A method whose draws do
  * not depend on the seed passes as it is. A method that proves its answer (a {@linkplain
- * dev.couplet.sampling.Draws#bound() bound} equal to the best energy) may return fewer draws than
- * asked for, and may be done before it sees a stop or a deadline that comes while it works.
+ * dev.couplet.sampling.Draws#bound() bound} equal to the best energy, or below it by no more than
+ * the rounding of real coefficients) may return fewer draws than asked for, or every optimum, and
+ * may be done before it sees a stop or a deadline that comes while it works.
  *
  * <p>Cost: a few hundred short runs, some of them on up to three threads. Immutable.
  */

@@ -102,7 +102,7 @@ final class StopChecks {
     }
     notes.expect(
         "interrupt",
-        outcome.interrupted() || (midway && Trials.doneByProof(draws)),
+        outcome.interrupted() || (midway && Trials.doneByProof(specimen, draws)),
         () ->
             specimen
                 + " with "
@@ -130,7 +130,7 @@ final class StopChecks {
         .notes()
         .expect(
             check,
-            draws.end() == end || Trials.doneByProof(draws),
+            draws.end() == end || Trials.doneByProof(specimen, draws),
             () ->
                 specimen
                     + " with "

@@ -6,9 +6,9 @@ import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
-import java.util.HashMap;
-import java.util.Map;
-import java.util.Optional;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
 
 /** A target ends the run at the lowest-numbered draw that reaches it; later draws are dropped. */
 final class TargetChecks {
@@ -23,72 +23,69 @@ final class TargetChecks {
   private static void against(Trials trials, Specimen specimen, Draws full) {
     Run never = Run.of(Trials.SHORT.target(Double.NEGATIVE_INFINITY));
     SeedChecks.expectSame(trials, "target", "and a target out of reach", specimen, full, never);
-    double best = full.best().energy();
-    at(trials, specimen, best)
-        .ifPresent(draws -> expectEarlierDraws(trials.notes(), specimen, best, full, draws));
-    double worst = full.rows().get(full.rows().size() - 1).energy();
-    at(trials, specimen, worst)
-        .ifPresent(draws -> expectFirstOnly(trials.notes(), specimen, worst, draws));
+    List<Draw> rows = full.rows();
+    at(trials, specimen, rows.get(0).energy(), full);
+    at(trials, specimen, rows.get(rows.size() / 2).energy(), full);
+    at(trials, specimen, rows.get(rows.size() - 1).energy(), full);
   }
 
-  private static Optional<Draws> at(Trials trials, Specimen specimen, double target) {
+  private static void at(Trials trials, Specimen specimen, double target, Draws full) {
     Effort effort = Trials.SHORT.target(target);
-    Optional<Draws> alone = trials.draws(specimen, effort);
-    alone.ifPresent(
-        draws -> {
-          expectOneHit(trials.notes(), specimen, target, draws);
-          for (int threads = 2; threads <= 3; threads++) {
-            Run run = Run.of(effort.threads(threads));
-            String how = "and target on " + threads + " threads";
-            SeedChecks.expectSame(trials, "target", how, specimen, draws, run);
-          }
-        });
-    return alone;
+    trials
+        .draws(specimen, effort)
+        .ifPresent(
+            draws -> {
+              expectFirstHit(trials.notes(), specimen, target, full, draws);
+              for (int threads = 2; threads <= 3; threads++) {
+                Run run = Run.of(effort.threads(threads));
+                String how = "and target on " + threads + " threads";
+                SeedChecks.expectSame(trials, "target", how, specimen, draws, run);
+              }
+            });
   }
 
-  private static void expectOneHit(Notes notes, Specimen specimen, double target, Draws draws) {
+  private static void expectFirstHit(
+      Notes notes, Specimen specimen, double target, Draws full, Draws draws) {
     notes.expect(
         "target",
         draws.end() == End.TARGET && draws.best().energy() <= target,
         () -> specimen + ": target " + target + " can be reached, got " + draws);
-    int hits =
-        draws.rows().stream()
-            .filter(row -> row.energy() <= target)
-            .mapToInt(Draw::multiplicity)
-            .sum();
+    int first = firstAt(full, target);
     notes.expect(
         "target",
-        hits <= 1,
+        draws.total() == first + 1,
         () ->
             specimen
-                + ": "
-                + hits
-                + " draws reach target "
+                + ": draw "
+                + first
+                + " is the first that reaches target "
                 + target
-                + "; keep the lowest-numbered of them and drop all later draws");
-  }
-
-  private static void expectEarlierDraws(
-      Notes notes, Specimen specimen, double target, Draws full, Draws draws) {
-    Map<State, Integer> known = new HashMap<>();
-    full.forEach(row -> known.put(row.state(), row.multiplicity()));
-    for (Draw row : draws) {
+                + ", so the run ends there and drops all later draws; got "
+                + draws);
+    List<State> known = full.inOrder();
+    List<State> got = draws.inOrder();
+    for (int k = 0; k < Math.min(first, got.size()); k++) {
+      int draw = k;
       notes.expect(
           "target",
-          row.energy() <= target || row.multiplicity() <= known.getOrDefault(row.state(), 0),
-          () -> specimen + ": " + row + " before target " + target + " is not so without a target");
+          got.get(k).equals(known.get(k)),
+          () ->
+              specimen + ": draw " + draw + " before target " + target + " is not so without one");
     }
   }
 
-  private static void expectFirstOnly(Notes notes, Specimen specimen, double target, Draws draws) {
-    notes.expect(
-        "target",
-        draws.total() == 1,
-        () ->
-            specimen
-                + ": every draw reaches target "
-                + target
-                + ", so the run ends at the first; got "
-                + draws);
+  /** The number of the first draw at the target or below, by the energies that the result names. */
+  private static int firstAt(Draws draws, double target) {
+    Set<State> hits = new HashSet<>();
+    for (Draw row : draws) {
+      if (row.energy() <= target) {
+        hits.add(row.state());
+      }
+    }
+    int draw = 0;
+    while (!hits.contains(draws.inOrder().get(draw))) {
+      draw++;
+    }
+    return draw;
   }
 }

@@ -131,7 +131,7 @@ final class Trials {
   }
 
   /** Whether a run may be done before it could see a reason to end: it proved its answer. */
-  static boolean doneByProof(Draws draws) {
-    return draws.end() == End.DONE && draws.proved();
+  static boolean doneByProof(Specimen specimen, Draws draws) {
+    return draws.end() == End.DONE && Results.proved(specimen, draws);
   }
 }

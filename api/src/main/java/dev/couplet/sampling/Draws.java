@@ -2,7 +2,9 @@ package dev.couplet.sampling;
 
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import java.util.AbstractList;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.Comparator;
 import java.util.Iterator;
@@ -10,22 +12,27 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.RandomAccess;
 
 /**
  * What a sampler returns: the states its draws ended in, lowest energy first, equal states merged.
  *
- * <p>Rows of equal energy stand in the order of their first draw. At least one row. Immutable.
+ * <p>Rows of equal energy stand in the order of their first draw. At least one row. Two results are
+ * equal if they say the same of every draw. Immutable.
  */
 public final class Draws implements Iterable<Draw> {
   private final List<Draw> rows;
-  private final int total;
+
+  /** Draw k ended in the state of row {@code rowOf[k]}. */
+  private final int[] rowOf;
+
   private final End end;
   private final long seed;
   private final OptionalDouble bound;
 
-  private Draws(List<Draw> rows, int total, End end, long seed, OptionalDouble bound) {
+  private Draws(List<Draw> rows, int[] rowOf, End end, long seed, OptionalDouble bound) {
     this.rows = rows;
-    this.total = total;
+    this.rowOf = rowOf;
     this.end = end;
     this.seed = seed;
     this.bound = bound;
@@ -44,15 +51,38 @@ public final class Draws implements Iterable<Draw> {
     if (states.isEmpty()) {
       throw new IllegalArgumentException("there is no draw; a run returns at least one state");
     }
-    Map<State, Integer> counts = new LinkedHashMap<>();
+    Map<State, Integer> places = new LinkedHashMap<>();
+    int[] placeOf = new int[states.size()];
+    int[] counts = new int[states.size()];
+    int next = 0;
     for (State state : states) {
-      counts.merge(state, 1, Integer::sum);
+      int place = places.computeIfAbsent(state, unseen -> places.size());
+      counts[place]++;
+      placeOf[next++] = place;
     }
-    List<Draw> rows = new ArrayList<>(counts.size());
-    counts.forEach((state, count) -> rows.add(new Draw(state, form.value(state), count)));
-    rows.sort(Comparator.comparingDouble(Draw::energy));
-    return new Draws(
-        Collections.unmodifiableList(rows), states.size(), end, seed, OptionalDouble.empty());
+    List<Draw> unsorted = new ArrayList<>(places.size());
+    places.forEach(
+        (state, place) -> unsorted.add(new Draw(state, form.value(state), counts[place])));
+    return sorted(unsorted, placeOf, end, seed);
+  }
+
+  private static Draws sorted(List<Draw> unsorted, int[] placeOf, End end, long seed) {
+    List<Integer> order = new ArrayList<>(unsorted.size());
+    for (int place = 0; place < unsorted.size(); place++) {
+      order.add(place);
+    }
+    order.sort(Comparator.comparingDouble(place -> unsorted.get(place).energy()));
+    List<Draw> rows = new ArrayList<>(order.size());
+    int[] rowOfPlace = new int[order.size()];
+    for (int place : order) {
+      rowOfPlace[place] = rows.size();
+      rows.add(unsorted.get(place));
+    }
+    int[] rowOf = new int[placeOf.length];
+    for (int k = 0; k < rowOf.length; k++) {
+      rowOf[k] = rowOfPlace[placeOf[k]];
+    }
+    return new Draws(Collections.unmodifiableList(rows), rowOf, end, seed, OptionalDouble.empty());
   }
 
   /**
@@ -66,12 +96,12 @@ public final class Draws implements Iterable<Draw> {
       throw new IllegalArgumentException(
           "the bound " + lowerBound + " lies above the energy " + best().energy() + " of a draw");
     }
-    return new Draws(rows, total, end, seed, OptionalDouble.of(lowerBound));
+    return new Draws(rows, rowOf, end, seed, OptionalDouble.of(lowerBound));
   }
 
   /** These draws with another reason why the run ended. */
   public Draws end(End newEnd) {
-    return new Draws(rows, total, newEnd, seed, bound);
+    return new Draws(rows, rowOf, newEnd, seed, bound);
   }
 
   /** The row of lowest energy. */
@@ -86,7 +116,12 @@ public final class Draws implements Iterable<Draw> {
 
   /** The number of draws: the sum of the multiplicities. */
   public int total() {
-    return total;
+    return rowOf.length;
+  }
+
+  /** Where draws 0, 1, 2, ... ended, unmerged. */
+  public List<State> inOrder() {
+    return new Sequence(rows, rowOf);
   }
 
   /** Why the run ended. */
@@ -118,6 +153,7 @@ public final class Draws implements Iterable<Draw> {
   public boolean equals(Object object) {
     return object instanceof Draws other
         && rows.equals(other.rows)
+        && Arrays.equals(rowOf, other.rowOf)
         && end == other.end
         && seed == other.seed
         && bound.equals(other.bound);
@@ -131,7 +167,7 @@ public final class Draws implements Iterable<Draw> {
   @Override
   public String toString() {
     return "Draws("
-        + total
+        + total()
         + " draws, "
         + rows.size()
         + " states, best "
@@ -139,5 +175,26 @@ public final class Draws implements Iterable<Draw> {
         + ", end "
         + end
         + ")";
+  }
+
+  /** A view of the states by the number of the draw. */
+  private static final class Sequence extends AbstractList<State> implements RandomAccess {
+    private final List<Draw> rows;
+    private final int[] rowOf;
+
+    Sequence(List<Draw> rows, int[] rowOf) {
+      this.rows = rows;
+      this.rowOf = rowOf;
+    }
+
+    @Override
+    public State get(int draw) {
+      return rows.get(rowOf[draw]).state();
+    }
+
+    @Override
+    public int size() {
+      return rowOf.length;
+    }
   }
 }

@@ -13,8 +13,8 @@
  *   <li>The same seed gives the same draws on every platform and thread count as long as the effort
  *       is counted; energies are those of the form that was passed in; draws are independent of
  *       each other.
- *   <li>A run that ends {@link dev.couplet.sampling.End#DONE} has made every draw asked for, unless
- *       it proved its best to be the lowest.
+ *   <li>A run that ends {@link dev.couplet.sampling.End#DONE} has made the draws asked for, no
+ *       fewer and no more, unless it proved its best to be the lowest.
  *   <li>A run that is stopped or out of time returns what it has, valid, at least one draw. A stop
  *       asked for before the start counts; then the result is no worse than the first start given.
  *       An interrupt of the calling thread is a stop, and its flag stays set.

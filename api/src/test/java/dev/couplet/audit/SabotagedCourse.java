@@ -237,6 +237,10 @@ final class SabotagedCourse {
         });
   }
 
+  static Sampler dropsDrawsBeforeTheTarget() {
+    return hitting(states -> states.subList(states.size() - 1, states.size()));
+  }
+
   static Sampler makesUpDrawsBeforeTheTarget() {
     return hitting(
         states -> {

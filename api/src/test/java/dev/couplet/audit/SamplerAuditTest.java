@@ -64,6 +64,7 @@ class SamplerAuditTest {
         breaks("starts", "ignored", SabotagedCourse.ignoresStarts()),
         breaks("target", "ignored", SabotagedCourse.ignoresTheTarget()),
         breaks("target", "goes on", SabotagedCourse.goesOnAfterTheTarget()),
+        breaks("target", "drops draws before", SabotagedCourse.dropsDrawsBeforeTheTarget()),
         breaks("target", "makes up draws before", SabotagedCourse.makesUpDrawsBeforeTheTarget()),
         breaks("target", "ends at the round", SabotagedCourse.endsAtTheRoundOfTheTarget()));
   }

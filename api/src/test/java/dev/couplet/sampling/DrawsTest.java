@@ -48,6 +48,16 @@ class DrawsTest {
   }
 
   @Test
+  void whereEachDrawEndedIsNotForgotten() {
+    String[] states = {"10", "00", "11", "00", "01", "10", "11"};
+    Draws draws = draws(states);
+    assertEquals(Stream.of(states).map(State::parse).toList(), draws.inOrder());
+    assertEquals(draws.inOrder(), draws.bound(-9).end(End.TARGET).inOrder());
+    assertThrows(UnsupportedOperationException.class, () -> draws.inOrder().clear());
+    assertThrows(IndexOutOfBoundsException.class, () -> draws.inOrder().get(7));
+  }
+
+  @Test
   void laterChangesOfTheStatesDoNotMatter() {
     List<State> states = new ArrayList<>(List.of(State.parse("00")));
     Draws draws = Draws.of(FORM, states, End.DONE, 7);
@@ -97,8 +107,8 @@ class DrawsTest {
   void resultsAreComparedByAllThatTheySay() {
     Draws draws = draws("00", "11");
     assertEquals(draws, draws("00", "11"));
-    assertEquals(draws, draws("11", "00"));
-    assertEquals(draws.hashCode(), draws("11", "00").hashCode());
+    assertEquals(draws.hashCode(), draws("00", "11").hashCode());
+    assertNotEquals(draws, draws("11", "00"));
     assertNotEquals(draws, draws("00", "11", "11"));
     assertNotEquals(draws, draws.bound(-5));
     assertNotEquals(draws, draws.end(End.TARGET));

@@ -4,33 +4,27 @@ import dev.couplet.embed.Embedding;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
-import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
-import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
-import dev.couplet.sampling.Structure;
-import dev.couplet.sampling.Vigil;
-import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.SplittableRandom;
+import java.util.OptionalDouble;
 
 /**
  * A sampler that works on a host: puts the form onto the host of an embedding, lets another method
  * sample there, and reads the draws back. Energies are those of the form that was passed in.
  *
  * <p>Starts become host states with every set whole. What is known of the form's structure does not
- * hold on the host and is not passed on. With a target, host draws are made one at a time, so that
- * the run ends at the first that reaches it once read back. Immutable and thread-safe if the method
- * is.
+ * hold on the host and is not passed on. The method draws in batches of {@value Batches#SIZE}, each
+ * with a seed that follows from the run's, so that a run with a target ends soon after the first
+ * draw that reaches it once read back; draws after that one are dropped. Immutable and thread-safe
+ * if the method is.
  *
  * <p>Time: that of the method on the host's form, and O(m) a draw to read back.
  */
 public final class HostedSampler implements Sampler {
-  private static final Duration SHORTEST = Duration.ofNanos(1);
-
   private final Embedding embedding;
   private final Sampler method;
   private final BondStrength bonds;
@@ -73,54 +67,20 @@ public final class HostedSampler implements Sampler {
     run.requireFit(form.size());
     Ising guest = form.toIsing();
     HostedForm hosted = HostedForm.of(embedding, guest, bonds);
-    Reading reading = new Reading(form, guest, hosted);
-    Run onHost =
-        new Run(
-            run.effort().withoutTarget(),
-            run.watch(),
-            run.starts().stream().map(hosted::whole).toList(),
-            Structure.none());
-    End end =
-        run.effort().target().isPresent()
-            ? oneByOne(reading, onHost, run.effort())
-            : reading.take(method.sample(reading.hostForm, onHost));
-    return reading.result(end, run.effort().seed());
-  }
-
-  /** Draws until one reaches the target once read back; each from the next number of the seed. */
-  private End oneByOne(Reading reading, Run onHost, Effort effort) {
-    Vigil vigil = onHost.begin();
-    double target = effort.target().orElseThrow();
-    long most = effort.draws().orElse(Integer.MAX_VALUE);
-    SplittableRandom seeds = new SplittableRandom(effort.seed());
-    List<State> starts = onHost.starts();
-    for (int k = 0; k < most; k++) {
-      if (k > 0 && vigil.over()) {
-        return vigil.reason();
-      }
-      Run one =
-          onHost
-              .effort(left(onHost.effort(), vigil).seed(seeds.nextLong()))
-              .starts(starts.isEmpty() ? starts : List.of(starts.get(k % starts.size())));
-      End end = reading.take(method.sample(reading.hostForm, one));
-      if (reading.lowest <= target) {
-        return End.TARGET;
-      }
-      if (end != End.DONE) {
-        return end;
+    Reading reading = new Reading(form, guest, hosted, run.effort().target());
+    List<State> starts = run.starts().stream().map(hosted::whole).toList();
+    Batches batches = new Batches(run, starts);
+    End end = End.DONE;
+    while (end == End.DONE && batches.hasNext()) {
+      Run batch = batches.next(reading.lowest);
+      Draws draws = method.sample(reading.hostForm, batch);
+      end = reading.take(draws);
+      boolean whole = draws.total() == batch.effort().draws().orElse(-1);
+      if (end == End.DONE && !whole) {
+        break; // The method proved its answer, and would prove it again.
       }
     }
-    return End.DONE;
-  }
-
-  private static Effort left(Effort effort, Vigil vigil) {
-    Effort one = Effort.draws(1).threads(effort.threads());
-    Effort paced = effort.sweeps().isPresent() ? one.sweeps(effort.sweeps().getAsInt()) : one;
-    return effort
-        .limit()
-        .map(limit -> limit.minus(vigil.elapsed()))
-        .map(rest -> paced.limit(rest.isNegative() || rest.isZero() ? SHORTEST : rest))
-        .orElse(paced);
+    return reading.result(end, run.effort().seed());
   }
 
   /** Host draws on their way back; mutable, used once. */
@@ -131,25 +91,30 @@ public final class HostedSampler implements Sampler {
     private final Qubo hostForm;
     private final List<State> states = new ArrayList<>();
     private final long[] torn;
+    private final double target;
     private double lowest = Double.POSITIVE_INFINITY;
 
-    Reading(Qubo form, Ising guest, HostedForm hosted) {
+    Reading(Qubo form, Ising guest, HostedForm hosted, OptionalDouble target) {
       this.form = form;
       this.guest = guest;
       this.hosted = hosted;
+      this.target = target.orElse(Double.NEGATIVE_INFINITY);
       this.hostForm = hosted.ising().toQubo();
       this.torn = new long[form.size()];
     }
 
+    /** Reads host draws back, up to the first that reaches the target. */
     End take(Draws draws) {
-      for (Draw draw : draws) {
-        State state = readback.read(draw.state(), hosted, guest);
-        lowest = Math.min(lowest, form.value(state));
-        for (int k = 0; k < draw.multiplicity(); k++) {
-          states.add(state);
-        }
+      for (State onHost : draws.inOrder()) {
+        State state = readback.read(onHost, hosted, guest);
+        states.add(state);
         for (int g = 0; g < torn.length; g++) {
-          torn[g] += hosted.torn(draw.state(), g) ? draw.multiplicity() : 0;
+          torn[g] += hosted.torn(onHost, g) ? 1 : 0;
+        }
+        double energy = form.value(state);
+        lowest = Math.min(lowest, energy);
+        if (energy <= target) {
+          return End.TARGET;
         }
       }
       return draws.end();

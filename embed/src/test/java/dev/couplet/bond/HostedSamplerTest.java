@@ -15,6 +15,7 @@ import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
+import dev.couplet.sampling.Progress;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.StopSignal;
@@ -22,7 +23,9 @@ import dev.couplet.sampling.Vigil;
 import dev.couplet.sampling.Watch;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.SplittableRandom;
+import java.util.concurrent.atomic.AtomicLong;
 import org.junit.jupiter.api.Test;
 
 class HostedSamplerTest {
@@ -123,6 +126,46 @@ class HostedSamplerTest {
       assertEquals(draws.total() - 1, above, "only the last draw is at the target");
       assertEquals(draws, sampler.sample(frustrated(), Effort.draws(1000).seed(seed).target(-1)));
     }
+  }
+
+  /** The rarest state of 300 random ones comes late: the cut may fall into any batch. */
+  @Test
+  void aTargetCutsTheDrawsThatAreMadeWithoutOne() {
+    Qubo form =
+        Qubo.builder(3).addLinear(0, 4).addLinear(1, 2).addLinear(2, 1).addPair(0, 1, 1).build();
+    HostedSampler sampler = HostedSampler.on(triangle(), RANDOM);
+    for (int seed = 0; seed < 20; seed++) {
+      Effort effort = Effort.draws(300).seed(seed);
+      List<State> all = sampler.sample(form, effort).inOrder();
+      assertEquals(300, all.size());
+      for (Draw row : sampler.sample(form, effort)) {
+        Draws cut = sampler.sample(form, effort.target(row.energy()));
+        int first = 0;
+        while (form.value(all.get(first)) > row.energy()) {
+          first++;
+        }
+        assertEquals(all.subList(0, first + 1), cut.inOrder());
+      }
+    }
+  }
+
+  @Test
+  void progressGoesForwardOverAllBatches() {
+    List<Progress> heard = new ArrayList<>();
+    AtomicLong clock = new AtomicLong();
+    Watch watch = Watch.none().progress(heard::add).clock(() -> clock.addAndGet(60_000_000));
+    HostedSampler sampler = HostedSampler.on(triangle(), HostedSamplerTest::reportingStates);
+    Draws draws = sampler.sample(frustrated(), Run.of(Effort.draws(200)).watch(watch));
+    assertEquals(200, draws.total());
+    List<Double> shares = heard.stream().map(p -> p.share().orElseThrow()).toList();
+    assertEquals(List.of(64 / 200.0, 128 / 200.0, 192 / 200.0, 1.0), shares);
+    assertEquals(OptionalDouble.empty(), heard.get(0).best());
+    assertEquals(OptionalDouble.of(-1), heard.get(3).best());
+  }
+
+  private static Draws reportingStates(Qubo form, Run run) {
+    run.begin().report(OptionalDouble.of(1), OptionalDouble.of(-99), OptionalDouble.empty());
+    return randomStates(form, run);
   }
 
   @Test

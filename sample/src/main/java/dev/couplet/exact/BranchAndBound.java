@@ -75,4 +75,9 @@ public final class BranchAndBound implements Sampler {
     Draws draws = Draws.of(form, List.of(best), vigil.reason(), run.effort().seed());
     return bound == Double.NEGATIVE_INFINITY ? draws : draws.bound(bound);
   }
+
+  @Override
+  public String toString() {
+    return nodes == Long.MAX_VALUE ? "BranchAndBound()" : "BranchAndBound(" + nodes + " nodes)";
+  }
 }

@@ -91,11 +91,11 @@ public final class Elimination implements Sampler {
     if (states.isEmpty()) {
       states = List.of(State.zeros(form.size()));
     }
-    OptionalDouble target = run.effort().target();
-    if (target.isPresent() && sweeps.lowest() <= target.getAsDouble()) {
+    Draws reached = Draws.of(form, states, End.TARGET, run.effort().seed());
+    if (reached.best().energy() <= run.effort().target().orElse(Double.NEGATIVE_INFINITY)) {
       vigil.end(End.TARGET);
     }
-    Draws draws = Draws.of(form, states, vigil.reason(), run.effort().seed());
+    Draws draws = reached.end(vigil.reason());
     return sweeps.complete() ? draws.bound(bound(form, sweeps, draws)) : draws;
   }
 
@@ -158,5 +158,10 @@ public final class Elimination implements Sampler {
               Runtime.getRuntime().maxMemory() >> 20));
     }
     return sweeps;
+  }
+
+  @Override
+  public String toString() {
+    return "Elimination(width " + width + ", conditioned " + conditioned + ")";
   }
 }

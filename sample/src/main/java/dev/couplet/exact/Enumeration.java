@@ -147,4 +147,9 @@ public final class Enumeration implements Sampler {
               + " states");
     }
   }
+
+  @Override
+  public String toString() {
+    return "Enumeration(keep " + keep + ")";
+  }
 }

@@ -26,7 +26,10 @@ final class FormSolver {
     Course course = new Course(run.effort(), run.watch());
     Optional<Draws> proof = ProofStage.run(form, run.starts(), course);
     if (proof.isPresent() && (proof.get().proved() || course.vigil().over())) {
-      return proof.get().end(endOf(proof.get(), course));
+      Draws known = proof.get();
+      OptionalDouble best = OptionalDouble.of(known.best().energy());
+      course.vigil().report(OptionalDouble.of(1), best, known.bound());
+      return known.end(endOf(known, course));
     }
     return drawn(form, run, proof, course);
   }

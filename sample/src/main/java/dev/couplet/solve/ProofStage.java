@@ -25,7 +25,7 @@ final class ProofStage {
   static Optional<Draws> run(Qubo form, List<State> starts, Course course) {
     Optional<Duration> time = course.left().limit();
     int most = time.isPresent() ? MOST_BITS : FEW_BITS;
-    if (form.size() > most || Double.isInfinite(form.magnitude())) {
+    if (form.size() > most) {
       return Optional.empty();
     }
     Effort effort = time.map(left -> course.left().limit(half(left))).orElse(course.left());
