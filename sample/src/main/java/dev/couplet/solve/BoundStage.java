@@ -22,9 +22,13 @@ final class BoundStage {
 
   static double run(Lowered lowered, Course course) {
     double bound = Math.max(byRange(lowered.statement()), byForm(lowered.qubo(), course));
-    String shown = String.format(Locale.ROOT, "%.12g", lowered.valueOf(bound));
-    course.finished("bound", shown);
+    course.finished("bound", shown(lowered.valueOf(bound)));
     return bound;
+  }
+
+  private static String shown(double value) {
+    boolean whole = value == Math.rint(value) && Math.abs(value) < 0x1p53;
+    return whole ? Long.toString((long) value) : String.format(Locale.ROOT, "%.6g", value);
   }
 
   /** Preferred rules cost nothing at the least. */
