@@ -17,6 +17,7 @@ import java.math.BigDecimal;
 import java.util.List;
 import java.util.Set;
 import java.util.stream.Collectors;
+import net.jqwik.api.Example;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 
@@ -55,6 +56,12 @@ class LoweringAuditProperties {
   @Property(tries = 300)
   void mixed(@ForAll long seed) {
     check(Specs.of(Regime.MIXED, seed));
+  }
+
+  /** Preferred rules with decimal costs, of which no plan ever pays one: nothing can be won. */
+  @Example
+  void anObjectiveOfNothingButRounding() {
+    check(Specs.of(Regime.DECIMAL, -5314));
   }
 
   private static void check(Spec spec) {
