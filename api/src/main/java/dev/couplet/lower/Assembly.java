@@ -131,7 +131,7 @@ final class Assembly {
     }
     double lowest = Terms.lowest(minimised);
     double magnitude = Math.max(Terms.magnitude(minimised), Math.abs(highest));
-    double error = objectiveIsWhole() ? 0 : Math.ulp(magnitude) * 4;
+    double error = objectiveIsWhole() || magnitude == 0 ? 0 : Math.ulp(magnitude) * 4;
     error *= statement.objective().terms() + statement.rules().size() + 1;
     return new Range(lowest - error, highest + error);
   }

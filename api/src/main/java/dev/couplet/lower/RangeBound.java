@@ -44,8 +44,7 @@ final class RangeBound implements Weights {
    * digits.
    */
   static double above(double width, boolean whole) {
-    if (width < Double.MIN_NORMAL) {
-      // Nothing can be won, but for rounding: any weight that energies feel is enough.
+    if (width == 0) {
       return 1;
     }
     if (whole && width < 0x1p51) {

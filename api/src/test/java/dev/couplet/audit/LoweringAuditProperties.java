@@ -60,7 +60,7 @@ class LoweringAuditProperties {
 
   /** Preferred rules with decimal costs, of which no plan ever pays one: nothing can be won. */
   @Example
-  void anObjectiveOfNothingButRounding() {
+  void anObjectiveThatCanWinNothing() {
     check(Specs.of(Regime.DECIMAL, -5314));
   }
 
