@@ -92,9 +92,17 @@ final class Trials {
 
   /** A run of which anything may come; only the threads are checked. */
   Outcome call(Specimen specimen, Supplier<Run> run) {
-    Outcome outcome = callers.call(specimen.form(), run);
+    Outcome outcome = attempt(specimen, run);
     expectNoThreadLeft(() -> "a run on " + specimen);
     return outcome;
+  }
+
+  private Outcome attempt(Specimen specimen, Supplier<Run> run) {
+    try {
+      return callers.call(specimen.form(), run);
+    } catch (Callers.Lost lost) {
+      throw new Callers.Lost(specimen + ": " + lost.getMessage());
+    }
   }
 
   /** Runs at the same time, one a specimen. */
