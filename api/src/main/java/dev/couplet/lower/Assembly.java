@@ -120,13 +120,7 @@ final class Assembly {
     double highest = statement.range(minimised).highest();
     for (Rule rule : statement.rules()) {
       if (!rule.required()) {
-        double most =
-            Math.max(
-                0,
-                Math.max(
-                    rule.range().highest() - rule.highest(),
-                    rule.lowest() - rule.range().lowest()));
-        highest += rule.cost(most);
+        highest += rule.cost(rule.largestViolation());
       }
     }
     double lowest = Terms.lowest(minimised);

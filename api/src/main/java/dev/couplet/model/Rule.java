@@ -120,8 +120,17 @@ public final class Rule {
 
   /** By how much the literals' values miss the limits, in whole-number units; 0 if kept. */
   public double violation(State literals) {
-    double value = terms.value(literals);
+    return violation(terms.value(literals));
+  }
+
+  /** By how much a value of {@link #terms()} misses the limits; 0 if it keeps them. */
+  public double violation(double value) {
     return Math.max(0, Math.max(value - highest, lowest - value));
+  }
+
+  /** The most by which any plan can miss the limits, in whole-number units; 0 if none can. */
+  public double largestViolation() {
+    return Math.max(violation(range.lowest()), violation(range.highest()));
   }
 
   /** A violation in whole-number units, in the condition's own units. */

@@ -83,12 +83,7 @@ final class PlanScore {
           whole[0] &= value == Math.rint(value);
         });
     for (Rule rule : statement.rules()) {
-      double most =
-          Math.max(
-              0,
-              Math.max(
-                  rule.range().highest() - rule.highest(), rule.lowest() - rule.range().lowest()));
-      magnitude[0] += rule.amount(most) * rule.costPerUnit();
+      magnitude[0] += rule.amount(rule.largestViolation()) * rule.costPerUnit();
       double unitCost = rule.costPerUnit() * rule.unit();
       whole[0] &= unitCost == Math.rint(unitCost);
     }
@@ -127,7 +122,7 @@ final class PlanScore {
   private void score(int r, int sign) {
     Rule rule = rules.get(r);
     double value = sum[r + 1];
-    double violation = Math.max(0, Math.max(value - rule.highest(), rule.lowest() - value));
+    double violation = rule.violation(value);
     if (violation == 0) {
       costOf[r] = 0;
     } else if (rule.required()) {
