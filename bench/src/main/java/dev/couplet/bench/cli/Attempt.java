@@ -1,6 +1,5 @@
 package dev.couplet.bench.cli;
 
-import dev.couplet.bench.instances.Instance;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Progress;
@@ -15,7 +14,7 @@ import java.util.function.LongSupplier;
 /**
  * One run of one method on one instance, and how it is told in a row.
  *
- * @param instance what was solved
+ * @param subject what was sampled
  * @param method the method's name
  * @param effort what was asked for; its target is an energy
  * @param draws what was found
@@ -23,27 +22,13 @@ import java.util.function.LongSupplier;
  * @param hitSeconds when the target, or without one the best energy, was first told of
  */
 record Attempt(
-    Instance instance,
+    Subject subject,
     String method,
     Effort effort,
     Draws draws,
     double seconds,
-    OptionalDouble hitSeconds) {
-  /** The columns of a row. */
-  static final List<String> COLUMNS =
-      List.of(
-          "instance",
-          "n",
-          "pairs",
-          "method",
-          "seed",
-          "seconds",
-          "value",
-          "hit_seconds",
-          "bound",
-          "gap",
-          "proof");
-
+    OptionalDouble hitSeconds)
+    implements Outcome {
   /**
    * Runs a method.
    *
@@ -51,7 +36,7 @@ record Attempt(
    * @param clock in nanoseconds
    */
   static Attempt make(
-      Instance instance,
+      Subject subject,
       Methods.Method method,
       Effort effort,
       Consumer<Progress> listener,
@@ -59,62 +44,65 @@ record Attempt(
     Sightings sightings = new Sightings(clock);
     Watch watch =
         Watch.stop(StopSignal.create()).progress(sightings.andThen(listener)).clock(clock);
-    Draws draws = method.sampler().sample(instance.form(), Run.of(effort).watch(watch));
+    Run run = Run.of(effort).watch(watch).structure(subject.structure());
+    Draws draws = method.sampler().sample(subject.form(), run);
     double seconds = sightings.seconds();
-    double best = draws.best().energy();
+    OptionalDouble value = subject.best().apply(draws);
+    double best = value.isPresent() ? subject.turn(value.getAsDouble()) : Double.POSITIVE_INFINITY;
     double wanted = effort.target().orElse(best);
     OptionalDouble hit =
-        best <= wanted
+        value.isPresent() && best <= wanted
             ? OptionalDouble.of(sightings.firstAtMost(wanted).orElse(seconds))
             : OptionalDouble.empty();
-    return new Attempt(instance, method.name(), effort, draws, seconds, hit);
+    return new Attempt(subject, method.name(), effort, draws, seconds, hit);
   }
 
-  /** Whether the target was reached, if there was one. */
-  boolean reached() {
+  @Override
+  public boolean reached() {
     return hitSeconds.isPresent();
   }
 
   /** This attempt with a bound that was proved apart from it; no effect if it is infinite. */
   Attempt bound(double lowerBound) {
     Draws bounded = Double.isInfinite(lowerBound) ? draws : draws.bound(lowerBound);
-    return new Attempt(instance, method, effort, bounded, seconds, hitSeconds);
+    return new Attempt(subject, method, effort, bounded, seconds, hitSeconds);
   }
 
-  /** The best value, in the instance's own sense and units. */
-  double value() {
-    return instance.value(draws.best().energy());
+  @Override
+  public OptionalDouble value() {
+    return subject.best().apply(draws);
   }
 
   /** A proved bound on every value, if there is one that says anything. */
   OptionalDouble bound() {
     OptionalDouble bound = draws.bound();
     return bound.isPresent() && Double.isFinite(bound.getAsDouble())
-        ? OptionalDouble.of(instance.value(bound.getAsDouble()))
+        ? OptionalDouble.of(subject.turn(bound.getAsDouble()))
         : OptionalDouble.empty();
   }
 
-  /** How far value and bound are apart, if there is a bound. */
-  OptionalDouble gap() {
-    OptionalDouble bound = bound();
-    return bound.isPresent()
-        ? OptionalDouble.of(Math.abs(value() - bound.getAsDouble()))
+  /** How far value and bound are apart, if there are both. */
+  private static OptionalDouble gap(OptionalDouble value, OptionalDouble bound) {
+    return value.isPresent() && bound.isPresent()
+        ? OptionalDouble.of(Math.abs(value.getAsDouble() - bound.getAsDouble()))
         : OptionalDouble.empty();
   }
 
-  /** The row under {@link #COLUMNS}. */
-  List<String> cells() {
+  @Override
+  public List<String> cells() {
+    OptionalDouble value = value();
+    OptionalDouble gap = gap(value, bound());
     return List.of(
-        instance.name(),
-        Integer.toString(instance.form().size()),
-        Integer.toString(instance.form().pairs()),
+        subject.name(),
+        Integer.toString(subject.form().size()),
+        Integer.toString(subject.form().pairs()),
         method,
         Long.toString(effort.seed()),
         Table.fixed(seconds, 3),
-        Table.value(value()),
+        Table.value(value),
         Table.fixed(hitSeconds, 3),
         Table.value(bound()),
-        Table.value(gap()),
-        draws.proved() ? "optimal" : "none");
+        Table.value(gap),
+        gap.equals(OptionalDouble.of(0)) ? "optimal" : "none");
   }
 }

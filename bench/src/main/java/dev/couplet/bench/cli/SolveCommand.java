@@ -7,6 +7,7 @@ import dev.couplet.sampling.Run;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.util.concurrent.Callable;
+import java.util.function.DoubleUnaryOperator;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -33,13 +34,13 @@ import picocli.CommandLine.Spec;
       "  method, seed  as asked for",
       "  seconds       how long the method ran; reading the file is not in it, nor is bounding",
       "                afterwards (at most a tenth of --seconds) where the method gives no bound",
-      "  value         the best value found",
+      "  value         the best value found; where there are rules, of a plan that keeps them",
       "  hit_seconds   when the run first told of the target, or without one of that value.",
       "                Methods tell at most every 50 ms, so that this is never too early, but can",
       "                be late by that much, and is the end of the run if it ended before it told",
       "  bound         no value is better than this: proved",
       "  gap           how far value and bound are apart",
-      "  proof         'optimal' if they are not, else 'none'",
+      "  proof         'optimal' if they are not, 'infeasible' if no plan keeps the rules, else 'none'",
       "A dash stands for what is not there."
     })
 final class SolveCommand implements Callable<Integer> {
@@ -75,20 +76,32 @@ final class SolveCommand implements Callable<Integer> {
     Methods.Method chosen = Methods.named(method);
     Effort effort = timed.effort().threads(threads);
     Instance instance = inputs.read();
-    if (target != null) {
-      effort = effort.target(instance.energy(target));
-    }
-    Attempt attempt = bounded(attempt(chosen, instance, effort));
-    new Table(spec.commandLine().getOut(), Attempt.COLUMNS).row(attempt.cells());
-    return attempt.reached() ? 0 : NOT_REACHED;
+    Outcome outcome =
+        instance instanceof Instance.OfModel model && method.equals(Methods.STANDARD)
+            ? answered(model, effort)
+            : bounded(attempt(chosen, Subject.of(instance), effort));
+    new Table(spec.commandLine().getOut(), Outcome.COLUMNS).row(outcome.cells());
+    return outcome.reached() ? 0 : NOT_REACHED;
   }
 
-  private Attempt attempt(Methods.Method chosen, Instance instance, Effort effort) {
-    PrintWriter err = spec.commandLine().getErr();
-    boolean shown = ProgressLine.onTerminal();
-    try (ProgressLine line = new ProgressLine(err, shown, "value", instance::value)) {
-      return Attempt.make(instance, chosen, effort, line, System::nanoTime);
+  private Answered answered(Instance.OfModel model, Effort effort) {
+    Effort aimed = target == null ? effort : effort.target(target);
+    int sign = model.statement().sense().sign();
+    try (ProgressLine line = progress(energy -> sign * energy)) {
+      return Answered.make(model, aimed, line, System::nanoTime);
     }
+  }
+
+  private Attempt attempt(Methods.Method chosen, Subject subject, Effort effort) {
+    Effort aimed = target == null ? effort : effort.target(subject.turn(target));
+    try (ProgressLine line = progress(subject::turn)) {
+      return Attempt.make(subject, chosen, aimed, line, System::nanoTime);
+    }
+  }
+
+  private ProgressLine progress(DoubleUnaryOperator valueOf) {
+    PrintWriter err = spec.commandLine().getErr();
+    return new ProgressLine(err, ProgressLine.onTerminal(), "value", valueOf);
   }
 
   private Attempt bounded(Attempt attempt) {
@@ -96,6 +109,6 @@ final class SolveCommand implements Callable<Integer> {
       return attempt;
     }
     Effort share = timed.share(0.1);
-    return attempt.bound(SplitBound.standard().below(attempt.instance().form(), Run.of(share)));
+    return attempt.bound(SplitBound.standard().below(attempt.subject().form(), Run.of(share)));
   }
 }

@@ -42,7 +42,7 @@ final class BinaryQuadraticText implements Format {
       }
     }
     EntryList.endOfText(text);
-    return new Instance(source.nameOf(picked, problems), form, Sense.MAXIMIZE);
+    return new Instance.OfForm(source.nameOf(picked, problems), form, Sense.MAXIMIZE);
   }
 
   private static Qubo readProblem(TokenReader text) throws IOException {

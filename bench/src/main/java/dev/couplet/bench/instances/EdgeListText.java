@@ -35,7 +35,8 @@ final class EdgeListText implements Format {
     edges.forEach(
         text,
         (i, j, w) -> form.addLinear(i - 1, -w).addLinear(j - 1, -w).addPair(i - 1, j - 1, 2 * w));
-    Instance instance = new Instance(source.name(), EntryList.build(text, form), Sense.MAXIMIZE);
+    Instance instance =
+        new Instance.OfForm(source.name(), EntryList.build(text, form), Sense.MAXIMIZE);
     EntryList.endOfText(text);
     return instance;
   }

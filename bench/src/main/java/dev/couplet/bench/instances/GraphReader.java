@@ -71,7 +71,7 @@ public final class GraphReader {
     Path path = file("guest", text, guests());
     String name = new TextFile(path).name();
     if (InstanceReader.kindOf(path).filter(FORMS::contains).isPresent()) {
-      return new Guest(name, Guest.of(InstanceReader.standard().read(path).form()).graph());
+      return new Guest(name, Guest.of(InstanceReader.standard().readForm(path).form()).graph());
     }
     return new Guest(name, edges(path));
   }

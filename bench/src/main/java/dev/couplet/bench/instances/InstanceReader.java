@@ -81,6 +81,22 @@ public final class InstanceReader {
   }
 
   /**
+   * Reads a file whose problem is a form as it stands.
+   *
+   * @throws FormatException with file, line and column of the first fault
+   * @throws IllegalArgumentException if the content does not tell the kind, or the problem has
+   *     rules
+   * @throws IOException if the file cannot be read, naming the file
+   */
+  public Instance.OfForm readForm(Path path) throws IOException {
+    if (read(path) instanceof Instance.OfForm form) {
+      return form;
+    }
+    throw new IllegalArgumentException(
+        path + ": the problem has rules, a form is needed here; lower it first");
+  }
+
+  /**
    * The kind of a file, if its content tells it.
    *
    * @throws IOException if the file cannot be read, naming the file

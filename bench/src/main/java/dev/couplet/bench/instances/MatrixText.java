@@ -21,7 +21,7 @@ final class MatrixText implements Format {
   @Override
   public Instance read(Source source) throws IOException {
     source.requireSingle();
-    return new Instance(
+    return new Instance.OfForm(
         source.name(), MatrixMarket.read(source.path(), source.reader()), Sense.MINIMIZE);
   }
 }

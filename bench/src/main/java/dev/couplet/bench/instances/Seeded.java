@@ -100,7 +100,7 @@ public record Seeded(String name, int size, int density, long seed) {
   }
 
   /** The instance, generated anew. */
-  public Instance generate() {
+  public Instance.OfForm generate() {
     Qubo.Builder form = Qubo.builder(size);
     forEachEntry(
         (i, j, q) -> {
@@ -110,7 +110,7 @@ public record Seeded(String name, int size, int density, long seed) {
             form.addPair(i, j, -2 * q);
           }
         });
-    return new Instance(name, form.build(), Sense.MAXIMIZE);
+    return new Instance.OfForm(name, form.build(), Sense.MAXIMIZE);
   }
 
   private static long next(long s) {

@@ -5,7 +5,7 @@
  * it. {@link dev.couplet.bench.instances.Seeded} are instances published as a seed; {@link
  * dev.couplet.bench.instances.Torus} and {@link dev.couplet.bench.instances.Couplings} make the
  * lattices that speed is measured on. An {@link dev.couplet.bench.instances.Instance} is a form to
- * be minimised that knows how its energies read in the file's own sense and units.
+ * be minimised that knows how its energies read in the file's own sense and units, or a model.
  */
 @CheckReturnValue
 @NullMarked

@@ -22,8 +22,9 @@ import org.junit.jupiter.api.Test;
 
 /** Times of attempts, on a clock that a sampler with a fixed story moves on. */
 class AttemptTest {
-  private static final Instance INSTANCE =
-      new Instance("story", Qubo.builder(1).addLinear(0, -10).build(), Sense.MAXIMIZE);
+  private static final Subject SUBJECT =
+      Subject.of(
+          new Instance.OfForm("story", Qubo.builder(1).addLinear(0, -10).build(), Sense.MAXIMIZE));
 
   private final AtomicLong now = new AtomicLong(1_000_000_000_000L);
 
@@ -56,7 +57,7 @@ class AttemptTest {
 
   private Attempt attempt(Effort effort) {
     return Attempt.make(
-        INSTANCE, new Methods.Method("story", storyteller), effort, progress -> {}, now::get);
+        SUBJECT, new Methods.Method("story", storyteller), effort, progress -> {}, now::get);
   }
 
   @Test
@@ -96,10 +97,10 @@ class AttemptTest {
   @Test
   void anInfiniteBoundIsNone() {
     Draws draws =
-        Draws.of(INSTANCE.form(), List.of(State.zeros(1)), End.DONE, 1)
+        Draws.of(SUBJECT.form(), List.of(State.zeros(1)), End.DONE, 1)
             .bound(Double.NEGATIVE_INFINITY);
     Attempt attempt =
-        new Attempt(INSTANCE, "story", Effort.draws(1), draws, 1, OptionalDouble.of(1));
+        new Attempt(SUBJECT, "story", Effort.draws(1), draws, 1, OptionalDouble.of(1));
     assertEquals(List.of("-", "-", "none"), attempt.cells().subList(8, 11));
   }
 
@@ -108,12 +109,12 @@ class AttemptTest {
     int[] heard = {0};
     Attempt attempt =
         Attempt.make(
-            INSTANCE,
+            SUBJECT,
             new Methods.Method("story", storyteller),
             Effort.draws(1),
             progress -> heard[0]++,
             now::get);
     assertEquals(3, heard[0]);
-    assertEquals(10, attempt.value());
+    assertEquals(OptionalDouble.of(10), attempt.value());
   }
 }

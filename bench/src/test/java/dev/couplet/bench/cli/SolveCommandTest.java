@@ -22,7 +22,7 @@ class SolveCommandTest {
   void theHeaderIsTheDesigns() {
     assertEquals(
         "instance n pairs method seed seconds value hit_seconds bound gap proof",
-        String.join(" ", Attempt.COLUMNS));
+        String.join(" ", Outcome.COLUMNS));
   }
 
   /** By hand: 2 alone against 1 and 3 cuts 1 + 2; every other cut has the edge of weight -4. */

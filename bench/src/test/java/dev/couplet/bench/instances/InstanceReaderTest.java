@@ -29,9 +29,9 @@ class InstanceReaderTest {
 
   @Test
   void quadraticProgrammesCountPairsTwiceAndAreMaximised() throws IOException {
-    Instance instance = read("small.txt", QUADRATIC);
+    Instance.OfForm instance = read("small.txt", QUADRATIC);
     Qubo expected = Qubo.builder(3).addLinear(0, -5).addPair(0, 2, 4).addPair(1, 2, -8).build();
-    assertEquals(new Instance("small", expected, Sense.MAXIMIZE), instance);
+    assertEquals(new Instance.OfForm("small", expected, Sense.MAXIMIZE), instance);
     // By hand: 5 + 2 (-2) + 2 (4) with all variables at 1.
     assertEquals(9, instance.value(instance.form().value(State.parse("111"))));
     assertEquals(-9, instance.energy(9));
@@ -39,7 +39,7 @@ class InstanceReaderTest {
 
   @Test
   void edgeListsAreMaximumCuts() throws IOException {
-    Instance instance = read("small.mc", CUT);
+    Instance.OfForm instance = read("small.mc", CUT);
     assertEquals("small", instance.name());
     for (int bits = 0; bits < 8; bits++) {
       State state = State.ofWords(3, bits);
@@ -58,9 +58,9 @@ class InstanceReaderTest {
 
   @Test
   void matricesAreMinimised() throws IOException {
-    Instance instance = read("small.mtx", MATRIX);
+    Instance.OfForm instance = read("small.mtx", MATRIX);
     Qubo expected = Qubo.builder(2).addLinear(0, -3).addPair(0, 1, 2).build();
-    assertEquals(new Instance("small", expected, Sense.MINIMIZE), instance);
+    assertEquals(new Instance.OfForm("small", expected, Sense.MINIMIZE), instance);
     assertEquals(-3, instance.value(-3));
   }
 
@@ -75,7 +75,7 @@ class InstanceReaderTest {
     try (OutputStream out = new GZIPOutputStream(Files.newOutputStream(file))) {
       out.write(CUT.getBytes(StandardCharsets.UTF_8));
     }
-    Instance instance = InstanceReader.standard().read(file);
+    Instance.OfForm instance = InstanceReader.standard().readForm(file);
     assertEquals("packed.7", instance.name());
     assertEquals(read("plain.mc", CUT).form(), instance.form());
   }
@@ -93,7 +93,7 @@ class InstanceReaderTest {
     FormatException open =
         assertThrows(FormatException.class, () -> InstanceReader.standard().read(file));
     assertTrue(open.getMessage().endsWith(":1:1: the file holds 2 problems; pick one with --item"));
-    Instance second = InstanceReader.standard().item(2).read(file);
+    Instance.OfForm second = InstanceReader.standard().item(2).readForm(file);
     assertEquals("two#2", second.name());
     assertEquals(14, second.form().pair(0, 1));
     assertThrows(FormatException.class, () -> InstanceReader.standard().item(3).read(file));
@@ -102,7 +102,7 @@ class InstanceReaderTest {
   @Test
   void aFileOfOneProblemHasNoSecondItem() throws IOException {
     Path file = write("one.mc", CUT);
-    assertEquals(3, InstanceReader.standard().item(1).read(file).form().size());
+    assertEquals(3, InstanceReader.standard().item(1).readForm(file).form().size());
     assertThrows(
         IllegalArgumentException.class, () -> InstanceReader.standard().item(2).read(file));
   }
@@ -166,7 +166,7 @@ class InstanceReaderTest {
     return Files.writeString(folder.resolve(name), text);
   }
 
-  private Instance read(String name, String text) throws IOException {
-    return InstanceReader.standard().read(write(name, text));
+  private Instance.OfForm read(String name, String text) throws IOException {
+    return InstanceReader.standard().readForm(write(name, text));
   }
 }

@@ -23,7 +23,7 @@ class PublishedFilesTest {
     List<Published> rows = PublishedData.of(family);
     assertFalse(rows.isEmpty());
     for (Published row : rows) {
-      Instance instance = InstanceReader.standard().read(row.path());
+      Instance.OfForm instance = InstanceReader.standard().readForm(row.path());
       assertEquals(row.name(), instance.name());
       assertEquals(row.size(), instance.form().size(), row.name());
       assertEquals(Sense.MAXIMIZE, instance.sense());
@@ -39,7 +39,7 @@ class PublishedFilesTest {
             .filter(r -> r.name().equals("G48"))
             .findFirst()
             .orElseThrow();
-    Instance instance = InstanceReader.standard().read(row.path());
+    Instance.OfForm instance = InstanceReader.standard().readForm(row.path());
     State sides = twoColours(instance.form());
     assertEquals(row.best(), instance.value(instance.form().value(sides)));
     assertEquals(6000, instance.form().pairs());

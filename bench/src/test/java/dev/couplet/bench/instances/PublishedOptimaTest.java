@@ -22,7 +22,7 @@ class PublishedOptimaTest {
     assertEquals(5, rows.size());
     for (Published row : rows) {
       assertEquals("optimal", row.status());
-      Instance instance = InstanceReader.standard().read(row.path());
+      Instance.OfForm instance = InstanceReader.standard().readForm(row.path());
       Draws draws = Solver.standard().sample(instance.form(), Effort.draws(64).seed(7));
       assertEquals(row.best(), instance.value(draws.best().energy()), row.name());
       double bound = instance.value(draws.bound().orElseThrow());

@@ -104,7 +104,7 @@ class SeededTest {
   @Test
   void entriesStandInTheFormWithTheirSignTurned() {
     Seeded seeded = Seeded.parse("40:50:7");
-    Instance instance = seeded.generate();
+    Instance.OfForm instance = seeded.generate();
     assertEquals("40:50:7", instance.name());
     int[] nonZero = {0};
     seeded.forEachEntry(
