@@ -1,6 +1,6 @@
 package dev.couplet.audit;
 
-import dev.couplet.audit.LoweringReport.WeightSlack;
+import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.lower.Lowered;
@@ -77,13 +77,13 @@ final class ExhaustiveAudit {
     return Walk.STRETCH * (2L * qubo.size() + statement.objective().terms() + 2) + all;
   }
 
-  LoweringReport report() {
+  LoweringAudit.Report report() {
     findOptimum();
     compare();
     List<WeightSlack> slacks = slacks();
     noteOthers(slacks);
     boolean compared = feasible > 0 && others > 0;
-    return new LoweringReport(
+    return new LoweringAudit.Report(
         1L << bits,
         feasible,
         feasible > 0 ? OptionalDouble.of(ownSense(best)) : OptionalDouble.empty(),

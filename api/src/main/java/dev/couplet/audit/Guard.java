@@ -1,6 +1,6 @@
 package dev.couplet.audit;
 
-import dev.couplet.audit.LoweringReport.WeightSlack;
+import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.lower.Weight;
 import java.util.OptionalDouble;
 

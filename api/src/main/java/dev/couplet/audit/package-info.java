@@ -5,10 +5,10 @@
  * dev.couplet.sampling.Sampler} over one of them, the library's own or a user's. {@link
  * dev.couplet.audit.LoweringAudit} proves of one lowered model that its form says what the model
  * says, and tells how much each weight could be lowered: its {@link
- * dev.couplet.audit.LoweringReport}. {@link dev.couplet.audit.RandomModels} draws small models for
- * property tests. What an audit found wrong are its {@link dev.couplet.audit.Findings}, each a
- * {@link dev.couplet.audit.Findings.Finding} with the name of the check and a message that says
- * what happened and how to mend it; {@code orThrow()} turns them into an {@link
+ * dev.couplet.audit.LoweringAudit.Report}. {@link dev.couplet.audit.RandomModels} draws small
+ * models for property tests. What an audit found wrong are its {@link dev.couplet.audit.Findings},
+ * each a {@link dev.couplet.audit.Findings.Finding} with the name of the check and a message that
+ * says what happened and how to mend it; {@code orThrow()} turns them into an {@link
  * java.lang.AssertionError}.
  */
 @CheckReturnValue

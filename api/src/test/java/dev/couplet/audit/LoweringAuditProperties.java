@@ -6,7 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.Findings.Finding;
-import dev.couplet.audit.LoweringReport.WeightSlack;
+import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.audit.Spec.Limit;
 import dev.couplet.lower.Lowered;
@@ -74,7 +74,7 @@ class LoweringAuditProperties {
       return;
     }
     Lowered lowered = standard().lower(stated.model);
-    LoweringReport report = LoweringAudit.exhaustive(lowered);
+    LoweringAudit.Report report = LoweringAudit.exhaustive(lowered);
     assertEquals(judge.feasible, report.feasible());
     if (judge.feasible == 0) {
       List<String> checks = report.findings().all().stream().map(Finding::check).toList();

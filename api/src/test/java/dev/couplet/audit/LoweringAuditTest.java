@@ -7,7 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.Findings.Finding;
-import dev.couplet.audit.LoweringReport.WeightSlack;
+import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.lower.Lowering;
 import dev.couplet.lower.Weights;
 import dev.couplet.model.Bit;
@@ -36,14 +36,14 @@ class LoweringAuditTest {
     return model;
   }
 
-  private static List<String> checks(LoweringReport report) {
+  private static List<String> checks(LoweringAudit.Report report) {
     return report.findings().all().stream().map(Finding::check).toList();
   }
 
   /** By hand: of the 16 subsets, 9 weigh at most 9; the best are {0, 3} and its value is 13. */
   @Test
   void figuresOfASmallModel() {
-    LoweringReport report = LoweringAudit.exhaustive(Lowering.standard().lower(knapsack()));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(Lowering.standard().lower(knapsack()));
     report.orThrow();
     assertTrue(report.passed());
     assertEquals(16, report.patterns());
@@ -62,7 +62,7 @@ class LoweringAuditTest {
 
   @Test
   void aWeightTooLightIsFoundWithItsRuleAndTheMend() {
-    LoweringReport report =
+    LoweringAudit.Report report =
         LoweringAudit.exhaustive(Lowering.standard().with(Weights.fixed(0.5)).lower(knapsack()));
     assertFalse(report.passed());
     assertEquals(List.of("others"), checks(report));
@@ -90,7 +90,7 @@ class LoweringAuditTest {
     Choice<String> van = model.choice("van", List.of("small", "large"));
     model.maximize("crates", van.is("small").times(3).plus(van.is("large").times(4)));
     Lowering light = Lowering.standard().with(Weights.fixed(2));
-    LoweringReport report = LoweringAudit.exhaustive(light.lower(model));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(light.lower(model));
     AssertionError error = assertThrows(AssertionError.class, report::orThrow);
     String message = error.getMessage();
     assertTrue(message.contains("van = undecided"), message);
@@ -108,10 +108,10 @@ class LoweringAuditTest {
     model.require("once", bit.isFalse());
     model.require("again", bit.isFalse());
     model.maximize("gain", bit.times(3));
-    LoweringReport enough = LoweringAudit.exhaustive(Lowering.standard().lower(model));
+    LoweringAudit.Report enough = LoweringAudit.exhaustive(Lowering.standard().lower(model));
     enough.orThrow();
     assertEquals(List.of(0.0, 0.0), infima(enough));
-    LoweringReport light =
+    LoweringAudit.Report light =
         LoweringAudit.exhaustive(Lowering.standard().with(Weights.fixed(1)).lower(model));
     assertFalse(light.passed());
     assertEquals(List.of(2.0, 2.0), infima(light), "3 - 1 that the other takes");
@@ -127,11 +127,11 @@ class LoweringAuditTest {
     model.require("no b", b.isFalse());
     model.maximize("gain", a.times(3).plus(b.times(3)));
     Lowering light = Lowering.standard().weight("no a", 2);
-    LoweringReport report = LoweringAudit.exhaustive(light.lower(model));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(light.lower(model));
     assertEquals(List.of(3.0, Double.POSITIVE_INFINITY), infima(report));
   }
 
-  private static List<Double> infima(LoweringReport report) {
+  private static List<Double> infima(LoweringAudit.Report report) {
     return report.weights().stream().map(slack -> slack.infimum().orElseThrow()).toList();
   }
 
@@ -143,7 +143,7 @@ class LoweringAuditTest {
     model.require("not both", a.plus(b).atMost(1));
     model.require("a", a.isTrue());
     model.require("b", b.isTrue());
-    LoweringReport report = LoweringAudit.exhaustive(Lowering.standard().lower(model));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(Lowering.standard().lower(model));
     assertEquals(List.of("feasible plan"), checks(report));
     assertEquals(0, report.feasible());
     assertEquals(OptionalDouble.empty(), report.optimum());
@@ -157,7 +157,7 @@ class LoweringAuditTest {
   @Test
   void modelsWithNextToNothing() {
     Model empty = Model.named("empty");
-    LoweringReport report = LoweringAudit.exhaustive(Lowering.standard().lower(empty));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(Lowering.standard().lower(empty));
     report.orThrow();
     assertEquals(1, report.feasible());
     assertEquals(OptionalDouble.of(0), report.optimum());
@@ -165,7 +165,7 @@ class LoweringAuditTest {
     Model only = Model.named("decisions only");
     only.bit("b");
     only.choice("c", List.of(1, 2, 3));
-    LoweringReport ofDecisions = LoweringAudit.exhaustive(Lowering.standard().lower(only));
+    LoweringAudit.Report ofDecisions = LoweringAudit.exhaustive(Lowering.standard().lower(only));
     ofDecisions.orThrow();
     assertEquals(6, ofDecisions.feasible());
     assertEquals(OptionalDouble.of(1), ofDecisions.margin());
@@ -176,7 +176,7 @@ class LoweringAuditTest {
     Model model = Model.named("wish");
     List<Bit> bits = List.of(model.bit("a"), model.bit("b"), model.bit("c"));
     model.prefer("about one", sum(bits).exactly(1), 2);
-    LoweringReport report = LoweringAudit.exhaustive(Lowering.standard().lower(model));
+    LoweringAudit.Report report = LoweringAudit.exhaustive(Lowering.standard().lower(model));
     report.orThrow();
     assertEquals(OptionalDouble.empty(), report.weights().get(0).infimum());
     assertTrue(report.weights().get(0).toString().endsWith("not analysed"));

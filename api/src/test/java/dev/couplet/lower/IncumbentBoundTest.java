@@ -6,7 +6,6 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.LoweringAudit;
-import dev.couplet.audit.LoweringReport;
 import dev.couplet.audit.RandomModels;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.form.State;
@@ -76,7 +75,7 @@ class IncumbentBoundTest {
               .toList();
       for (Plan plan : List.of(feasible.get(0), feasible.get(feasible.size() - 1))) {
         Lowered lowered = Lowering.standard().with(Weights.incumbentBound(plan)).lower(random);
-        LoweringReport report = LoweringAudit.exhaustive(lowered);
+        LoweringAudit.Report report = LoweringAudit.exhaustive(lowered);
         report.orThrow();
         assertEquals(feasible.size(), report.feasible());
       }

@@ -10,7 +10,6 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.Findings.Finding;
 import dev.couplet.audit.LoweringAudit;
-import dev.couplet.audit.LoweringReport;
 import dev.couplet.audit.RandomModels;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.form.Qubo;
@@ -268,7 +267,7 @@ class LoweringTest {
               faithful.ledger(),
               faithful.weights(),
               faithful.structure());
-      LoweringReport report = LoweringAudit.exhaustive(sabotaged);
+      LoweringAudit.Report report = LoweringAudit.exhaustive(sabotaged);
       List<String> checks = report.findings().all().stream().map(Finding::check).toList();
       assertTrue(checks.contains("ledger"), checks.toString());
       assertTrue(checks.contains("value"), checks.toString());

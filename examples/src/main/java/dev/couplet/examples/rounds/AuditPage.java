@@ -1,7 +1,7 @@
 package dev.couplet.examples.rounds;
 
-import dev.couplet.audit.LoweringReport;
-import dev.couplet.audit.LoweringReport.WeightSlack;
+import dev.couplet.audit.LoweringAudit;
+import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.lower.Lowered;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -18,15 +18,15 @@ import java.util.stream.Collectors;
 final class AuditPage {
   private final RoundsModel copy;
   private final Lowered lowered;
-  private final LoweringReport report;
+  private final LoweringAudit.Report report;
 
-  private AuditPage(RoundsModel copy, Lowered lowered, LoweringReport report) {
+  private AuditPage(RoundsModel copy, Lowered lowered, LoweringAudit.Report report) {
     this.copy = copy;
     this.lowered = lowered;
     this.report = report;
   }
 
-  static String of(RoundsModel copy, Lowered lowered, LoweringReport report) {
+  static String of(RoundsModel copy, Lowered lowered, LoweringAudit.Report report) {
     return new AuditPage(copy, lowered, report).text();
   }
 

@@ -2,7 +2,6 @@ package dev.couplet.examples.rounds;
 
 import dev.couplet.anneal.Annealing;
 import dev.couplet.audit.LoweringAudit;
-import dev.couplet.audit.LoweringReport;
 import dev.couplet.embed.Picture;
 import dev.couplet.lower.Lowered;
 import dev.couplet.model.Plan;
@@ -46,7 +45,7 @@ final class Report {
     page(LoweringPage.of(rounds, lowered));
     RoundsModel copy = RoundsModel.of(SmallCopy.of(data));
     Lowered loweredCopy = lower(copy);
-    LoweringReport audit = LoweringAudit.exhaustive(loweredCopy);
+    LoweringAudit.Report audit = LoweringAudit.exhaustive(loweredCopy);
     page(AuditPage.of(copy, loweredCopy, audit));
     Draws draws = draw(lowered);
     page(DrawsPage.of(lowered, draws));

@@ -5,7 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.LoweringAudit;
-import dev.couplet.audit.LoweringReport;
 import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowering;
 import dev.couplet.lower.Weight;
@@ -40,7 +39,7 @@ class PagesTest {
   void theAuditPageSaysSoWhenWeightsAreTooSmall() {
     RoundsModel copy = RoundsModel.of(SmallCopy.of(INVENTED));
     Lowered light = Lowering.standard().with(Weights.fixed(1)).lower(copy.model());
-    LoweringReport report = LoweringAudit.exhaustive(light);
+    LoweringAudit.Report report = LoweringAudit.exhaustive(light);
     assertFalse(report.passed());
     String page = AuditPage.of(copy, light, report);
     assertFalse(page.contains("findings  0"), page);
