@@ -1,91 +1,95 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.lower.Ledger.Kind;
+import dev.couplet.lower.Ledger.Source;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
-import java.util.function.Consumer;
 
 /**
  * Replaces terms of degree 3 and more by quadratic ones with auxiliary bits; minimised over these,
  * the value is unchanged for every pattern of the other bits.
  *
- * <p>A negative term of degree d takes one auxiliary bit w: {@code -a x1..xd = min_w a w (d - 1 -
- * S)} with S the sum of the x (Freedman and Drineas, "Energy minimization via graph cuts: settling
- * what is possible", 2005). A positive one takes {@code floor((d - 1) / 2)}: {@code a x1..xd =
- * min_w a (S2 + sum_i w_i (c_i (2i - S) - 1))} with S2 the sum of products of pairs, and c_i = 1
- * for the last i of an odd d, else 2 (Ishikawa, "Transformation of general binary MRF minimization
- * to the first-order case", 2011).
+ * <p>All sources of a lowering are looked at together. Several plans are worked out: each product
+ * by a {@link ProductForm} of its own; pairs shared among products wherever that saves bits, the
+ * rest by forms; and where coefficients are to be small also pairs substituted down to degree 2,
+ * shared and unshared. The best by the {@link Aim} is taken, of equals the first named here.
  */
 final class DegreeReduction {
+  private final List<Source> sources;
+  private final List<Product> products;
+  private final Aim aim;
   private final BitTable bits;
-  private final String source;
-  private final List<Consumer<Polynomial.Builder>> reduced = new ArrayList<>();
 
-  private DegreeReduction(BitTable bits, String source) {
+  private DegreeReduction(List<Source> sources, Aim aim, BitTable bits) {
+    this.sources = sources;
+    this.products = products(sources);
+    this.aim = aim;
     this.bits = bits;
-    this.source = source;
   }
 
+  /**
+   * The sources brought to degree 2, in their order, and a source more for each auxiliary bit that
+   * several of them share.
+   */
+  static List<Source> of(List<Source> sources, Aim aim, BitTable bits) {
+    boolean quadratic = sources.stream().allMatch(source -> source.terms().degree() <= 2);
+    return quadratic ? sources : new DegreeReduction(sources, aim, bits).reduced();
+  }
+
+  /** A polynomial by itself brought to degree 2. */
   static Polynomial of(Polynomial polynomial, String source, BitTable bits) {
-    if (polynomial.degree() <= 2) {
-      return polynomial;
-    }
-    DegreeReduction reduction = new DegreeReduction(bits, source);
-    polynomial.forEachTerm(reduction::take);
-    Polynomial.Builder quadratic = Polynomial.builder(bits.size());
-    reduction.reduced.forEach(term -> term.accept(quadratic));
-    return quadratic.build();
+    Source only = new Source(source, Kind.OBJECTIVE, polynomial, 1);
+    return of(List.of(only), Aim.AUXILIARIES, bits).get(0).terms();
   }
 
-  private void take(double coefficient, int[] variables) {
-    if (variables.length <= 2) {
-      add(coefficient, variables);
-    } else if (coefficient < 0) {
-      negative(-coefficient, variables);
-    } else {
-      positive(coefficient, variables);
+  private static List<Product> products(List<Source> sources) {
+    List<Product> products = new ArrayList<>();
+    for (int s = 0; s < sources.size(); s++) {
+      int source = s;
+      sources
+          .get(s)
+          .terms()
+          .forEachTerm(
+              (coefficient, variables) -> {
+                if (variables.length > 2) {
+                  products.add(new Product(source, coefficient, variables));
+                }
+              });
     }
+    return products;
   }
 
-  private void negative(double a, int[] variables) {
-    int degree = variables.length;
-    int w = bits.add("a product of " + degree + " in '" + source + "'");
-    add(a * (degree - 1), w);
-    for (int x : variables) {
-      add(-a, w, x);
-    }
-    bits.completeWith(values -> values[w] = ones(variables, values) == degree);
+  private List<Source> reduced() {
+    Comparator<ReductionDraft> byBits = Comparator.comparingInt(ReductionDraft::auxiliaries);
+    Comparator<ReductionDraft> bySize = Comparator.comparingDouble(ReductionDraft::largest);
+    ReductionDraft best =
+        drafts().stream()
+            .min(
+                aim == Aim.AUXILIARIES
+                    ? byBits.thenComparing(bySize)
+                    : bySize.thenComparing(byBits))
+            .orElseThrow();
+    return best.writeTo(bits);
   }
 
-  private void positive(double a, int[] variables) {
-    int degree = variables.length;
-    int auxiliaries = (degree - 1) / 2;
-    for (int x = 0; x < degree; x++) {
-      for (int y = x + 1; y < degree; y++) {
-        add(a, variables[x], variables[y]);
-      }
+  private List<ReductionDraft> drafts() {
+    int first = bits.size();
+    ProductForms fewest = new ProductForms(Aim.AUXILIARIES);
+    List<ReductionDraft> drafts = new ArrayList<>();
+    drafts.add(draft(SharedPairs.none(products, first), fewest));
+    drafts.add(draft(SharedPairs.saving(products, first, fewest), fewest));
+    if (aim == Aim.COEFFICIENTS) {
+      ProductForms smallest = new ProductForms(Aim.COEFFICIENTS);
+      drafts.add(draft(SharedPairs.none(products, first), smallest));
+      drafts.add(draft(SharedPairs.everywhere(products, first), smallest));
+      drafts.add(draft(SharedPairs.apart(products, first), smallest));
     }
-    for (int i = 1; i <= auxiliaries; i++) {
-      int w = bits.add("part " + i + " of a product of " + degree + " in '" + source + "'");
-      int c = degree % 2 == 1 && i == auxiliaries ? 1 : 2;
-      add(a * (2.0 * c * i - 1), w);
-      for (int x : variables) {
-        add(-a * c, w, x);
-      }
-      int atLeast = 2 * i;
-      bits.completeWith(values -> values[w] = ones(variables, values) >= atLeast);
-    }
+    return drafts;
   }
 
-  private void add(double coefficient, int... variables) {
-    reduced.add(quadratic -> quadratic.add(coefficient, variables));
-  }
-
-  private static int ones(int[] variables, boolean[] values) {
-    int ones = 0;
-    for (int variable : variables) {
-      ones += values[variable] ? 1 : 0;
-    }
-    return ones;
+  private ReductionDraft draft(SharedPairs shared, ProductForms forms) {
+    return new ReductionDraft(sources, products, shared, forms, bits.size());
   }
 }

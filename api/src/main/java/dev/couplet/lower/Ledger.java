@@ -21,7 +21,9 @@ public final class Ledger {
     /** The penalty of a rule. */
     PENALTY,
     /** The penalty of bits that stand for no option of a choice. */
-    CODE
+    CODE,
+    /** The penalty of an auxiliary bit that is not the product of two others it stands for. */
+    PRODUCT
   }
 
   /**

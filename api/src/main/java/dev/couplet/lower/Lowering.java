@@ -33,8 +33,10 @@ import java.util.Set;
  *   <tr><td>preferred rule on more literals</td><td>those of slack, excess and shortage</td>
  *     <td>as above</td><td>as above</td></tr>
  *   <tr><td>negative product of d &gt; 2</td><td>1</td><td>d</td><td>d - 1</td></tr>
- *   <tr><td>positive product of d &gt; 2</td><td>floor((d-1)/2)</td><td>d(d-1)/2 + d bits</td>
- *     <td>at most 2d - 5</td></tr>
+ *   <tr><td>positive product of d &gt; 2</td><td>ceil(log2 d) - 1</td>
+ *     <td>at most (d + bits)(d + bits - 1)/2</td><td>at most d(d+2)/8</td></tr>
+ *   <tr><td>two bits that products of one sum share</td><td>1 if that saves more</td><td>3</td>
+ *     <td>up to twice the sum of what the products count</td></tr>
  * </table>
  *
  * <p>Rules that every plan keeps take nothing. Source of the pair forms and squares: Glover,

@@ -13,6 +13,10 @@
  * RangeBound} or {@code IncumbentBound} weighs it, {@code DegreeReduction} brings every term to
  * degree 2, {@code Assembly} adds all up.
  *
+ * <p>{@code DegreeReduction} compares {@code ReductionDraft}s: each product by a {@code
+ * ProductForm} of its own ({@code ConjunctionForm}, {@code ThresholdForm}, {@code CountForm}), or
+ * with {@code SharedPairs}, each bit held to its product by a {@code Tie}.
+ *
  * <p>Every penalty is zero, for the best values of its auxiliary bits, where its rule is kept, and
  * at least 1 elsewhere, broken codes included: so a weight above the objective's whole range
  * suffices.
