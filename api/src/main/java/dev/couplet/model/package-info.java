@@ -14,6 +14,9 @@
  * is kept never depends on rounding. A {@link dev.couplet.model.Statement} is the immutable content
  * of a model at one moment; it is what is lowered, audited and solved.
  *
+ * <p>{@link dev.couplet.model.PseudoBooleanText} reads models from and writes statements to the
+ * text of the pseudo-Boolean competitions.
+ *
  * <p>Why literals and not encoded bits: how a choice is folded into bits is decided later, by the
  * lowering, and can change without touching a model.
  */

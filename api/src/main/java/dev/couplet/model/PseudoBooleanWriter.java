@@ -1,0 +1,205 @@
+package dev.couplet.model;
+
+import dev.couplet.form.Polynomial;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+
+/**
+ * Writes one OPB text: works everything out first, so that nothing is written of what is refused,
+ * then writes some kilobytes at a time.
+ */
+final class PseudoBooleanWriter {
+  private static final int CHUNK = 1 << 14;
+
+  /** A limited sum as the format has it: {@code sign * (terms + counts) >= limit}, or equal. */
+  private record Line(
+      String name, Polynomial terms, List<Count> counts, int sign, double limit, boolean equal) {}
+
+  /** A term in a variable that counts misses. */
+  private record Count(long coefficient, int variable) {}
+
+  private final Statement statement;
+  private final List<Line> lines = new ArrayList<>();
+  private final PseudoBooleanObjective objective;
+  private final StringBuilder text = new StringBuilder(CHUNK + 100);
+  private final List<String> counters = new ArrayList<>();
+
+  PseudoBooleanWriter(Statement statement) {
+    this.statement = statement;
+    this.objective = new PseudoBooleanObjective(statement);
+    for (Decision decision : statement.decisions()) {
+      if (decision instanceof Choice<?> choice) {
+        addCode(choice);
+      }
+    }
+    for (Rule rule : statement.rules()) {
+      addRule(rule);
+    }
+    objective.requireWhole();
+  }
+
+  private void addCode(Choice<?> choice) {
+    Polynomial.Builder sum = Polynomial.builder(statement.literals());
+    for (int k = 0; k < choice.values(); k++) {
+      sum.add(1, choice.firstLiteral() + k);
+    }
+    String name = "one option of '" + choice.name() + "'";
+    lines.add(new Line(name, sum.build(), List.of(), 1, 1, true));
+  }
+
+  private void addRule(Rule rule) {
+    boolean free = !rule.required() && rule.costPerUnit() == 0;
+    if (rule.terms().terms() == 0 || free) {
+      return;
+    }
+    List<Count> over = counts(rule, rule.range().highest() - rule.highest(), -1);
+    List<Count> under = counts(rule, rule.lowest() - rule.range().lowest(), 1);
+    if (rule.lowest() == rule.highest()) {
+      List<Count> both = new ArrayList<>(over);
+      both.addAll(under);
+      lines.add(new Line(rule.name(), rule.terms(), both, 1, rule.lowest(), true));
+      return;
+    }
+    if (Double.isFinite(rule.lowest())) {
+      lines.add(new Line(rule.name(), rule.terms(), under, 1, rule.lowest(), false));
+    }
+    if (Double.isFinite(rule.highest())) {
+      lines.add(new Line(rule.name(), rule.terms(), over, -1, rule.highest(), false));
+    }
+  }
+
+  /**
+   * Variables that count the misses of a preferred rule on one side, up to the most there can be.
+   */
+  private List<Count> counts(Rule rule, double most, int sign) {
+    List<Count> counts = new ArrayList<>();
+    if (!rule.required() && Double.isFinite(most)) {
+      long held = 0;
+      for (long power = 1; held < most; power *= 2) {
+        long coefficient = Math.min(power, (long) most - held);
+        int variable = statement.literals() + counters.size();
+        counters.add(coefficient + " of the miss of '" + rule.name() + "'");
+        counts.add(new Count(sign * coefficient, variable));
+        objective.add(Text.decimal(rule.cost((double) coefficient)), variable);
+        held += coefficient;
+      }
+    }
+    return counts;
+  }
+
+  void write(Appendable out) throws IOException {
+    try {
+      writeHeader(out);
+      writeObjective(out);
+      for (Line line : lines) {
+        comment(line.name());
+        writeSum(line, out);
+        text.append(line.equal() ? "= " : ">= ");
+        text.append((long) (line.sign() * line.limit())).append(" ;\n");
+        flush(out, CHUNK);
+      }
+      flush(out, 0);
+    } catch (UncheckedIOException failed) {
+      throw failed.getCause();
+    }
+  }
+
+  private void writeHeader(Appendable out) {
+    int variables = statement.literals() + counters.size();
+    text.append("* #variable= ").append(variables);
+    text.append(" #constraint= ").append(lines.size());
+    Set<List<Integer>> products = products();
+    if (!products.isEmpty()) {
+      text.append(" #product= ").append(products.size()).append(" sizeproduct= ");
+      text.append(products.stream().mapToLong(List::size).sum());
+    }
+    text.append('\n');
+    comment(statement.name());
+    for (int k = 0; k < variables; k++) {
+      int literals = statement.literals();
+      String meaning = k < literals ? statement.describe(k) : counters.get(k - literals);
+      comment("x" + (k + 1) + " is " + meaning);
+      flush(out, CHUNK);
+    }
+  }
+
+  /** The different products of two literals or more. */
+  private Set<List<Integer>> products() {
+    Set<List<Integer>> products = new HashSet<>();
+    Polynomial.TermVisitor collect =
+        (coefficient, literals) -> {
+          if (literals.length > 1) {
+            List<Integer> product = new ArrayList<>(literals.length);
+            for (int literal : literals) {
+              product.add(literal);
+            }
+            products.add(product);
+          }
+        };
+    statement.objective().forEachTerm(collect);
+    lines.forEach(line -> line.terms().forEachTerm(collect));
+    return products;
+  }
+
+  private void writeObjective(Appendable out) {
+    if (objective.constant() != 0) {
+      BigDecimal constant = Text.decimal(objective.constant());
+      text.append(PseudoBooleanText.CONSTANT).append(' ').append(constant).append('\n');
+    }
+    if (objective.decimals() > 0) {
+      text.append(PseudoBooleanText.DECIMALS).append(' ').append(objective.decimals()).append('\n');
+    }
+    if (statement.sense() == Sense.MAXIMIZE) {
+      text.append(PseudoBooleanText.MAXIMIZE).append('\n');
+    }
+    if (!objective.isEmpty()) {
+      text.append("min: ");
+      objective.forEachTerm(
+          (coefficient, variables) -> {
+            term(coefficient, variables);
+            flush(out, CHUNK);
+          });
+      text.append(";\n");
+    }
+  }
+
+  private void writeSum(Line line, Appendable out) {
+    line.terms()
+        .forEachTerm(
+            (coefficient, literals) -> {
+              term(line.sign() * (long) coefficient, literals);
+              flush(out, CHUNK);
+            });
+    for (Count count : line.counts()) {
+      term(line.sign() * count.coefficient(), count.variable());
+    }
+  }
+
+  private void term(long coefficient, int... variables) {
+    text.append(coefficient < 0 ? "" : "+").append(coefficient).append(' ');
+    for (int variable : variables) {
+      text.append('x').append(variable + 1).append(' ');
+    }
+  }
+
+  /** A name in one line. */
+  private void comment(String words) {
+    text.append("* ").append(words.replaceAll("\\p{Cntrl}", " ")).append('\n');
+  }
+
+  private void flush(Appendable out, int above) {
+    if (text.length() >= above) {
+      try {
+        out.append(text);
+      } catch (IOException failed) {
+        throw new UncheckedIOException(failed);
+      }
+      text.setLength(0);
+    }
+  }
+}
