@@ -18,8 +18,8 @@ final class Inputs {
       paramLabel = "FILE",
       description = {
         "The instance: a Matrix Market file (symmetric coordinate; minimise x'Ax), an OR-Library"
-            + " binary quadratic programme (maximise), or a weighted edge list 'n m' / 'i j w'"
-            + " (maximum cut). Files compressed with gzip are read through. Also seeded:NAME, a"
+            + " binary quadratic programme (maximise), a weighted edge list 'n m' / 'i j w'"
+            + " (maximum cut), or OPB, the text of the pseudo-Boolean competitions. Files compressed with gzip are read through. Also seeded:NAME, a"
             + " published seeded instance such as seeded:p3000.1, or seeded:N:DENSITY:SEED."
       })
   private String file = "";
@@ -27,7 +27,7 @@ final class Inputs {
   @Option(
       names = "--as",
       paramLabel = "KIND",
-      description = "Read FILE as matrix, quadratic or cut, whatever its content looks like.")
+      description = "Read FILE as matrix, quadratic, cut or opb, whatever its content looks like.")
   private @Nullable String kind;
 
   @Option(

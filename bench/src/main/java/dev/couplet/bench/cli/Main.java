@@ -29,6 +29,7 @@ import picocli.CommandLine.Spec;
       SolveCommand.class,
       RateCommand.class,
       FitCommand.class,
+      LowerCommand.class,
       CommandLine.HelpCommand.class
     },
     mixinStandardHelpOptions = true,

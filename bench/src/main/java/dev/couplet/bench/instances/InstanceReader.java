@@ -18,7 +18,11 @@ import java.util.stream.Collectors;
  */
 public final class InstanceReader {
   private static final List<Format> FORMATS =
-      List.of(new MatrixText(), new BinaryQuadraticText(), new EdgeListText());
+      List.of(
+          new MatrixText(),
+          new BinaryQuadraticText(),
+          new EdgeListText(),
+          new PseudoBooleanInstanceText());
 
   private static final int HEAD = 1 << 16;
   private static final int HEAD_LINES = 3;

@@ -123,7 +123,7 @@ class InstanceReaderTest {
     IllegalArgumentException fault =
         assertThrows(IllegalArgumentException.class, () -> InstanceReader.standard().as("sudoku"));
     assertEquals(
-        "there is no kind of file 'sudoku'; the kinds are matrix, quadratic, cut",
+        "there is no kind of file 'sudoku'; the kinds are matrix, quadratic, cut, opb",
         fault.getMessage());
   }
 
