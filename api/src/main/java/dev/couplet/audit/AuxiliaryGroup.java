@@ -4,6 +4,7 @@ import dev.couplet.form.Polynomial;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * Auxiliary bits that hang together, at their best under whatever the decision bits are.
@@ -19,6 +20,11 @@ final class AuxiliaryGroup implements Flips {
   private final double[] base;
   private final double[][] pair;
   private final double[][] change;
+
+  /** What products of decision bits add to the fields, for members that occur in such terms. */
+  private final Running[] products;
+
+  private final int[] productOf;
   private final double[] field;
 
   /** Positions of the leaves among the members, and for each that of its neighbour in the core. */
@@ -32,7 +38,7 @@ final class AuxiliaryGroup implements Flips {
   private final double[] values;
   private double lowest;
 
-  /** The group of some bits of a form of degree 2. */
+  /** The group of some bits of a form; terms of degree 3 and more have one of them at most. */
   AuxiliaryGroup(Polynomial form, int decisionBits, List<Integer> members) {
     this.members = members.stream().mapToInt(Integer::intValue).toArray();
     int n = this.members.length;
@@ -49,6 +55,11 @@ final class AuxiliaryGroup implements Flips {
     for (int bit = 0; bit < decisionBits; bit++) {
       change[bit] = changes(form, bit);
     }
+    productOf = IntStream.range(0, n).filter(k -> inProducts(form, this.members[k])).toArray();
+    products =
+        Arrays.stream(productOf)
+            .mapToObj(k -> products(form, decisionBits, this.members[k]))
+            .toArray(Running[]::new);
     boolean[] isLeaf = leaves();
     core = positions(isLeaf, false);
     leaf = positions(isLeaf, true);
@@ -72,6 +83,25 @@ final class AuxiliaryGroup implements Flips {
       own[k] = form.coefficient(bit, members[k]);
     }
     return Arrays.stream(own).allMatch(value -> value == 0) ? new double[0] : own;
+  }
+
+  private static boolean inProducts(Polynomial form, int member) {
+    boolean[] found = {false};
+    form.forEachTerm(
+        (coefficient, variables) ->
+            found[0] |= variables.length > 2 && variables[variables.length - 1] == member);
+    return found[0];
+  }
+
+  private static Running products(Polynomial form, int decisionBits, int member) {
+    Polynomial.Builder ofDecisions = Polynomial.builder(decisionBits);
+    form.forEachTerm(
+        (coefficient, variables) -> {
+          if (variables.length > 2 && variables[variables.length - 1] == member) {
+            ofDecisions.add(coefficient, Arrays.copyOf(variables, variables.length - 1));
+          }
+        });
+    return new Running(ofDecisions.build());
   }
 
   /** Members with one neighbour; of two that have only each other, the first. */
@@ -114,7 +144,11 @@ final class AuxiliaryGroup implements Flips {
   }
 
   boolean touches(int bit) {
-    return change[bit].length > 0;
+    boolean touches = change[bit].length > 0;
+    for (Running product : products) {
+      touches |= product.termsOf(bit) > 0;
+    }
+    return touches;
   }
 
   @Override
@@ -123,15 +157,22 @@ final class AuxiliaryGroup implements Flips {
     for (long left = pattern; left != 0; left &= left - 1) {
       add(change[Long.numberOfTrailingZeros(left)], 1);
     }
+    for (int p = 0; p < products.length; p++) {
+      products[p].reset(pattern);
+      field[productOf[p]] += products[p].value();
+    }
     lowest = look();
   }
 
   @Override
   public void flip(int bit, long pattern) {
-    if (touches(bit)) {
-      add(change[bit], (pattern >>> bit & 1) != 0 ? 1 : -1);
-      lowest = look();
+    add(change[bit], (pattern >>> bit & 1) != 0 ? 1 : -1);
+    for (int p = 0; p < products.length; p++) {
+      double before = products[p].value();
+      products[p].flip(bit, pattern);
+      field[productOf[p]] += products[p].value() - before;
     }
+    lowest = look();
   }
 
   double lowest() {

@@ -16,7 +16,11 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
 
-/** The form taken apart by its ledger, coefficient by coefficient. */
+/**
+ * The form taken apart by its ledger, coefficient by coefficient; products of decision bits stand
+ * in the place of auxiliary bits that are best at them, so that parts which share such bits come
+ * apart.
+ */
 final class LedgerParts {
   /** One source in one role: a preferred rule has a cost and a penalty. */
   private record Part(String source, Kind kind) {}
@@ -24,6 +28,8 @@ final class LedgerParts {
   private final Lowered lowered;
   private final Qubo qubo;
   private final Map<Part, Polynomial.Builder> terms = new LinkedHashMap<>();
+  private final Map<Part, Polynomial> parts = new LinkedHashMap<>();
+  private final ProductBits products;
   private final Map<Integer, Part> partOfAuxiliary = new HashMap<>();
   private final Set<Part> entangled = new HashSet<>();
   private final double error;
@@ -46,6 +52,9 @@ final class LedgerParts {
         }
       }
     }
+    products = ProductBits.of(qubo.toPolynomial(), lowered.decisionBits(), error);
+    terms.forEach((part, own) -> parts.put(part, products.replacedIn(own.build())));
+    parts.forEach(this::claim);
   }
 
   private double take(List<Entry> entries, int... variables) {
@@ -56,11 +65,17 @@ final class LedgerParts {
       terms
           .computeIfAbsent(part, p -> Polynomial.builder(qubo.size()))
           .add(entry.amount(), variables);
-      for (int variable : variables) {
-        claim(part, variable);
-      }
     }
     return sum;
+  }
+
+  private void claim(Part part, Polynomial own) {
+    own.forEachTerm(
+        (coefficient, variables) -> {
+          for (int variable : variables) {
+            claim(part, variable);
+          }
+        });
   }
 
   private void claim(Part part, int variable) {
@@ -94,9 +109,9 @@ final class LedgerParts {
   private Optional<Part> partOf(Weight weight) {
     Part code = new Part(weight.rule(), Kind.CODE);
     Part penalty = new Part(weight.rule(), Kind.PENALTY);
-    boolean isCode = terms.containsKey(code);
+    boolean isCode = parts.containsKey(code);
     Part part = isCode ? code : penalty;
-    boolean told = terms.containsKey(part) && !(isCode && terms.containsKey(penalty));
+    boolean told = parts.containsKey(part) && !(isCode && parts.containsKey(penalty));
     return told && addsUp && !entangled.contains(part) ? Optional.of(part) : Optional.empty();
   }
 
@@ -107,7 +122,7 @@ final class LedgerParts {
       partOf(weight)
           .ifPresent(
               part -> {
-                Polynomial own = Objects.requireNonNull(terms.get(part)).build();
+                Polynomial own = Objects.requireNonNull(parts.get(part));
                 guards.put(
                     weight.rule(), new Guard(weight, Landscape.of(own, lowered.decisionBits())));
               });
@@ -118,15 +133,15 @@ final class LedgerParts {
   /** The form without the parts that have guards. */
   Landscape rest(List<Weight> weights) {
     if (!addsUp) {
-      return Landscape.of(qubo.toPolynomial(), lowered.decisionBits());
+      return Landscape.of(products.replacedIn(qubo.toPolynomial()), lowered.decisionBits());
     }
     Set<Part> guarded = new HashSet<>();
     weights.forEach(weight -> partOf(weight).ifPresent(guarded::add));
     Polynomial.Builder rest = Polynomial.builder(qubo.size());
-    terms.forEach(
+    parts.forEach(
         (part, own) -> {
           if (!guarded.contains(part)) {
-            rest.add(own.build(), 1);
+            rest.add(own, 1);
           }
         });
     return Landscape.of(rest.build(), lowered.decisionBits());
