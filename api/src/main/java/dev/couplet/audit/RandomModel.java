@@ -60,7 +60,7 @@ final class RandomModel {
     }
     Plan.Draft draft = model.plan();
     bits.forEach(bit -> draft.set(bit, random.nextBoolean()));
-    choices.forEach(choice -> draft.set(choice, random.nextInt(choice.values())));
+    choices.forEach(choice -> draft.set(choice, random.nextInt(choice.options().size())));
     return draft.evaluate();
   }
 

@@ -4,7 +4,6 @@ import dev.couplet.form.Polynomial;
 import dev.couplet.form.Qubo;
 import dev.couplet.lower.Ledger.Kind;
 import dev.couplet.lower.Ledger.Source;
-import dev.couplet.model.Choice;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Range;
 import dev.couplet.model.Rule;
@@ -24,6 +23,7 @@ final class Assembly {
 
   private final Statement statement;
   private final Lowering settings;
+  private final Coding coding;
   private final BitTable bits;
   private final Range objective;
   private final boolean whole;
@@ -33,7 +33,8 @@ final class Assembly {
   Assembly(Statement statement, Lowering settings) {
     this.statement = statement;
     this.settings = settings;
-    this.bits = new BitTable(statement);
+    this.coding = new Coding(statement, settings);
+    this.bits = new BitTable(coding);
     this.objective = objectiveRange();
     this.whole = objectiveIsWhole();
   }
@@ -41,17 +42,14 @@ final class Assembly {
   Lowered lowered() {
     int sign = statement.sense().sign();
     for (Objective part : statement.objectives()) {
-      addSource(part.name(), Kind.OBJECTIVE, part.terms().times(sign), 1);
+      addSource(part.name(), Kind.OBJECTIVE, coding.overBits(part.terms().times(sign)), 1);
     }
-    for (Decision decision : statement.decisions()) {
-      if (decision instanceof Choice<?> choice) {
-        addCode(choice);
-      }
-    }
+    addCodes();
     for (Rule rule : statement.rules()) {
       addRule(rule);
     }
-    return new Lowered(statement, qubo(), bits, ledger(), List.copyOf(weights), structure());
+    return new Lowered(
+        statement, qubo(), coding, bits, ledger(), List.copyOf(weights), structure());
   }
 
   /** Sources were made while bits were still being added: all are brought to the final number. */
@@ -64,26 +62,29 @@ final class Assembly {
     return new Ledger(widened, bits.meanings());
   }
 
-  private void addCode(Choice<?> choice) {
-    String name = codeName(choice);
-    Polynomial.Builder difference = Polynomial.builder(statement.literals()).add(-1);
-    int first = statement.firstLiteral(choice);
-    for (int k = 0; k < choice.values(); k++) {
-      difference.add(1, first + k);
+  /** A decision of several groups has one code, whose penalties add up. */
+  private void addCodes() {
+    List<Coding.Coded> coded = coding.coded();
+    for (int from = 0; from < coded.size(); ) {
+      Decision decision = coded.get(from).decision();
+      List<Penalty> penalties = new ArrayList<>();
+      for (; from < coded.size() && coded.get(from).decision() == decision; from++) {
+        Coding.Coded one = coded.get(from);
+        penalties.add(new Penalty(coding.penalty(one), one.code().form()));
+      }
+      Penalty penalty = Penalty.sum(penalties, bits.size());
+      if (penalty.terms().terms() > 0) {
+        addPenalty(decision.code(), Kind.CODE, penalty);
+      }
     }
-    addPenalty(name, Kind.CODE, new Penalty(SquareForm.squared(difference), "square"));
-  }
-
-  /** The words for the code of a choice, the same as for a plan that leaves it undecided. */
-  static String codeName(Decision choice) {
-    return "one option of '" + choice.name() + "'";
   }
 
   private void addRule(Rule rule) {
     if (rule.alwaysKept()) {
       weights.add(new Weight(rule.name(), "nothing", 0, "every plan keeps it"));
     } else if (rule.required()) {
-      addPenalty(rule.name(), Kind.PENALTY, RequiredRule.penalty(rule, bits));
+      List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits);
+      addPenalty(rule.name(), Kind.PENALTY, Penalty.sum(penalties, bits.size()));
     } else {
       addPreferred(rule);
     }
@@ -96,18 +97,28 @@ final class Assembly {
   }
 
   private void addPreferred(Rule rule) {
-    PreferredRule preferred = PreferredRule.of(rule, bits);
-    double unitCost = rule.cost(1);
-    addSource(rule.name(), Kind.COST, preferred.cost(), unitCost);
-    if (preferred.tie().isEmpty()) {
-      weights.add(new Weight(rule.name(), preferred.form(), unitCost, "its own cost, exactly"));
+    List<PreferredRule> parts = new ArrayList<>();
+    double unitCost = 0;
+    for (Rule.Part part : rule.parts()) {
+      if (!part.alwaysKept()) {
+        PreferredRule preferred = PreferredRule.of(part, rule.squared(), rule.name(), coding, bits);
+        parts.add(preferred);
+        addSource(rule.name(), Kind.COST, preferred.cost(), part.cost(1));
+        unitCost = Math.max(unitCost, part.cost(1));
+      }
+    }
+    String form = Penalty.words(parts.stream().map(PreferredRule::form).toList());
+    if (parts.stream().allMatch(part -> part.tie().isEmpty())) {
+      weights.add(new Weight(rule.name(), form, unitCost, "its own cost, exactly"));
       return;
     }
     boolean wholeCost = unitCost == Math.rint(unitCost);
     double enough = RangeBound.above(unitCost, wholeCost);
     String reason = "above its cost a unit, so that counting the whole amount is cheapest";
-    weights.add(new Weight(rule.name(), preferred.form(), enough, reason));
-    addSource(rule.name(), Kind.PENALTY, preferred.tie().get(), enough);
+    weights.add(new Weight(rule.name(), form, enough, reason));
+    for (PreferredRule part : parts) {
+      part.tie().ifPresent(tie -> addSource(rule.name(), Kind.PENALTY, tie, enough));
+    }
   }
 
   private void addSource(String name, Kind kind, Polynomial terms, double factor) {
@@ -119,12 +130,11 @@ final class Assembly {
     Polynomial minimised = statement.objective().times(statement.sense().sign());
     double highest = statement.range(minimised).highest();
     for (Rule rule : statement.rules()) {
-      if (!rule.required()) {
-        highest += rule.cost(rule.largestViolation());
-      }
+      highest += rule.largestCost();
     }
-    double lowest = Terms.lowest(minimised);
-    double magnitude = Math.max(Terms.magnitude(minimised), Math.abs(highest));
+    Polynomial overBits = coding.overBits(minimised);
+    double lowest = Terms.lowest(overBits);
+    double magnitude = Math.max(Terms.magnitude(overBits), Math.abs(highest));
     double error = objectiveIsWhole() || magnitude == 0 ? 0 : Math.ulp(magnitude) * 4;
     error *= statement.objective().terms() + statement.rules().size() + 1;
     return new Range(lowest - error, highest + error);
@@ -133,8 +143,10 @@ final class Assembly {
   private boolean objectiveIsWhole() {
     boolean all = Terms.whole(statement.objective());
     for (Rule rule : statement.rules()) {
-      double cost = rule.cost(1);
-      all &= cost == Math.rint(cost);
+      for (Rule.Part part : rule.parts()) {
+        double cost = part.cost(1);
+        all &= cost == Math.rint(cost);
+      }
     }
     return all;
   }
@@ -208,16 +220,7 @@ final class Assembly {
   }
 
   private Structure structure() {
-    List<List<Integer>> sets = new ArrayList<>();
-    for (Decision decision : statement.decisions()) {
-      if (decision instanceof Choice<?> choice) {
-        List<Integer> set = new ArrayList<>();
-        for (int k = 0; k < choice.values(); k++) {
-          set.add(statement.firstLiteral(choice) + k);
-        }
-        sets.add(set);
-      }
-    }
+    List<List<Integer>> sets = coding.exactlyOne();
     return sets.isEmpty() ? Structure.none() : Structure.exactlyOne(sets);
   }
 }

@@ -1,12 +1,11 @@
 package dev.couplet.lower;
 
-import dev.couplet.model.Statement;
 import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The bits of the form being built: one for each literal of the model, then the auxiliary ones,
- * each with its meaning and a way to set it best once the bits before it are known.
+ * The bits of the form being built: those of the decisions, then the auxiliary ones, each with its
+ * meaning and a way to set it best once the bits before it are known.
  */
 final class BitTable {
   /** Sets auxiliary bits to their best values, given all bits before them. */
@@ -19,11 +18,9 @@ final class BitTable {
   private final List<String> meanings = new ArrayList<>();
   private final List<Completion> completions = new ArrayList<>();
 
-  BitTable(Statement statement) {
-    decisionBits = statement.literals();
-    for (int literal = 0; literal < decisionBits; literal++) {
-      meanings.add(statement.describe(literal));
-    }
+  BitTable(Coding coding) {
+    decisionBits = coding.bits();
+    meanings.addAll(coding.meanings());
   }
 
   /** Adds an auxiliary bit and returns its number. */

@@ -2,40 +2,57 @@ package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
 import dev.couplet.model.Range;
-import dev.couplet.model.Rule;
+import dev.couplet.model.Rule.Part;
 
 /**
- * What a rule limits, tightened: {@code lowest <= terms <= highest}, all whole. A limit that every
- * plan keeps is infinite.
+ * What a part of a rule limits, over bits and tightened: {@code lowest <= terms <= highest}, all
+ * whole, in steps above 1 only between finite limits. A limit that every plan keeps is infinite.
  *
- * @param terms the polynomial over literals, without a constant
+ * @param terms the polynomial over bits, without a constant
  * @param lowest whole, or minus infinity
  * @param highest whole, or infinity
+ * @param step the terms lie on {@code lowest + k step}
  * @param range between what the terms lie under any plan
  */
-record Limits(Polynomial terms, double lowest, double highest, Range range) {
+record Limits(Polynomial terms, double lowest, double highest, double step, Range range) {
   /**
    * The limits of a required rule, divided by the coefficients' common factor and rounded inwards.
    */
-  static Limits tightened(Rule rule) {
-    double divisor = rule.divisor();
-    Polynomial.Builder terms = Polynomial.builder(rule.terms().size());
-    rule.terms().forEachTerm((coefficient, literals) -> terms.add(coefficient / divisor, literals));
-    Range range =
+  static Limits tightened(Part part, Coding coding) {
+    double divisor = part.divisor();
+    if (divisor <= 1 || part.step() > 1) {
+      return exact(part, coding);
+    }
+    Polynomial.Builder divided = Polynomial.builder(part.terms().size());
+    part.terms()
+        .forEachTerm((coefficient, literals) -> divided.add(coefficient / divisor, literals));
+    return over(
+        coding,
+        divided.build(),
+        Math.ceil(part.lowest() / divisor),
+        Math.floor(part.highest() / divisor),
+        1,
         new Range(
-            Math.ceil(rule.range().lowest() / divisor),
-            Math.floor(rule.range().highest() / divisor));
-    return new Limits(
-            terms.build(),
-            Math.ceil(rule.lowest() / divisor),
-            Math.floor(rule.highest() / divisor),
-            range)
-        .withoutImplied();
+            Math.ceil(part.range().lowest() / divisor),
+            Math.floor(part.range().highest() / divisor)));
   }
 
   /** The limits of a preferred rule, as they are: rounding would change the amount of a miss. */
-  static Limits exact(Rule rule) {
-    return new Limits(rule.terms(), rule.lowest(), rule.highest(), rule.range()).withoutImplied();
+  static Limits exact(Part part, Coding coding) {
+    return over(coding, part.terms(), part.lowest(), part.highest(), part.step(), part.range());
+  }
+
+  /** Over bits, the constants that literals bring along moved into the limits. */
+  private static Limits over(
+      Coding coding, Polynomial terms, double lowest, double highest, double step, Range range) {
+    Polynomial bits = coding.overBits(terms);
+    double constant = bits.constant();
+    if (constant != 0) {
+      bits = Polynomial.builder(bits.size()).add(bits, 1).add(-constant).build();
+    }
+    Range moved = new Range(range.lowest() - constant, range.highest() - constant);
+    Limits limits = new Limits(bits, lowest - constant, highest - constant, step, moved);
+    return step > 1 ? limits : limits.withoutImplied();
   }
 
   private Limits withoutImplied() {
@@ -43,6 +60,7 @@ record Limits(Polynomial terms, double lowest, double highest, Range range) {
         terms,
         lowest <= range.lowest() ? Double.NEGATIVE_INFINITY : lowest,
         highest >= range.highest() ? Double.POSITIVE_INFINITY : highest,
+        step,
         range);
   }
 
@@ -54,8 +72,12 @@ record Limits(Polynomial terms, double lowest, double highest, Range range) {
     return highest != Double.POSITIVE_INFINITY;
   }
 
-  /** By how much a value of the terms misses the limits. */
+  /** By how much a value of the terms misses the nearest one that keeps the limits. */
   double violation(double value) {
-    return Math.max(0, Math.max(value - highest, lowest - value));
+    if (step == 1 || value <= lowest || value >= highest) {
+      return Math.max(0, Math.max(value - highest, lowest - value));
+    }
+    double beyond = (value - lowest) % step;
+    return Math.min(beyond, step - beyond);
   }
 }

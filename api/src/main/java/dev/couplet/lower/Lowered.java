@@ -3,27 +3,28 @@ package dev.couplet.lower;
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.model.Decision;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
 import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Structure;
-import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * A model as a quadratic form, and the way back.
  *
- * <p>Bits {@code 0 .. decisionBits() - 1} are the literals of the statement; the rest are
- * auxiliary. On a feasible plan, with auxiliary bits at their best, the form's energy is the plan's
- * value, its sign changed if the model maximises. Every other pattern has an energy above the best
- * feasible one, if the weights suffice. Immutable and thread-safe.
+ * <p>Bits {@code 0 .. decisionBits() - 1} stand for the decisions of the statement, in their order;
+ * the rest are auxiliary. On a feasible plan, with auxiliary bits at their best, the form's energy
+ * is the plan's value, its sign changed if the model maximises. Every other pattern has an energy
+ * above the best feasible one, if the weights suffice. Immutable and thread-safe.
  */
 @CheckReturnValue
 public final class Lowered {
   private final Statement statement;
   private final Qubo qubo;
-  private final int decisionBits;
+  private final Coding coding;
   private final List<BitTable.Completion> completions;
   private final Ledger ledger;
   private final List<Weight> weights;
@@ -32,13 +33,14 @@ public final class Lowered {
   Lowered(
       Statement statement,
       Qubo qubo,
+      Coding coding,
       BitTable bits,
       Ledger ledger,
       List<Weight> weights,
       Structure structure) {
     this.statement = statement;
     this.qubo = qubo;
-    this.decisionBits = bits.decisionBits();
+    this.coding = coding;
     this.completions = bits.completions();
     this.ledger = ledger;
     this.weights = weights;
@@ -57,12 +59,22 @@ public final class Lowered {
 
   /** The number of bits that stand for decisions; they come first. */
   public int decisionBits() {
-    return decisionBits;
+    return coding.bits();
+  }
+
+  /**
+   * The bits that stand for a decision, ascending; auxiliary bits are not among them.
+   *
+   * @throws IllegalArgumentException if it is no decision of the statement that was lowered
+   */
+  public List<Integer> bits(Decision decision) {
+    int[] range = coding.bitsOf(decision);
+    return IntStream.range(range[0], range[1]).boxed().toList();
   }
 
   /** The number of auxiliary bits. */
   public int auxiliaryBits() {
-    return qubo.size() - decisionBits;
+    return qubo.size() - coding.bits();
   }
 
   /** Where each coefficient came from, and what each bit stands for. */
@@ -94,7 +106,7 @@ public final class Lowered {
               + qubo.size()
               + "; pass a state of this form");
     }
-    return statement.plan(State.of(Arrays.copyOf(state.toBooleans(), decisionBits)));
+    return coding.plan(state);
   }
 
   /** The plans that draws of this form stand for. */
@@ -109,7 +121,7 @@ public final class Lowered {
    * @throws IllegalArgumentException if the plan is of another statement
    */
   public State complete(Plan plan) {
-    if (plan.literals().size() != decisionBits || !plan.statement().sameModel(statement)) {
+    if (plan.literals().size() != statement.literals() || !plan.statement().sameModel(statement)) {
       throw new IllegalArgumentException(
           "the plan is of "
               + plan.statement()
@@ -117,7 +129,8 @@ public final class Lowered {
               + statement
               + "; evaluate the plan on the model as it was lowered");
     }
-    boolean[] bits = Arrays.copyOf(plan.literals().toBooleans(), qubo.size());
+    boolean[] bits = new boolean[qubo.size()];
+    coding.write(plan.literals(), bits);
     completions.forEach(completion -> completion.complete(bits));
     return State.of(bits);
   }
@@ -137,7 +150,7 @@ public final class Lowered {
     return "Lowered("
         + statement.name()
         + ": "
-        + decisionBits
+        + coding.bits()
         + " decision bits, "
         + auxiliaryBits()
         + " auxiliary bits, "

@@ -2,6 +2,7 @@ package dev.couplet.lower;
 
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.model.Choice;
+import dev.couplet.model.Decision;
 import dev.couplet.model.Model;
 import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;
@@ -44,14 +45,17 @@ import java.util.Set;
  */
 @CheckReturnValue
 public final class Lowering {
-  private static final Lowering STANDARD = new Lowering(Weights.rangeBound(), Map.of());
+  private static final Lowering STANDARD =
+      new Lowering(Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot());
 
   private final Weights weights;
   private final Map<String, Double> byName;
+  private final ChoiceEncoding choices;
 
-  private Lowering(Weights weights, Map<String, Double> byName) {
+  private Lowering(Weights weights, Map<String, Double> byName, ChoiceEncoding choices) {
     this.weights = weights;
     this.byName = byName;
+    this.choices = choices;
   }
 
   /** The defaults: choices with one bit an option, weights by the range bound. */
@@ -61,7 +65,12 @@ public final class Lowering {
 
   /** These settings with another way to choose weights. */
   public Lowering with(Weights newWeights) {
-    return new Lowering(newWeights, byName);
+    return new Lowering(newWeights, byName, choices);
+  }
+
+  /** These settings with another code for choices. */
+  public Lowering with(ChoiceEncoding newChoices) {
+    return new Lowering(weights, byName, newChoices);
   }
 
   /**
@@ -78,7 +87,7 @@ public final class Lowering {
     }
     Map<String, Double> more = new LinkedHashMap<>(byName);
     more.put(rule, value);
-    return new Lowering(weights, Collections.unmodifiableMap(more));
+    return new Lowering(weights, Collections.unmodifiableMap(more), choices);
   }
 
   /**
@@ -102,9 +111,7 @@ public final class Lowering {
 
   private void requireKnown(Statement statement) {
     Set<String> known = new HashSet<>();
-    statement.decisions().stream()
-        .filter(Choice.class::isInstance)
-        .forEach(choice -> known.add(Assembly.codeName(choice)));
+    statement.decisions().stream().map(Decision::code).forEach(known::add);
     statement.rules().stream().map(Rule::name).forEach(known::add);
     for (Rule rule : statement.rules()) {
       if (!rule.required() && byName.containsKey(rule.name())) {
@@ -124,6 +131,10 @@ public final class Lowering {
                 + "' has no rule of that name");
       }
     }
+  }
+
+  ChoiceEncoding encoding(Decision decision) {
+    return decision instanceof Choice ? choices : ChoiceEncoding.oneHot();
   }
 
   Weights.Chosen choose(Weights.Facts facts) {

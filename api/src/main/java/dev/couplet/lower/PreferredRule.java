@@ -1,7 +1,7 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
-import dev.couplet.model.Rule;
+import dev.couplet.model.Rule.Part;
 import java.util.Optional;
 
 /**
@@ -19,13 +19,24 @@ import java.util.Optional;
  * @param form how it was made, in words
  */
 record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
-  static PreferredRule of(Rule rule, BitTable bits) {
-    Limits limits = Limits.exact(rule);
+  /** The part of a rule; its cost is the amount, or the square of the amount. */
+  static PreferredRule of(Part part, boolean squared, String rule, Coding coding, BitTable bits) {
+    Limits limits = Limits.exact(part, coding);
+    return squared ? squared(limits, rule, bits) : single(limits, rule, bits);
+  }
+
+  /** At the best slack, the square of the remaining difference is the amount squared. */
+  private static PreferredRule squared(Limits limits, String rule, BitTable bits) {
+    Penalty square = SquareForm.of(limits, rule, bits);
+    return new PreferredRule(square.terms(), Optional.empty(), "amount squared, " + square.form());
+  }
+
+  private static PreferredRule single(Limits limits, String rule, BitTable bits) {
     Optional<Penalty> twoBits = TwoBitForm.of(limits, bits.size());
     if (twoBits.isPresent()) {
       return new PreferredRule(twoBits.get().terms(), Optional.empty(), twoBits.get().form());
     }
-    return linear(limits, bits.size()).orElseGet(() -> counted(limits, rule.name(), bits));
+    return linear(limits, bits.size()).orElseGet(() -> counted(limits, rule, bits));
   }
 
   /** Where no bit pattern over-fulfils the limit, the amount is the difference itself. */
@@ -44,9 +55,11 @@ record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
   private static PreferredRule counted(Limits limits, String rule, BitTable bits) {
     double low = limits.range().lowest();
     double high = limits.range().highest();
-    double room = room(limits, low, high);
-    double mostOver = limits.hasHighest() ? high - limits.highest() : 0;
-    double mostUnder = limits.hasLowest() ? limits.lowest() - low : 0;
+    double step = limits.step();
+    double between = Math.floor(step / 2);
+    double room = room(limits, low, high) / step;
+    double mostOver = limits.hasHighest() ? Math.max(between, high - limits.highest()) : 0;
+    double mostUnder = limits.hasLowest() ? Math.max(between, limits.lowest() - low) : 0;
     Slack slack = Slack.upTo(room, "the slack of '" + rule + "'", bits);
     Slack over = Slack.upTo(mostOver, "the excess over '" + rule + "'", bits);
     Slack under = Slack.upTo(mostUnder, "the shortage of '" + rule + "'", bits);
@@ -54,7 +67,7 @@ record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
     double limit = fromAbove ? limits.highest() : limits.lowest();
     Polynomial.Builder difference = SquareForm.difference(limits.terms(), bits.size());
     difference.add(-limit);
-    slack.addTo(difference, fromAbove ? 1 : -1);
+    slack.addTo(difference, fromAbove ? step : -step);
     over.addTo(difference, -1);
     under.addTo(difference, 1);
     Polynomial.Builder amount = Polynomial.builder(bits.size());
@@ -63,9 +76,12 @@ record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
     bits.completeWith(
         values -> {
           double value = Terms.value(limits.terms(), values);
-          over.set(value - limits.highest(), values);
-          under.set(limits.lowest() - value, values);
-          slack.set(Math.min(room, fromAbove ? limit - value : value - limit), values);
+          double wanted = Math.rint((fromAbove ? limit - value : value - limit) / step);
+          double steps = Math.max(0, Math.min(room, wanted));
+          slack.set(steps, values);
+          double beyond = value - (fromAbove ? limit - steps * step : limit + steps * step);
+          over.set(beyond, values);
+          under.set(-beyond, values);
         });
     int used = slack.bits() + over.bits() + under.bits();
     return new PreferredRule(

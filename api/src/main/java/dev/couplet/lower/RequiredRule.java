@@ -1,16 +1,24 @@
 package dev.couplet.lower;
 
 import dev.couplet.model.Rule;
+import java.util.List;
 import java.util.Optional;
 
-/** Chooses the penalty of a required rule: the forms without auxiliary bits first. */
+/** Chooses the penalties of a required rule's parts: the forms without auxiliary bits first. */
 final class RequiredRule {
   private RequiredRule() {}
 
-  static Penalty penalty(Rule rule, BitTable bits) {
-    Limits limits = Limits.tightened(rule);
+  /** The penalties of the parts that some plan breaks, in their order. */
+  static List<Penalty> penalties(Rule rule, Coding coding, BitTable bits) {
+    return rule.parts().stream()
+        .filter(part -> !part.alwaysKept())
+        .map(part -> penalty(Limits.tightened(part, coding), rule.name(), bits))
+        .toList();
+  }
+
+  private static Penalty penalty(Limits limits, String rule, BitTable bits) {
     Optional<Penalty> exact =
         TwoBitForm.of(limits, bits.size()).or(() -> ConflictForm.of(limits, bits.size()));
-    return exact.orElseGet(() -> SquareForm.of(limits, rule.name(), bits));
+    return exact.orElseGet(() -> SquareForm.of(limits, rule, bits));
   }
 }

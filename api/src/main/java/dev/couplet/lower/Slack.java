@@ -41,10 +41,10 @@ final class Slack {
     return coefficients.length;
   }
 
-  /** Adds {@code sign} times the number to a polynomial. */
-  void addTo(Polynomial.Builder terms, int sign) {
+  /** Adds {@code factor} times the number to a polynomial. */
+  void addTo(Polynomial.Builder terms, double factor) {
     for (int k = 0; k < coefficients.length; k++) {
-      terms.add(sign * (double) coefficients[k], first + k);
+      terms.add(factor * coefficients[k], first + k);
     }
   }
 

@@ -21,16 +21,18 @@ final class SquareForm {
         fromAbove
             ? limits.highest() - Math.max(limits.lowest(), limits.range().lowest())
             : limits.range().highest() - limits.lowest();
-    Slack slack = Slack.upTo(most, "the slack of '" + rule + "'", bits);
+    double step = limits.step();
+    Slack slack = Slack.upTo(most / step, "the slack of '" + rule + "'", bits);
     Polynomial.Builder difference = difference(limits.terms(), bits.size());
-    slack.addTo(difference, fromAbove ? 1 : -1);
+    slack.addTo(difference, fromAbove ? step : -step);
     difference.add(fromAbove ? -limits.highest() : -limits.lowest());
     bits.completeWith(
         values -> {
           double value = Terms.value(limits.terms(), values);
-          slack.set(fromAbove ? limits.highest() - value : value - limits.lowest(), values);
+          double missing = fromAbove ? limits.highest() - value : value - limits.lowest();
+          slack.set(Math.rint(missing / step), values);
         });
-    String form = "square, slack 0.." + (long) most + " in " + slack.bits() + " bits";
+    String form = "square, slack 0.." + (long) (most / step) + " in " + slack.bits() + " bits";
     return new Penalty(squared(difference), form);
   }
 

@@ -21,8 +21,13 @@ public final class Bit extends Literal implements Decision {
   }
 
   @Override
-  public int values() {
+  public long values() {
     return 2;
+  }
+
+  @Override
+  public String code() {
+    return "one value of '" + name + "'";
   }
 
   @Override

@@ -14,16 +14,14 @@ import java.util.Map;
  */
 @CheckReturnValue
 public final class Choice<T> implements Decision {
-  private final Model owner;
   private final String name;
-  private final int firstLiteral;
+  private final Slot slot;
   private final List<T> options;
   private final Map<T, Integer> positions;
 
   Choice(Model owner, String name, int firstLiteral, List<T> options) {
-    this.owner = owner;
     this.name = name;
-    this.firstLiteral = firstLiteral;
+    this.slot = new Slot(owner, firstLiteral, options.size(), 1);
     this.options = options;
     this.positions = new HashMap<>();
     for (T option : options) {
@@ -40,8 +38,13 @@ public final class Choice<T> implements Decision {
   }
 
   @Override
-  public int values() {
+  public long values() {
     return options.size();
+  }
+
+  @Override
+  public String code() {
+    return "one option of '" + name + "'";
   }
 
   /** The options, in the order given. */
@@ -55,7 +58,7 @@ public final class Choice<T> implements Decision {
    * @throws IllegalArgumentException if it is not among the options
    */
   public Literal is(T option) {
-    return new ChoiceLiteral(this, positionOf(option));
+    return new Fact(this, slot, positionOf(option));
   }
 
   int positionOf(T option) {
@@ -67,12 +70,8 @@ public final class Choice<T> implements Decision {
     return position;
   }
 
-  int firstLiteral() {
-    return firstLiteral;
-  }
-
-  Model owner() {
-    return owner;
+  Slot slot() {
+    return slot;
   }
 
   @Override

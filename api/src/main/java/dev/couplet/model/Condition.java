@@ -1,35 +1,50 @@
 package dev.couplet.model;
 
+import java.util.List;
+import java.util.stream.Collectors;
+
 /**
- * A statement about a plan that may hold or not: an expression lies between two limits.
+ * A statement about a plan that may hold or not: an expression lies between two limits, or several
+ * do.
  *
  * <p>It has no name, and no effect until a {@link Model} requires or prefers it. Immutable.
  */
 public final class Condition {
-  private final Expr expr;
-  private final double lowest;
-  private final double highest;
-
-  Condition(Expr expr, double lowest, double highest) {
-    this.expr = expr;
-    this.lowest = lowest;
-    this.highest = highest;
+  /**
+   * One expression between its limits.
+   *
+   * @param expr the expression
+   * @param lowest the lower limit, or minus infinity
+   * @param highest the upper limit, or infinity
+   * @param step above 0, the values that count lie on {@code lowest + k step}; 0 if all do
+   */
+  record Part(Expr expr, double lowest, double highest, double step) {
+    @Override
+    public String toString() {
+      String text = Text.between(expr.toString(), lowest, highest);
+      return step == 0 ? text : text + " in steps of " + Text.number(step);
+    }
   }
 
-  Expr expr() {
-    return expr;
+  private static final int SHOWN = 4;
+
+  private final List<Part> parts;
+
+  Condition(List<Part> parts) {
+    this.parts = List.copyOf(parts);
   }
 
-  double lowest() {
-    return lowest;
+  static Condition between(Expr expr, double lowest, double highest) {
+    return new Condition(List.of(new Part(expr, lowest, highest, 0)));
   }
 
-  double highest() {
-    return highest;
+  List<Part> parts() {
+    return parts;
   }
 
   @Override
   public String toString() {
-    return Text.between(expr.toString(), lowest, highest);
+    String text = parts.stream().limit(SHOWN).map(Part::toString).collect(Collectors.joining(", "));
+    return parts.size() > SHOWN ? text + ", ... " + (parts.size() - SHOWN) + " more" : text;
   }
 }

@@ -8,6 +8,12 @@ public sealed interface Decision permits Bit, Choice {
   /** The name, unique in the model. */
   String name();
 
-  /** The number of values to choose from. */
-  int values();
+  /** The number of values to choose from; the largest long if there are more. */
+  long values();
+
+  /**
+   * The words under which plans and lowerings speak of the condition that the decision has one
+   * value, as they speak of a rule by its name.
+   */
+  String code();
 }

@@ -27,8 +27,10 @@ final class Description {
     }
     for (Rule rule : statement.rules()) {
       text.append(rule.required() ? "  require " : "  prefer ").append(rule.name()).append(": ");
-      text.append(Text.between(terms(rule.terms()), rule.lowest(), rule.highest()));
-      text.append(units(rule)).append('\n');
+      for (int p = 0; p < rule.parts().size(); p++) {
+        text.append(p == 0 ? "" : "; and ").append(part(rule.parts().get(p)));
+      }
+      text.append(cost(rule)).append('\n');
     }
     for (Objective objective : statement.objectives()) {
       text.append(statement.sense() == Sense.MINIMIZE ? "  minimize " : "  maximize ");
@@ -44,10 +46,17 @@ final class Description {
     return listed.toString();
   }
 
-  private static String units(Rule rule) {
-    String unit = rule.unit() == 1 ? "" : " (in units of " + Text.number(rule.unit()) + ")";
-    String cost = rule.required() ? "" : ", each unit costs " + Text.number(rule.costPerUnit());
-    return unit + cost + (rule.alwaysKept() ? "; every plan keeps it" : "");
+  private String part(Rule.Part part) {
+    String limits = Text.between(terms(part.terms()), part.lowest(), part.highest());
+    String step = part.step() == 1 ? "" : " in steps of " + Text.number(part.step());
+    String unit = part.unit() == 1 ? "" : " (in units of " + Text.number(part.unit()) + ")";
+    return limits + step + unit;
+  }
+
+  private static String cost(Rule rule) {
+    String of = rule.squared() ? ", the amount squared costs " : ", each unit costs ";
+    String cost = rule.required() ? "" : of + Text.number(rule.costPerUnit());
+    return cost + (rule.alwaysKept() ? "; every plan keeps it" : "");
   }
 
   private String terms(Polynomial polynomial) {

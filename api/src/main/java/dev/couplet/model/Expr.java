@@ -103,7 +103,7 @@ public abstract sealed class Expr permits Literal, Node {
   /** The condition that this is at most a number. */
   public final Condition atMost(double highest) {
     Check.finite("the upper limit", highest);
-    return new Condition(this, Double.NEGATIVE_INFINITY, highest);
+    return Condition.between(this, Double.NEGATIVE_INFINITY, highest);
   }
 
   /** The condition that this is at most another expression. */
@@ -114,7 +114,7 @@ public abstract sealed class Expr permits Literal, Node {
   /** The condition that this is at least a number. */
   public final Condition atLeast(double lowest) {
     Check.finite("the lower limit", lowest);
-    return new Condition(this, lowest, Double.POSITIVE_INFINITY);
+    return Condition.between(this, lowest, Double.POSITIVE_INFINITY);
   }
 
   /** The condition that this is at least another expression. */
@@ -125,7 +125,7 @@ public abstract sealed class Expr permits Literal, Node {
   /** The condition that this equals a number. */
   public final Condition exactly(double value) {
     Check.finite("the value", value);
-    return new Condition(this, value, value);
+    return Condition.between(this, value, value);
   }
 
   /** The condition that this equals another expression. */
@@ -145,7 +145,7 @@ public abstract sealed class Expr permits Literal, Node {
       throw new IllegalArgumentException(
           "the lower limit " + lowest + " is above the upper limit " + highest);
     }
-    return new Condition(this, lowest, highest);
+    return Condition.between(this, lowest, highest);
   }
 
   /** The owner of two expressions that meet, refused if they belong to two models. */

@@ -9,7 +9,7 @@ import dev.couplet.form.CheckReturnValue;
  * <p>Immutable; belongs to the model of its decision.
  */
 @CheckReturnValue
-public abstract sealed class Literal extends Expr permits Bit, ChoiceLiteral, Negation {
+public abstract sealed class Literal extends Expr permits Bit, Fact, Negation {
   Literal() {}
 
   /** The number of the positive fact among the literals of the model. */

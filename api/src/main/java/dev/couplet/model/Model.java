@@ -48,9 +48,16 @@ public final class Model {
   public Bit bit(String bitName) {
     claim(decisionNames, "decision", bitName);
     Bit bit = new Bit(this, bitName, decisionOfLiteral.size());
-    decisions.add(bit);
-    decisionOfLiteral.add(bit);
-    return bit;
+    return add(bit);
+  }
+
+  private <D extends Decision> D add(D decision) {
+    decisions.add(decision);
+    int literals = Slot.of(decision).literals();
+    for (int k = 0; k < literals; k++) {
+      decisionOfLiteral.add(decision);
+    }
+    return decision;
   }
 
   /** Adds a yes/no decision for each key, named by the family's name and the key. */
@@ -72,11 +79,7 @@ public final class Model {
     Choice<T> choice =
         new Choice<>(this, choiceName, decisionOfLiteral.size(), List.copyOf(options));
     claim(decisionNames, "decision", choiceName);
-    decisions.add(choice);
-    for (int k = 0; k < options.size(); k++) {
-      decisionOfLiteral.add(choice);
-    }
-    return choice;
+    return add(choice);
   }
 
   /**
@@ -100,27 +103,33 @@ public final class Model {
    */
   public Rule require(String ruleName, Condition condition) {
     Rule rule = rule(ruleName, condition, Optional.empty());
-    Range range = rule.range();
-    if (rule.terms().terms() > 0 && !rule.divisible()) {
+    for (int p = 0; p < rule.parts().size(); p++) {
+      requirePossible(ruleName, condition.parts().get(p), rule.parts().get(p));
+    }
+    return add(rule);
+  }
+
+  private static void requirePossible(String rule, Condition.Part condition, Rule.Part part) {
+    if (part.step() == 1 && part.terms().terms() > 0 && !part.divisible()) {
       throw new IllegalArgumentException(
           "rule '"
-              + ruleName
+              + rule
               + "' can be kept by no plan: "
               + condition
               + ", but no multiple of the coefficients' common factor lies between the limits");
     }
-    if (range.lowest() > rule.highest() || range.highest() < rule.lowest()) {
+    Range range = part.range();
+    if (range.lowest() > part.highest() || range.highest() < part.lowest()) {
       throw new IllegalArgumentException(
           "rule '"
-              + ruleName
+              + rule
               + "' can be kept by no plan: "
               + condition
               + ", but the expression lies between "
-              + Text.number(inOwnUnits(condition, rule, range.lowest()))
+              + Text.number(inOwnUnits(condition, part, range.lowest()))
               + " and "
-              + Text.number(inOwnUnits(condition, rule, range.highest())));
+              + Text.number(inOwnUnits(condition, part, range.highest())));
     }
-    return add(rule);
   }
 
   /**
@@ -136,15 +145,19 @@ public final class Model {
       throw new IllegalArgumentException(
           "the cost of rule '" + ruleName + "' is " + costPerUnit + ", it must be 0 or more");
     }
-    return add(rule(ruleName, condition, Optional.of(costPerUnit)));
+    return add(rule(ruleName, condition, Optional.of(new Rule.Price(costPerUnit, false))));
   }
 
-  private Rule rule(String ruleName, Condition condition, Optional<Double> cost) {
+  private Rule rule(String ruleName, Condition condition, Optional<Rule.Price> price) {
     Check.name("a rule", ruleName);
-    requireOwner(condition.expr(), this);
-    ScaledCondition scaled = ScaledCondition.of(ruleName, condition, decisionOfLiteral.size());
-    Range range = Ranges.of(scaled.terms(), decisionOfLiteral::get);
-    return new Rule(ruleName, cost, scaled, range);
+    List<Rule.Part> parts = new ArrayList<>();
+    for (Condition.Part part : condition.parts()) {
+      requireOwner(part.expr(), this);
+      ScaledCondition scaled = ScaledCondition.of(ruleName, part, decisionOfLiteral.size());
+      Range range = Ranges.of(scaled.terms(), decisionOfLiteral::get);
+      parts.add(new Rule.Part(scaled, price.orElse(Rule.Price.NONE), range));
+    }
+    return new Rule(ruleName, price, parts);
   }
 
   private Rule add(Rule rule) {
@@ -154,10 +167,10 @@ public final class Model {
   }
 
   /** Undoes scaling and moves the constant back, for messages in the condition's own numbers. */
-  private static double inOwnUnits(Condition condition, Rule rule, double terms) {
+  private static double inOwnUnits(Condition.Part condition, Rule.Part part, double terms) {
     double own = Double.isFinite(condition.lowest()) ? condition.lowest() : condition.highest();
-    double scaled = Double.isFinite(rule.lowest()) ? rule.lowest() : rule.highest();
-    return own + (terms - scaled) * rule.unit();
+    double scaled = Double.isFinite(part.lowest()) ? part.lowest() : part.highest();
+    return own + (terms - scaled) * part.unit();
   }
 
   /**

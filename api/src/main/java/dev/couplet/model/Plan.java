@@ -24,6 +24,7 @@ public final class Plan implements Comparable<Plan> {
   private final double value;
   private final List<Unmet> unmet;
   private final List<Decision> undecided;
+  private final Set<Decision> open;
 
   private Plan(
       Statement statement,
@@ -36,30 +37,25 @@ public final class Plan implements Comparable<Plan> {
     this.value = value;
     this.unmet = List.copyOf(unmet);
     this.undecided = List.copyOf(undecided);
+    this.open = Set.copyOf(undecided);
   }
 
-  static Plan of(Statement statement, State literals) {
+  static Plan of(Statement statement, State literals, Set<Decision> broken) {
     List<Unmet> unmet = new ArrayList<>();
     double cost = 0;
     for (Rule rule : statement.rules()) {
-      double violation = rule.violation(literals);
-      if (violation > 0) {
-        double amount = rule.amount(violation);
-        double own = rule.cost(violation);
-        unmet.add(new Unmet(rule.name(), rule.required(), amount, own));
+      if (!rule.kept(literals)) {
+        double own = rule.cost(literals);
+        unmet.add(new Unmet(rule.name(), rule.required(), rule.amount(literals), own));
         cost += own;
       }
     }
     List<Decision> undecided = new ArrayList<>();
     for (Decision decision : statement.decisions()) {
-      if (decision instanceof Choice<?> choice && statement.chosen(choice, literals).isEmpty()) {
-        undecided.add(choice);
-        int options = 0;
-        for (int k = 0; k < choice.values(); k++) {
-          options += literals.bit(choice.firstLiteral() + k);
-        }
-        unmet.add(
-            new Unmet("one option of '" + choice.name() + "'", true, Math.abs(options - 1), 0));
+      int excess = Statement.excess(decision, literals);
+      if (excess > 0 || broken.contains(decision)) {
+        undecided.add(decision);
+        unmet.add(new Unmet(decision.code(), true, Math.max(1, excess), 0));
       }
     }
     double value = statement.objective().value(literals) + statement.sense().sign() * cost;
@@ -107,7 +103,15 @@ public final class Plan implements Comparable<Plan> {
   /** The option that a choice takes, if it is decided. */
   public <T> Optional<T> find(Choice<T> choice) {
     statement.require(choice);
-    return statement.chosen(choice, literals).map(choice.options()::get);
+    if (open.contains(choice)) {
+      return Optional.empty();
+    }
+    int first = choice.slot().first();
+    int position = 0;
+    while (!literals.get(first + position)) {
+      position++;
+    }
+    return Optional.of(choice.options().get(position));
   }
 
   /** The value of a bit. */
@@ -210,7 +214,7 @@ public final class Plan implements Comparable<Plan> {
       statement.require(choice);
       int position = choice.positionOf(option);
       for (int k = 0; k < choice.values(); k++) {
-        literals[choice.firstLiteral() + k] = k == position;
+        literals[choice.slot().first() + k] = k == position;
       }
       decided.add(choice);
       return this;

@@ -63,11 +63,15 @@ final class Ranges {
     }
   }
 
-  /** Two different options of one choice never hold together. */
+  /** Two literals of one group never hold together. */
   private boolean possible(int[] literals) {
     for (int k = 1; k < literals.length; k++) {
-      if (decisionOf.apply(literals[k]) == decisionOf.apply(literals[k - 1])) {
-        return false;
+      Decision decision = decisionOf.apply(literals[k]);
+      if (decision == decisionOf.apply(literals[k - 1])) {
+        Slot slot = Slot.of(decision);
+        if (slot.groups() > 0 && slot.groupOf(literals[k]) == slot.groupOf(literals[k - 1])) {
+          return false;
+        }
       }
     }
     return true;
@@ -77,9 +81,10 @@ final class Ranges {
     List<Integer> key = new ArrayList<>(literals.length);
     long combinations = 1;
     for (int literal : literals) {
-      if (decisionOf.apply(literal) instanceof Choice<?> choice) {
-        key.add(choice.firstLiteral());
-        combinations = Math.min(Long.MAX_VALUE / choice.values(), combinations) * choice.values();
+      Slot slot = Slot.of(decisionOf.apply(literal));
+      if (slot.groups() > 0) {
+        key.add(slot.groupOf(literal));
+        combinations = Math.min(Long.MAX_VALUE / slot.groupSize(), combinations) * slot.groupSize();
       } else {
         key.add(literal);
         combinations = Long.MAX_VALUE / Integer.MAX_VALUE;

@@ -5,57 +5,35 @@ import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import java.math.BigDecimal;
 import java.math.BigInteger;
+import java.util.List;
 import java.util.Optional;
 
 /**
- * A named condition that a model requires or prefers, with integer coefficients.
+ * A named condition that a model requires or prefers, in whole numbers.
  *
- * <p>The rule says {@code lowest <= terms <= highest}, where {@link #terms()} is a polynomial over
- * the model's literals without a constant, and all numbers are whole. They stand for the
- * condition's own numbers times {@code 1 / unit}: decimals are scaled exactly, common factors taken
- * out. Amounts and costs are in the condition's own units. Immutable.
+ * <p>Most conditions have one {@link Part}; one that says several things at once has more, and is
+ * kept where all of them are. Amounts and costs of the parts add up. Immutable.
  */
 @CheckReturnValue
 public final class Rule {
-  private final String name;
-  private final Optional<Double> costPerUnit;
-  private final Polynomial terms;
-  private final double lowest;
-  private final double highest;
-  private final BigDecimal unit;
-  private final Range range;
-
-  Rule(String name, Optional<Double> costPerUnit, ScaledCondition condition, Range range) {
-    this(
-        name,
-        costPerUnit,
-        condition.terms(),
-        condition.lowest(),
-        condition.highest(),
-        condition.unit(),
-        range);
+  /** What a miss costs: nothing for a required rule, else a price for each unit. */
+  record Price(double perUnit, boolean squared) {
+    static final Price NONE = new Price(0, false);
   }
 
-  private Rule(
-      String name,
-      Optional<Double> costPerUnit,
-      Polynomial terms,
-      double lowest,
-      double highest,
-      BigDecimal unit,
-      Range range) {
+  private final String name;
+  private final Optional<Price> price;
+  private final List<Part> parts;
+
+  Rule(String name, Optional<Price> price, List<Part> parts) {
     this.name = name;
-    this.costPerUnit = costPerUnit;
-    this.terms = terms;
-    this.lowest = lowest;
-    this.highest = highest;
-    this.unit = unit;
-    this.range = range;
+    this.price = price;
+    this.parts = List.copyOf(parts);
   }
 
   /** The same rule in a model that has more literals by now. */
   Rule inLiterals(int literals) {
-    return new Rule(name, costPerUnit, terms.inVariables(literals), lowest, highest, unit, range);
+    return new Rule(name, price, parts.stream().map(part -> part.inLiterals(literals)).toList());
   }
 
   /** The name, unique in the model. */
@@ -65,94 +43,188 @@ public final class Rule {
 
   /** Whether a plan has to keep the rule to be feasible. */
   public boolean required() {
-    return costPerUnit.isEmpty();
+    return price.isEmpty();
   }
 
   /** What breaking a preferred rule costs for each unit of the amount; 0 for a required one. */
   public double costPerUnit() {
-    return costPerUnit.orElse(0.0);
+    return price.orElse(Price.NONE).perUnit();
   }
 
-  /** The polynomial over the model's literals that is limited; whole coefficients, no constant. */
-  public Polynomial terms() {
-    return terms;
+  /** Whether a preferred rule costs its price times the square of the amount. */
+  public boolean squared() {
+    return price.orElse(Price.NONE).squared();
   }
 
-  /** The lower limit, a whole number or minus infinity. */
-  public double lowest() {
-    return lowest;
-  }
-
-  /** The upper limit, a whole number or infinity. */
-  public double highest() {
-    return highest;
-  }
-
-  /** How much of the condition's own units one unit of the whole numbers stands for. */
-  public double unit() {
-    return unit.doubleValue();
-  }
-
-  /** Between which numbers {@link #terms()} lies under any plan. */
-  public Range range() {
-    return range;
-  }
-
-  /** The largest factor common to all coefficients; 0 if there are none. */
-  public double divisor() {
-    BigInteger[] factor = {BigInteger.ZERO};
-    terms.forEachTerm(
-        (coefficient, literals) ->
-            factor[0] = factor[0].gcd(BigInteger.valueOf((long) coefficient)));
-    return factor[0].doubleValue();
-  }
-
-  /** Whether some multiple of the coefficients' common factor lies between the limits. */
-  boolean divisible() {
-    double divisor = divisor();
-    return Math.ceil(lowest / divisor) <= Math.floor(highest / divisor);
+  /** What has to hold, all of it. */
+  public List<Part> parts() {
+    return parts;
   }
 
   /** Whether every plan keeps the rule, so that it asks for nothing. */
   public boolean alwaysKept() {
-    return lowest <= range.lowest() && range.highest() <= highest;
+    return parts.stream().allMatch(Part::alwaysKept);
   }
 
-  /** By how much the literals' values miss the limits, in whole-number units; 0 if kept. */
-  public double violation(State literals) {
-    return violation(terms.value(literals));
+  /** Whether the literals' values keep the rule. */
+  public boolean kept(State literals) {
+    return parts.stream().allMatch(part -> part.violation(literals) == 0);
   }
 
-  /** By how much a value of {@link #terms()} misses the limits; 0 if it keeps them. */
-  public double violation(double value) {
-    return Math.max(0, Math.max(value - highest, lowest - value));
+  /** By how much the literals' values miss the rule, in the condition's own units; 0 if kept. */
+  public double amount(State literals) {
+    double sum = 0;
+    for (Part part : parts) {
+      sum += part.amount(part.violation(literals));
+    }
+    return sum;
   }
 
-  /** The most by which any plan can miss the limits, in whole-number units; 0 if none can. */
-  public double largestViolation() {
-    return Math.max(violation(range.lowest()), violation(range.highest()));
+  /** What the literals' values cost by missing the rule; 0 for a required one. */
+  public double cost(State literals) {
+    double sum = 0;
+    for (Part part : parts) {
+      sum += part.cost(part.violation(literals));
+    }
+    return sum;
   }
 
-  /** A violation in whole-number units, in the condition's own units. */
-  public double amount(double violation) {
-    return new BigDecimal(violation).multiply(unit).doubleValue();
-  }
-
-  /**
-   * What a violation in whole-number units costs; 0 for a required rule. Worked out in decimals and
-   * rounded once: ten misses of 0.1, at a cost of 10 each unit, cost 10.
-   */
-  public double cost(double violation) {
-    return new BigDecimal(violation)
-        .multiply(unit)
-        .multiply(Text.decimal(costPerUnit()))
-        .doubleValue();
+  /** The most that any plan can pay for missing the rule. */
+  public double largestCost() {
+    double sum = 0;
+    for (Part part : parts) {
+      sum += part.cost(part.largestViolation());
+    }
+    return sum;
   }
 
   @Override
   public String toString() {
     String kind = required() ? "require" : "prefer (" + Text.number(costPerUnit()) + " a unit)";
-    String body = Text.between(terms.terms() + " terms", lowest, highest);
-    return kind + " '" + name + "': " + body;
+    StringBuilder body = new StringBuilder();
+    for (Part part : parts.subList(0, Math.min(3, parts.size()))) {
+      Polynomial terms = part.terms();
+      body.append(body.isEmpty() ? "" : ", ");
+      body.append(Text.between(terms.terms() + " terms", part.lowest(), part.highest()));
+    }
+    return kind + " '" + name + "': " + body + (parts.size() > 3 ? ", ..." : "");
+  }
+
+  /**
+   * One thing that a rule says: {@code lowest <= terms <= highest}, and where {@code step} is above
+   * 1 that the terms lie on {@code lowest + k step}.
+   *
+   * <p>{@link #terms()} is a polynomial over the model's literals without a constant; all numbers
+   * are whole. They stand for the condition's own numbers times {@code 1 / unit}: decimals are
+   * scaled exactly, common factors taken out. Violations are in these whole numbers, amounts and
+   * costs in the condition's own units. Immutable.
+   */
+  public static final class Part {
+    private final ScaledCondition condition;
+    private final Price price;
+    private final Range range;
+
+    Part(ScaledCondition condition, Price price, Range range) {
+      this.condition = condition;
+      this.price = price;
+      this.range = range;
+    }
+
+    /** The same in a model that has more literals by now. */
+    Part inLiterals(int literals) {
+      return new Part(condition.inLiterals(literals), price, range);
+    }
+
+    /**
+     * The polynomial over the model's literals that is limited; whole coefficients, no constant.
+     */
+    public Polynomial terms() {
+      return condition.terms();
+    }
+
+    /** The lower limit, a whole number or minus infinity. */
+    public double lowest() {
+      return condition.lowest();
+    }
+
+    /** The upper limit, a whole number or infinity. */
+    public double highest() {
+      return condition.highest();
+    }
+
+    /**
+     * The distance between values that keep the limits: 1 where every whole number does; above 1
+     * only where both limits are finite and lie a multiple of it apart.
+     */
+    public double step() {
+      return condition.step();
+    }
+
+    /** How much of the condition's own units one unit of the whole numbers stands for. */
+    public double unit() {
+      return condition.unit().doubleValue();
+    }
+
+    /** Between which numbers {@link #terms()} lies under any plan. */
+    public Range range() {
+      return range;
+    }
+
+    /** The largest factor common to all coefficients; 0 if there are none. */
+    public double divisor() {
+      BigInteger[] factor = {BigInteger.ZERO};
+      terms()
+          .forEachTerm(
+              (coefficient, literals) ->
+                  factor[0] = factor[0].gcd(BigInteger.valueOf((long) coefficient)));
+      return factor[0].doubleValue();
+    }
+
+    /** Whether some multiple of the coefficients' common factor lies between the limits. */
+    boolean divisible() {
+      double divisor = divisor();
+      return Math.ceil(lowest() / divisor) <= Math.floor(highest() / divisor);
+    }
+
+    /** Whether every plan keeps the limits. */
+    public boolean alwaysKept() {
+      boolean within = lowest() <= range.lowest() && range.highest() <= highest();
+      return within && (step() == 1 || (range.width() == 0 && violation(range.lowest()) == 0));
+    }
+
+    /** By how much the literals' values miss the limits; 0 if they keep them. */
+    public double violation(State literals) {
+      return violation(terms().value(literals));
+    }
+
+    /** By how much a value of {@link #terms()} misses the nearest value that keeps the limits. */
+    public double violation(double value) {
+      if (step() == 1 || value <= lowest() || value >= highest()) {
+        return Math.max(0, Math.max(value - highest(), lowest() - value));
+      }
+      double beyond = (value - lowest()) % step();
+      return Math.min(beyond, step() - beyond);
+    }
+
+    /** The most by which any plan can miss the limits; 0 if none can. */
+    public double largestViolation() {
+      double ends = Math.max(violation(range.lowest()), violation(range.highest()));
+      return step() == 1 ? ends : Math.max(ends, Math.floor(step() / 2));
+    }
+
+    /** A violation in the condition's own units. */
+    public double amount(double violation) {
+      return new BigDecimal(violation).multiply(condition.unit()).doubleValue();
+    }
+
+    /**
+     * What a violation costs; 0 for a required rule. Worked out in decimals and rounded once: ten
+     * misses of 0.1, at a cost of 10 each unit, cost 10.
+     */
+    public double cost(double violation) {
+      BigDecimal amount = new BigDecimal(violation).multiply(condition.unit());
+      BigDecimal counted = price.squared() ? amount.multiply(amount) : amount;
+      return counted.multiply(Text.decimal(price.perUnit())).doubleValue();
+    }
   }
 }

@@ -15,9 +15,11 @@ import java.util.Locale;
  * @param terms the polynomial over literals, whole coefficients, no constant
  * @param lowest whole, or minus infinity
  * @param highest whole, or infinity
+ * @param step whole; 1 where every whole number between the limits will do
  * @param unit what one whole unit is in the condition's own units
  */
-record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecimal unit) {
+record ScaledCondition(
+    Polynomial terms, double lowest, double highest, double step, BigDecimal unit) {
   private static final BigDecimal LIMIT = BigDecimal.valueOf(1L << 51);
 
   /** The terms of the condition as they come, in exact decimals. */
@@ -25,7 +27,7 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
     final List<BigDecimal> coefficients = new ArrayList<>();
     final List<int[]> products = new ArrayList<>();
 
-    static Terms of(Condition condition) {
+    static Terms of(Condition.Part condition) {
       Terms terms = new Terms();
       Expansion.walk(
           condition.expr(),
@@ -38,7 +40,7 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
     }
   }
 
-  static ScaledCondition of(String rule, Condition condition, int literals) {
+  static ScaledCondition of(String rule, Condition.Part condition, int literals) {
     Terms given = Terms.of(condition);
     int places = places(given.coefficients, condition);
     BigDecimal constant = BigDecimal.ZERO;
@@ -55,17 +57,18 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
     }
     double lowest = limit(rule, condition.lowest(), constant, places);
     double highest = limit(rule, condition.highest(), constant, places);
+    double step = scaled(rule, Text.decimal(condition.step()), places).doubleValue();
     requireExact(rule, magnitude);
     BigDecimal unit = BigDecimal.ONE.scaleByPowerOfTen(-places);
-    return new ScaledCondition(terms.build(), lowest, highest, unit).reduced();
+    return new ScaledCondition(terms.build(), lowest, highest, step, unit).reduced();
   }
 
-  private static int places(List<BigDecimal> coefficients, Condition condition) {
+  private static int places(List<BigDecimal> coefficients, Condition.Part condition) {
     int places = 0;
     for (BigDecimal coefficient : coefficients) {
       places = Math.max(places, coefficient.stripTrailingZeros().scale());
     }
-    for (double limit : new double[] {condition.lowest(), condition.highest()}) {
+    for (double limit : new double[] {condition.lowest(), condition.highest(), condition.step()}) {
       if (Double.isFinite(limit)) {
         places = Math.max(places, Text.decimal(limit).stripTrailingZeros().scale());
       }
@@ -122,12 +125,12 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
   private ScaledCondition reduced() {
     BigInteger[] factor = {BigInteger.ZERO};
     terms.forEachTerm((coefficient, literals) -> factor[0] = factor[0].gcd(whole(coefficient)));
-    for (double limit : new double[] {lowest, highest}) {
+    for (double limit : new double[] {lowest, highest, step}) {
       factor[0] = Double.isFinite(limit) ? factor[0].gcd(whole(limit)) : factor[0];
     }
     double common = factor[0].doubleValue();
     if (common <= 1) {
-      return this;
+      return new ScaledCondition(terms, lowest, highest, Math.max(1, step), unit);
     }
     Polynomial.Builder divided = Polynomial.builder(terms.size());
     terms.forEachTerm((coefficient, literals) -> divided.add(coefficient / common, literals));
@@ -135,7 +138,13 @@ record ScaledCondition(Polynomial terms, double lowest, double highest, BigDecim
         divided.build(),
         lowest / common,
         highest / common,
+        Math.max(1, step / common),
         unit.multiply(new BigDecimal(factor[0])));
+  }
+
+  /** The same in a model that has more literals by now. */
+  ScaledCondition inLiterals(int literals) {
+    return new ScaledCondition(terms.inVariables(literals), lowest, highest, step, unit);
   }
 
   private static BigInteger whole(double number) {

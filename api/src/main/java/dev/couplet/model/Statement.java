@@ -5,7 +5,8 @@ import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
+import java.util.Set;
+import java.util.stream.IntStream;
 
 /**
  * The content of a model at one moment: decisions, rules, objectives. Immutable and thread-safe;
@@ -65,7 +66,7 @@ public final class Statement {
   static Decision[] decisionOf(List<Decision> decisions) {
     List<Decision> owners = new ArrayList<>();
     for (Decision decision : decisions) {
-      int literals = decision instanceof Choice<?> choice ? choice.values() : 1;
+      int literals = Slot.of(decision).literals();
       for (int k = 0; k < literals; k++) {
         owners.add(decision);
       }
@@ -111,7 +112,28 @@ public final class Statement {
   /** The number of the first literal of a decision of this model. */
   public int firstLiteral(Decision decision) {
     require(decision);
-    return decision instanceof Choice<?> choice ? choice.firstLiteral() : ((Bit) decision).index();
+    return Slot.of(decision).first();
+  }
+
+  /** The number of literals of a decision of this model; they follow its first one. */
+  public int literals(Decision decision) {
+    require(decision);
+    return Slot.of(decision).literals();
+  }
+
+  /**
+   * The groups of literals of a decision of which a plan makes exactly one hold, such as the
+   * options of a choice; none where every pattern of its literals is a value.
+   */
+  public List<List<Integer>> exactlyOne(Decision decision) {
+    require(decision);
+    Slot slot = Slot.of(decision);
+    List<List<Integer>> groups = new ArrayList<>(slot.groups());
+    for (int g = 0; g < slot.groups(); g++) {
+      int from = slot.first() + g * slot.groupSize();
+      groups.add(IntStream.range(from, from + slot.groupSize()).boxed().toList());
+    }
+    return groups;
   }
 
   /** The decision that a literal belongs to. */
@@ -122,9 +144,7 @@ public final class Statement {
   /** A literal in words: the name of a bit, or of a choice and its option. */
   public String describe(int literal) {
     Decision decision = decisionOf[literal];
-    return decision instanceof Choice<?> choice
-        ? choice.name() + " = " + choice.options().get(literal - choice.firstLiteral())
-        : decision.name();
+    return Fact.describe(decision, literal - Slot.of(decision).first());
   }
 
   /**
@@ -147,21 +167,28 @@ public final class Statement {
    * @throws IllegalArgumentException if the state is not of size {@link #literals()}
    */
   public Plan plan(State literals) {
-    return Plan.of(this, literals);
+    return plan(literals, Set.of());
   }
 
-  /** The position of a choice's only option that holds; empty if none or several do. */
-  Optional<Integer> chosen(Choice<?> choice, State literals) {
-    Optional<Integer> found = Optional.empty();
-    for (int k = 0; k < choice.values(); k++) {
-      if (literals.get(choice.firstLiteral() + k)) {
-        if (found.isPresent()) {
-          return Optional.empty();
-        }
-        found = Optional.of(k);
+  /**
+   * The same where more decisions are known to be undecided: those whose bits stand for no value.
+   */
+  public Plan plan(State literals, Set<Decision> undecided) {
+    return Plan.of(this, literals, undecided);
+  }
+
+  /** By how many literals too few or too many the groups of a decision hold; 0 if it is decided. */
+  static int excess(Decision decision, State literals) {
+    Slot slot = Slot.of(decision);
+    int excess = 0;
+    for (int g = 0; g < slot.groups(); g++) {
+      int ones = 0;
+      for (int k = 0; k < slot.groupSize(); k++) {
+        ones += literals.bit(slot.first() + g * slot.groupSize() + k);
       }
+      excess += Math.abs(ones - 1);
     }
-    return found;
+    return excess;
   }
 
   /**
@@ -170,9 +197,8 @@ public final class Statement {
    * @throws IllegalArgumentException if it is of another model, or was made after this statement
    */
   void require(Decision decision) {
-    Model other = decision instanceof Choice<?> choice ? choice.owner() : ((Bit) decision).owner();
-    int first =
-        decision instanceof Choice<?> choice ? choice.firstLiteral() : ((Bit) decision).index();
+    Slot slot = Slot.of(decision);
+    Model other = slot.owner();
     if (other != owner) {
       throw new IllegalArgumentException(
           "decision '"
@@ -183,7 +209,7 @@ public final class Statement {
               + name()
               + "'");
     }
-    if (first >= literals()) {
+    if (slot.first() >= literals()) {
       throw new IllegalArgumentException(
           "decision '"
               + decision.name()

@@ -9,10 +9,12 @@ import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowering;
 import dev.couplet.model.Choice;
 import dev.couplet.model.Model;
+import dev.couplet.model.Rule;
 import dev.couplet.model.Sense;
 import dev.couplet.model.Statement;
 import java.util.HashSet;
 import java.util.Set;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
@@ -51,14 +53,18 @@ class RandomModelsTest {
     assertTrue(any(Regime.MIXED, s -> s.objective().degree() == 4));
     assertTrue(any(Regime.MIXED, s -> s.rules().stream().anyMatch(rule -> !rule.required())));
     assertTrue(any(Regime.MIXED, s -> s.sense() == Sense.MAXIMIZE));
-    assertTrue(any(Regime.DECIMAL, s -> s.rules().stream().anyMatch(rule -> rule.unit() == 0.01)));
+    assertTrue(any(Regime.DECIMAL, s -> parts(s).anyMatch(part -> part.unit() == 0.01)));
     assertFalse(
         any(
             Regime.CHOICES,
             s -> s.literals() > 5 && s.decisions().stream().noneMatch(d -> d instanceof Choice)));
     assertTrue(any(Regime.HUGE_RANGE, s -> most(s) > 30_000));
     assertFalse(any(Regime.DENSE, s -> s.objective().degree() > 2));
-    assertFalse(any(Regime.SPARSE, s -> s.rules().stream().anyMatch(r -> r.terms().terms() > 3)));
+    assertFalse(any(Regime.SPARSE, s -> parts(s).anyMatch(part -> part.terms().terms() > 3)));
+  }
+
+  private static Stream<Rule.Part> parts(Statement statement) {
+    return statement.rules().stream().flatMap(rule -> rule.parts().stream());
   }
 
   private static double most(Statement statement) {

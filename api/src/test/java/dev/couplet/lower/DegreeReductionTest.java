@@ -35,7 +35,7 @@ class DegreeReductionTest {
   void aProductIsReplacedExactly(int degree, double coefficient, int auxiliaries) {
     Model model = Model.named("product");
     model.bits("x", IntStream.range(0, degree).boxed().toList());
-    BitTable bits = new BitTable(model.snapshot());
+    BitTable bits = new BitTable(new Coding(model.snapshot(), Lowering.standard()));
     int[] all = IntStream.range(0, degree).toArray();
     Polynomial product = Polynomial.builder(degree).add(coefficient, all).build();
     Polynomial quadratic = DegreeReduction.of(product, "product", bits);

@@ -259,11 +259,13 @@ class LoweringTest {
         changed.addLinear(i, faithful.qubo().linear(i) + (i == 1 ? change : 0));
       }
       faithful.qubo().forEachPair(changed::addPair);
+      Coding coding = new Coding(faithful.statement(), Lowering.standard());
       Lowered sabotaged =
           new Lowered(
               faithful.statement(),
               changed.build(),
-              new BitTable(faithful.statement()),
+              coding,
+              new BitTable(coding),
               faithful.ledger(),
               faithful.weights(),
               faithful.structure());

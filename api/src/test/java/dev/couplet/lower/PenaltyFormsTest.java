@@ -168,7 +168,7 @@ class PenaltyFormsTest {
   @ParameterizedTest
   @ValueSource(longs = {0, 1, 5, 8, 13, 64, 100})
   void slackIsSetToTheNearestValue(long highest) {
-    BitTable bits = new BitTable(model.snapshot());
+    BitTable bits = new BitTable(new Coding(model.snapshot(), Lowering.standard()));
     Slack slack = Slack.upTo(highest, "slack", bits);
     long[] coefficients = Slack.coefficients(highest);
     for (long wanted = -3; wanted <= highest + 3; wanted++) {

@@ -24,6 +24,11 @@ import org.junit.jupiter.api.Test;
 class ModelTest {
   private final Model model = Model.named("rounds");
 
+  private static Rule.Part only(Rule rule) {
+    assertEquals(1, rule.parts().size());
+    return rule.parts().get(0);
+  }
+
   private List<Bit> bits(int count) {
     return List.copyOf(model.bits("bit", IntStream.range(0, count).boxed().toList()).decisions());
   }
@@ -33,7 +38,8 @@ class ModelTest {
     List<Bit> x = bits(2);
     Rule rule = model.require("r", x.get(0).times(0.1).plus(x.get(1).times(0.2)).atMost(0.3));
     assertTrue(rule.alwaysKept(), "0.1 + 0.2 is not above 0.3");
-    Rule tight = model.require("t", x.get(0).times(0.1).plus(x.get(1).times(0.2)).exactly(0.3));
+    Rule.Part tight =
+        only(model.require("t", x.get(0).times(0.1).plus(x.get(1).times(0.2)).exactly(0.3)));
     assertTrue(tight.violation(State.of(true, true)) == 0);
     assertEquals(0.1, tight.unit());
     assertEquals(3, tight.lowest());
@@ -43,7 +49,8 @@ class ModelTest {
   @Test
   void commonFactorsAreTakenOut() {
     List<Bit> x = bits(2);
-    Rule rule = model.require("r", x.get(0).times(150).plus(x.get(1).times(250)).atMost(300));
+    Rule.Part rule =
+        only(model.require("r", x.get(0).times(150).plus(x.get(1).times(250)).atMost(300)));
     assertEquals(50, rule.unit());
     assertEquals(6, rule.highest());
     assertEquals(3, rule.terms().coefficient(0));
@@ -59,7 +66,7 @@ class ModelTest {
     Expr shown = sum(choice.options(), o -> choice.is(o).times(o));
     assertTrue(model.require("t", shown.between(1, 3)).alwaysKept());
     assertFalse(model.require("u", shown.atMost(2)).alwaysKept());
-    assertEquals(new Range(1, 3), model.snapshot().rules().get(3).range());
+    assertEquals(new Range(1, 3), only(model.snapshot().rules().get(3)).range());
     assertTrue(model.require("v", constant(2).atMost(2)).alwaysKept());
   }
 
@@ -82,7 +89,7 @@ class ModelTest {
       Rule rule = model.require("rule " + c, (Condition) cases[c][0]);
       for (int pattern = 0; pattern < 4; pattern++) {
         State state = State.of((pattern & 1) != 0, (pattern & 2) != 0);
-        assertEquals(cases[c][1 + pattern], rule.violation(state) == 0, rule + " at " + state);
+        assertEquals(cases[c][1 + pattern], rule.kept(state), rule + " at " + state);
       }
     }
     assertSame(a, a.not().not());
@@ -126,7 +133,7 @@ class ModelTest {
     assertEquals(3, expanded.terms());
     assertEquals(0x1p40 - 2, expanded.coefficient(0, 1));
     assertEquals(0x1p40, allTrue().number(power));
-    Rule rule = model.require("power rule", power.atMost(0x1p39));
+    Rule.Part rule = only(model.require("power rule", power.atMost(0x1p39)));
     assertEquals(0x1p39 - 1, rule.terms().coefficient(0, 1) / 2);
   }
 
@@ -222,7 +229,7 @@ class ModelTest {
     assertEquals(0, before.objectives().size());
     assertEquals(Sense.MINIMIZE, before.sense());
     assertEquals(2, model.snapshot().literals());
-    assertEquals(2, model.snapshot().rules().get(0).terms().size());
+    assertEquals(2, model.snapshot().rules().get(0).parts().get(0).terms().size());
     assertTrue(before.sameModel(model.snapshot()));
     assertFalse(before.sameModel(Model.named("rounds").snapshot()));
   }

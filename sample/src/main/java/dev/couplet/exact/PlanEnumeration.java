@@ -1,21 +1,21 @@
 package dev.couplet.exact;
 
-import dev.couplet.model.Choice;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
 import dev.couplet.sampling.Vigil;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
- * Looks at every plan of a model: every combination of values of its decisions, far fewer than the
- * patterns of the bits that the model is lowered to.
+ * Looks at every plan of a model: every combination of one literal of each group and any value of
+ * the others, far fewer than the patterns of the bits that the model is lowered to.
  *
  * <p>The result needs no weights and no lowering: the best feasible plan is optimal, and if there
- * is none, no plan keeps all rules. Plans are walked so that one decision moves by one value a
- * step; objective and rules are updated by the terms that speak of it.
+ * is none, no plan keeps all rules. Plans are walked so that one of these moves by one a step;
+ * objective and rules are updated by the terms that speak of it.
  *
  * <p>Time O(plans x terms that a literal occurs in). Immutable and thread-safe.
  */
@@ -41,14 +41,26 @@ public final class PlanEnumeration {
   /** The number of plans of a statement; the largest long if it is larger than that. */
   public long plans(Statement statement) {
     long plans = 1;
-    for (Decision decision : statement.decisions()) {
-      long values = decision.values();
+    for (int values : radixes(statement)) {
       if (plans > Long.MAX_VALUE / values) {
         return Long.MAX_VALUE;
       }
       plans *= values;
     }
     return plans;
+  }
+
+  /** The sizes of the groups of which one literal holds, and 2 for every literal in none. */
+  private static List<Integer> radixes(Statement statement) {
+    List<Integer> radixes = new ArrayList<>();
+    for (Decision decision : statement.decisions()) {
+      List<List<Integer>> groups = statement.exactlyOne(decision);
+      groups.forEach(group -> radixes.add(group.size()));
+      for (int k = 0; k < statement.literals(decision) && groups.isEmpty(); k++) {
+        radixes.add(2);
+      }
+    }
+    return radixes;
   }
 
   /** Looks at all plans, or at as many as the vigil allows. */
@@ -71,10 +83,11 @@ public final class PlanEnumeration {
     }
   }
 
-  /** A plan that moves by one decision at a time. */
+  /** A plan that moves by one group or literal at a time. */
   private static final class Walk {
     private final Statement statement;
-    private final List<Decision> moving;
+    private final int[] first;
+    private final boolean[] grouped;
     private final MixedRadix digits;
     private final PlanScore score;
     private final int[] before;
@@ -83,15 +96,27 @@ public final class PlanEnumeration {
 
     Walk(Statement statement) {
       this.statement = statement;
-      this.moving = statement.decisions().stream().filter(d -> d.values() > 1).toList();
-      this.digits = new MixedRadix(moving.stream().mapToInt(Decision::values).toArray());
       this.score = new PlanScore(statement);
-      this.before = new int[moving.size()];
+      List<int[]> moving = new ArrayList<>();
       for (Decision decision : statement.decisions()) {
-        if (decision instanceof Choice) {
-          score.turnOn(statement.firstLiteral(decision));
+        List<List<Integer>> groups = statement.exactlyOne(decision);
+        for (List<Integer> group : groups) {
+          score.turnOn(group.get(0));
+          moving.add(new int[] {group.get(0), group.size(), 1});
+        }
+        int literals = groups.isEmpty() ? statement.literals(decision) : 0;
+        for (int k = 0; k < literals; k++) {
+          moving.add(new int[] {statement.firstLiteral(decision) + k, 2, 0});
         }
       }
+      moving.removeIf(one -> one[1] == 1);
+      this.first = moving.stream().mapToInt(one -> one[0]).toArray();
+      this.digits = new MixedRadix(moving.stream().mapToInt(one -> one[1]).toArray());
+      this.grouped = new boolean[first.length];
+      for (int d = 0; d < first.length; d++) {
+        grouped[d] = moving.get(d)[2] == 1;
+      }
+      this.before = new int[first.length];
     }
 
     /** Keeps the plan the walk stands at if it is feasible and better than the best so far. */
@@ -107,21 +132,20 @@ public final class PlanEnumeration {
       }
     }
 
-    /** Moves one decision by one value; false if every plan has been seen. */
+    /** Moves one group or literal by one; false if every plan has been seen. */
     boolean step() {
       int moved = digits.step();
       if (moved < 0) {
         return false;
       }
       int to = digits.digit(moved);
-      int first = statement.firstLiteral(moving.get(moved));
-      if (moving.get(moved) instanceof Choice) {
-        score.turnOff(first + before[moved]);
-        score.turnOn(first + to);
+      if (grouped[moved]) {
+        score.turnOff(first[moved] + before[moved]);
+        score.turnOn(first[moved] + to);
       } else if (to == 1) {
-        score.turnOn(first);
+        score.turnOn(first[moved]);
       } else {
-        score.turnOff(first);
+        score.turnOff(first[moved]);
       }
       before[moved] = to;
       return true;

@@ -12,10 +12,12 @@ import java.util.List;
  *
  * <p>Invariant: {@code missing[t]} is the number of literals of term t that do not hold, and {@code
  * sum[o]} the sum of the coefficients of owner o's terms with none missing; owner 0 is the
- * objective, brought to minimising, owner r + 1 is rule r. Sums of rules are whole and exact.
+ * objective, brought to minimising, owner p + 1 is part p of all rules. Sums of rules are whole and
+ * exact.
  */
 final class PlanScore {
-  private final List<Rule> rules;
+  private final List<Rule.Part> parts = new ArrayList<>();
+  private final boolean[] required;
   private final boolean[] holds;
   private final int[][] termsOf;
   private final int[] owner;
@@ -28,21 +30,29 @@ final class PlanScore {
   private double preferredCost;
 
   PlanScore(Statement statement) {
-    this.rules = statement.rules();
+    List<Boolean> mustHold = new ArrayList<>();
+    for (Rule rule : statement.rules()) {
+      parts.addAll(rule.parts());
+      rule.parts().forEach(part -> mustHold.add(rule.required()));
+    }
+    this.required = new boolean[parts.size()];
+    for (int p = 0; p < required.length; p++) {
+      required[p] = mustHold.get(p);
+    }
     this.holds = new boolean[statement.literals()];
     List<Polynomial> owned = new ArrayList<>();
     owned.add(statement.objective().times(statement.sense().sign()));
-    rules.forEach(rule -> owned.add(rule.terms()));
+    parts.forEach(part -> owned.add(part.terms()));
     int terms = owned.stream().mapToInt(Polynomial::terms).sum();
     this.owner = new int[terms];
     this.coefficient = new double[terms];
     this.missing = new int[terms];
     this.sum = new double[owned.size()];
-    this.costOf = new double[rules.size()];
+    this.costOf = new double[parts.size()];
     this.termsOf = index(owned, statement.literals());
     this.error = error(owned.get(0), statement);
-    for (int r = 0; r < rules.size(); r++) {
-      score(r, 1);
+    for (int p = 0; p < parts.size(); p++) {
+      score(p, 1);
     }
   }
 
@@ -83,9 +93,11 @@ final class PlanScore {
           whole[0] &= value == Math.rint(value);
         });
     for (Rule rule : statement.rules()) {
-      magnitude[0] += rule.amount(rule.largestViolation()) * rule.costPerUnit();
-      double unitCost = rule.costPerUnit() * rule.unit();
-      whole[0] &= unitCost == Math.rint(unitCost);
+      magnitude[0] += rule.largestCost();
+      for (Rule.Part part : rule.parts()) {
+        double unitCost = part.cost(1);
+        whole[0] &= unitCost == Math.rint(unitCost);
+      }
     }
     return whole[0] && magnitude[0] < 0x1p51 ? 0 : magnitude[0] * 0x1p-30;
   }
@@ -118,18 +130,16 @@ final class PlanScore {
     score(own - 1, 1);
   }
 
-  /** Counts a rule in, or out again. */
-  private void score(int r, int sign) {
-    Rule rule = rules.get(r);
-    double value = sum[r + 1];
-    double violation = rule.violation(value);
+  /** Counts a part of a rule in, or out again. */
+  private void score(int p, int sign) {
+    double violation = parts.get(p).violation(sum[p + 1]);
     if (violation == 0) {
-      costOf[r] = 0;
-    } else if (rule.required()) {
+      costOf[p] = 0;
+    } else if (required[p]) {
       broken += sign;
     } else {
-      costOf[r] = sign > 0 ? rule.amount(violation) * rule.costPerUnit() : costOf[r];
-      preferredCost += sign * costOf[r];
+      costOf[p] = sign > 0 ? parts.get(p).cost(violation) : costOf[p];
+      preferredCost += sign * costOf[p];
     }
   }
 

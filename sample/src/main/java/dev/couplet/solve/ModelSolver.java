@@ -4,7 +4,6 @@ import dev.couplet.exact.PlanEnumeration.Found;
 import dev.couplet.form.State;
 import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowering;
-import dev.couplet.model.Choice;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
@@ -77,8 +76,8 @@ final class ModelSolver {
   private Plan firstPlan() {
     boolean[] values = new boolean[statement.literals()];
     for (Decision decision : statement.decisions()) {
-      if (decision instanceof Choice) {
-        values[statement.firstLiteral(decision)] = true;
+      for (List<Integer> group : statement.exactlyOne(decision)) {
+        values[group.get(0)] = true;
       }
     }
     return statement.plan(State.of(values));

@@ -1,0 +1,244 @@
+package dev.couplet.lower;
+
+import dev.couplet.form.Polynomial;
+import dev.couplet.form.State;
+import dev.couplet.lower.ChoiceEncoding.Code;
+import dev.couplet.model.Decision;
+import dev.couplet.model.Plan;
+import dev.couplet.model.Statement;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+
+/**
+ * Which bits stand for which decision, in both directions.
+ *
+ * <p>Invariant: {@code bitOf[literal]} is the bit that is 1 exactly where the literal holds, or -1
+ * if there is none; then {@code over[literal]} is the literal as a polynomial over all decision
+ * bits. {@code start[literal]} is where the bits of the literal's decision begin. Immutable once
+ * made.
+ */
+final class Coding {
+  /** The literals {@code first ..} in code, their bits beginning at {@code bit}. */
+  record Coded(Decision decision, int first, int bit, Code code) {}
+
+  private final Statement statement;
+  private final List<Coded> coded = new ArrayList<>();
+  private final List<String> meanings = new ArrayList<>();
+  private final int[] bitOf;
+  private final int[] start;
+  private final Polynomial[] over;
+  private final boolean sameNumbers;
+
+  Coding(Statement statement, Lowering settings) {
+    this.statement = statement;
+    this.bitOf = new int[statement.literals()];
+    this.start = new int[statement.literals() + 1];
+    this.over = new Polynomial[statement.literals()];
+    Map<Integer, Code> codes = new HashMap<>();
+    for (Decision decision : statement.decisions()) {
+      allot(decision, settings, codes);
+    }
+    start[statement.literals()] = meanings.size();
+    boolean same = bitOf.length == meanings.size();
+    for (int literal = 0; literal < bitOf.length; literal++) {
+      same &= bitOf[literal] == literal;
+    }
+    this.sameNumbers = same;
+    coded.forEach(this::spread);
+  }
+
+  private void allot(Decision decision, Lowering settings, Map<Integer, Code> codes) {
+    int first = statement.firstLiteral(decision);
+    start[first] = meanings.size();
+    List<List<Integer>> groups = statement.exactlyOne(decision);
+    if (groups.isEmpty()) {
+      for (int k = 0; k < statement.literals(decision); k++) {
+        bitOf[first + k] = meanings.size();
+        meanings.add(statement.describe(first + k));
+      }
+    }
+    for (List<Integer> group : groups) {
+      ChoiceEncoding encoding = settings.encoding(decision);
+      Code code = codes.computeIfAbsent(group.size(), encoding::code);
+      Coded one = new Coded(decision, group.get(0), meanings.size(), code);
+      coded.add(one);
+      name(one);
+    }
+  }
+
+  private void name(Coded one) {
+    Code code = one.code();
+    String[] names = new String[code.bits()];
+    Arrays.setAll(names, bit -> "bit " + bit + " of '" + one.decision().name() + "'");
+    for (int k = 0; k < code.options().size(); k++) {
+      int bit = plain(code.options().get(k));
+      bitOf[one.first() + k] = bit < 0 ? -1 : one.bit() + bit;
+      if (bit >= 0) {
+        names[bit] = statement.describe(one.first() + k);
+      }
+    }
+    meanings.addAll(Arrays.asList(names));
+  }
+
+  /** The bit that a polynomial is, or -1 if it is none. */
+  private static int plain(Polynomial literal) {
+    int[] bit = {-1};
+    if (literal.terms() == 1 && literal.degree() == 1) {
+      literal.forEachTerm((coefficient, bits) -> bit[0] = coefficient == 1 ? bits[0] : -1);
+    }
+    return bit[0];
+  }
+
+  /** Writes the literals that are no bit over the bits of the whole form. */
+  private void spread(Coded one) {
+    for (int k = 0; k < one.code().options().size(); k++) {
+      if (bitOf[one.first() + k] < 0) {
+        over[one.first() + k] = shifted(one.code().options().get(k), one.bit());
+      }
+    }
+  }
+
+  private Polynomial shifted(Polynomial local, int by) {
+    Polynomial.Builder moved = Polynomial.builder(bits());
+    local.forEachTerm(
+        (coefficient, bits) -> {
+          for (int k = 0; k < bits.length; k++) {
+            bits[k] += by;
+          }
+          moved.add(coefficient, bits);
+        });
+    return moved.build();
+  }
+
+  /** The number of decision bits. */
+  int bits() {
+    return meanings.size();
+  }
+
+  /** What each decision bit stands for. */
+  List<String> meanings() {
+    return meanings;
+  }
+
+  /** The bits of a decision: the first, and the one after the last. */
+  int[] bitsOf(Decision decision) {
+    int first = statement.firstLiteral(decision);
+    return new int[] {start[first], start[first + statement.literals(decision)]};
+  }
+
+  /** The groups of literals of which one holds, each with its code. */
+  List<Coded> coded() {
+    return coded;
+  }
+
+  /** The penalty of a code over all decision bits. */
+  Polynomial penalty(Coded one) {
+    return shifted(one.code().penalty(), one.bit());
+  }
+
+  /** The sets of bits of which exactly one is 1 under any plan. */
+  List<List<Integer>> exactlyOne() {
+    List<List<Integer>> sets = new ArrayList<>();
+    for (Coded one : coded) {
+      List<Integer> set = new ArrayList<>();
+      for (int k = 0; k < one.code().options().size() && bitOf[one.first() + k] >= 0; k++) {
+        set.add(bitOf[one.first() + k]);
+      }
+      if (set.size() == one.code().options().size()) {
+        sets.add(set);
+      }
+    }
+    return sets;
+  }
+
+  /** A polynomial over literals as one over decision bits. */
+  Polynomial overBits(Polynomial literals) {
+    if (sameNumbers) {
+      return literals;
+    }
+    Polynomial.Builder sum = Polynomial.builder(bits());
+    literals.forEachTerm((coefficient, product) -> add(sum, coefficient, product));
+    return sum.build();
+  }
+
+  private void add(Polynomial.Builder sum, double coefficient, int[] product) {
+    int[] plain = new int[product.length];
+    int count = 0;
+    Polynomial others = null;
+    for (int literal : product) {
+      if (bitOf[literal] >= 0) {
+        plain[count++] = bitOf[literal];
+      } else {
+        others = others == null ? over[literal] : others.times(over[literal]);
+      }
+    }
+    int[] bits = Arrays.copyOf(plain, count);
+    if (others == null) {
+      sum.add(coefficient, bits);
+    } else {
+      sum.add(others.times(Polynomial.builder(bits()).add(coefficient, bits).build()), 1);
+    }
+  }
+
+  /** The plan that a pattern of at least the decision bits stands for. */
+  Plan plan(State pattern) {
+    boolean[] literals = new boolean[bitOf.length];
+    for (int literal = 0; literal < bitOf.length; literal++) {
+      literals[literal] = bitOf[literal] >= 0 && pattern.get(bitOf[literal]);
+    }
+    Set<Decision> undecided = new HashSet<>();
+    for (Coded one : coded) {
+      if (!isPlain(one)) {
+        int option = one.code().stoodFor(own(one, pattern));
+        for (int k = 0; k < one.code().options().size(); k++) {
+          literals[one.first() + k] = k == option;
+        }
+        if (option < 0) {
+          undecided.add(one.decision());
+        }
+      }
+    }
+    return statement.plan(State.of(literals), undecided);
+  }
+
+  private boolean isPlain(Coded one) {
+    for (int k = 0; k < one.code().options().size(); k++) {
+      if (bitOf[one.first() + k] < 0) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private static State own(Coded one, State pattern) {
+    boolean[] bits = new boolean[one.code().bits()];
+    for (int bit = 0; bit < bits.length; bit++) {
+      bits[bit] = pattern.get(one.bit() + bit);
+    }
+    return State.of(bits);
+  }
+
+  /** Writes the pattern of a plan into the decision bits. */
+  void write(State literals, boolean[] bits) {
+    for (int literal = 0; literal < bitOf.length; literal++) {
+      if (bitOf[literal] >= 0) {
+        bits[bitOf[literal]] = literals.get(literal);
+      }
+    }
+    for (Coded one : coded) {
+      for (int k = 0; k < one.code().options().size() && !isPlain(one); k++) {
+        if (literals.get(one.first() + k)) {
+          State pattern = one.code().patterns().get(k);
+          for (int bit = 0; bit < one.code().bits(); bit++) {
+            bits[one.bit() + bit] = pattern.get(bit);
+          }
+        }
+      }
+    }
+  }
+}
