@@ -4,7 +4,7 @@ import dev.couplet.audit.LoweringAudit.WeightSlack;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.lower.Lowered;
-import dev.couplet.lower.Weight;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;

@@ -1,7 +1,7 @@
 package dev.couplet.audit;
 
 import dev.couplet.audit.LoweringAudit.WeightSlack;
-import dev.couplet.lower.Weight;
+import dev.couplet.lower.Lowered.Weight;
 import java.util.OptionalDouble;
 
 /**

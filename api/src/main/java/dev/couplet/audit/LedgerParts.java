@@ -6,7 +6,7 @@ import dev.couplet.lower.Ledger;
 import dev.couplet.lower.Ledger.Entry;
 import dev.couplet.lower.Ledger.Kind;
 import dev.couplet.lower.Lowered;
-import dev.couplet.lower.Weight;
+import dev.couplet.lower.Lowered.Weight;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;

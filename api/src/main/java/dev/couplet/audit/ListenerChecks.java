@@ -1,9 +1,9 @@
 package dev.couplet.audit;
 
 import dev.couplet.sampling.Effort;
-import dev.couplet.sampling.Progress;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.Progress;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;

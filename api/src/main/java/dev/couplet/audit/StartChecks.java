@@ -3,9 +3,9 @@ package dev.couplet.audit;
 import dev.couplet.form.State;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Structure;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.util.List;
 
 /** Starts are honoured; starts and structures that do not fit are refused. */

@@ -4,8 +4,8 @@ import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
 import java.util.function.Supplier;
 

@@ -1,5 +1,7 @@
 package dev.couplet.form;
 
+import dev.couplet.form.Qubo.PairVisitor;
+
 /**
  * A quadratic form in spins, each +1 or -1, to be minimised: {@code constant + sum h_i s_i +
  * sum_{i<j} J_ij s_i s_j}.

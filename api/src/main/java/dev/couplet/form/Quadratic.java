@@ -1,5 +1,6 @@
 package dev.couplet.form;
 
+import dev.couplet.form.Qubo.PairVisitor;
 import java.util.Arrays;
 
 /**

@@ -7,8 +7,8 @@ import java.util.List;
 
 /**
  * The number of an option in binary: {@code ceil(log2 k)} bits and no penalty. Where k is no power
- * of two, a bit does not count where its other value, with the bits above it, begins no option: every
- * pattern stands for an option, the last ones are stood for by several.
+ * of two, a bit does not count where its other value, with the bits above it, begins no option:
+ * every pattern stands for an option, the last ones are stood for by several.
  *
  * <p>An option is a product of up to {@code ceil(log2 k)} bits and negations of bits, so that
  * products of options of two choices have a high degree. Source: common practice.

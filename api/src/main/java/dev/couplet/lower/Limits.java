@@ -1,8 +1,8 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
-import dev.couplet.model.Range;
 import dev.couplet.model.Rule.Part;
+import dev.couplet.model.Statement.Range;
 
 /**
  * What a part of a rule limits, over bits and tightened: {@code lowest <= terms <= highest}, all

@@ -1,6 +1,6 @@
 package dev.couplet.lower;
 
-import dev.couplet.model.Range;
+import dev.couplet.model.Statement.Range;
 
 /**
  * The range bound. Let L be the lowest value of the objective over all bit patterns and H its

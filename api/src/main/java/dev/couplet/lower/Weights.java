@@ -1,8 +1,8 @@
 package dev.couplet.lower;
 
 import dev.couplet.model.Plan;
-import dev.couplet.model.Range;
 import dev.couplet.model.Statement;
+import dev.couplet.model.Statement.Range;
 import java.util.Locale;
 
 /**

@@ -3,9 +3,9 @@
  *
  * <p>{@link dev.couplet.lower.Lowering} holds the settings; {@link dev.couplet.lower.Lowered} is
  * the result: a {@link dev.couplet.form.Qubo} whose minimum is the model's optimum, the way back
- * from draws to {@link dev.couplet.lower.Plans plans}, the {@link dev.couplet.lower.Weight weight}
- * of each rule with the reason why it suffices, and the {@link dev.couplet.lower.Ledger} that says
- * where each coefficient came from.
+ * from draws to {@link dev.couplet.lower.Plans plans}, the {@link dev.couplet.lower.Lowered.Weight
+ * weight} of each rule with the reason why it suffices, and the {@link dev.couplet.lower.Ledger}
+ * that says where each coefficient came from.
  *
  * <p>One step a file, in the order of the work: {@code BitTable} numbers the bits, {@code Limits}
  * tightens a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms

@@ -2,6 +2,7 @@ package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
 import dev.couplet.model.Statement.Objective;
+import dev.couplet.model.Statement.Sense;
 
 /** Writes a statement in words that a person can proof-read; as long as the statement is. */
 final class Description {

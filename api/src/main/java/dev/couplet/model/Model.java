@@ -3,6 +3,8 @@ package dev.couplet.model;
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Polynomial;
 import dev.couplet.model.Statement.Objective;
+import dev.couplet.model.Statement.Range;
+import dev.couplet.model.Statement.Sense;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashSet;

@@ -1,6 +1,7 @@
 package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.model.Statement.Range;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;

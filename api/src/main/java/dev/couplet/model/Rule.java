@@ -3,6 +3,7 @@ package dev.couplet.model;
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
+import dev.couplet.model.Statement.Range;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.List;

@@ -18,6 +18,32 @@ import java.util.stream.IntStream;
  */
 @CheckReturnValue
 public final class Statement {
+  /** Whether a model's value is to be as low or as high as possible. */
+  public enum Sense {
+    /** Lower values are better; also the sense of a model without an objective. */
+    MINIMIZE,
+    /** Higher values are better. */
+    MAXIMIZE;
+
+    /** What a value is multiplied by where everything is minimised: 1 or -1. */
+    public int sign() {
+      return this == MINIMIZE ? 1 : -1;
+    }
+  }
+
+  /**
+   * Two numbers between which a quantity lies, both included.
+   *
+   * @param lowest the lower one
+   * @param highest the higher one
+   */
+  public record Range(double lowest, double highest) {
+    /** The difference of the two. */
+    public double width() {
+      return highest - lowest;
+    }
+  }
+
   /**
    * One named part of what a model minimises or maximises.
    *

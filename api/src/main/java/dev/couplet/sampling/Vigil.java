@@ -1,5 +1,6 @@
 package dev.couplet.sampling;
 
+import dev.couplet.sampling.Watch.Progress;
 import java.time.Duration;
 import java.util.OptionalDouble;
 import java.util.concurrent.atomic.AtomicReference;

@@ -1,5 +1,7 @@
 package dev.couplet.sampling;
 
+import java.time.Duration;
+import java.util.OptionalDouble;
 import java.util.function.Consumer;
 import java.util.function.LongSupplier;
 
@@ -10,6 +12,48 @@ import java.util.function.LongSupplier;
  * ends the run and reaches the caller. Immutable; the parts must be thread-safe.
  */
 public final class Watch {
+  /**
+   * A way to ask a run to stop from another thread, or before it starts.
+   *
+   * <p>Sticky: once stopped, it stays so, and every run that watches it ends. Thread-safe.
+   */
+  public static final class StopSignal {
+    private volatile boolean stopped;
+
+    private StopSignal() {}
+
+    /** A new signal, not yet given. */
+    public static StopSignal create() {
+      return new StopSignal();
+    }
+
+    /** Asks every run that watches this signal to stop. */
+    public void stop() {
+      stopped = true;
+    }
+
+    /** Whether a stop was asked for. */
+    public boolean stopped() {
+      return stopped;
+    }
+
+    @Override
+    public String toString() {
+      return stopped ? "StopSignal(stopped)" : "StopSignal(running)";
+    }
+  }
+
+  /**
+   * How far a run has come.
+   *
+   * @param elapsed the time since its start, on the run's clock
+   * @param share the share of the work done, 0 to 1; empty if the method cannot tell
+   * @param best the lowest energy (or best value) so far; empty if there is none yet
+   * @param bound a proved bound on the energy (or value); empty if there is none yet
+   */
+  public record Progress(
+      Duration elapsed, OptionalDouble share, OptionalDouble best, OptionalDouble bound) {}
+
   private static final Watch NONE =
       new Watch(StopSignal.create(), p -> {}, false, System::nanoTime);
 

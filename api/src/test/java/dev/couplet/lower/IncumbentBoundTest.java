@@ -9,6 +9,7 @@ import dev.couplet.audit.LoweringAudit;
 import dev.couplet.audit.RandomModels;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.form.State;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.model.Bit;
 import dev.couplet.model.Model;
 import dev.couplet.model.Plan;

@@ -16,6 +16,7 @@ import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.lower.Ledger.Entry;
 import dev.couplet.lower.Ledger.Kind;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.model.Bit;
 import dev.couplet.model.Choice;
 import dev.couplet.model.Model;

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.model.Bit;
 import dev.couplet.model.Choice;
 import dev.couplet.model.Condition;

@@ -14,6 +14,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import dev.couplet.model.Statement.Objective;
+import dev.couplet.model.Statement.Range;
+import dev.couplet.model.Statement.Sense;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;

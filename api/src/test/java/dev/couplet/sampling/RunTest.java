@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;

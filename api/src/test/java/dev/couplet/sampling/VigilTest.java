@@ -6,6 +6,8 @@ import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.sampling.Watch.Progress;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;

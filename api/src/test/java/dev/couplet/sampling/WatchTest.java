@@ -5,6 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.sampling.Watch.Progress;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.util.function.Consumer;
 import java.util.function.LongSupplier;
 import org.junit.jupiter.api.Test;

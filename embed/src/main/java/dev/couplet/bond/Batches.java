@@ -2,11 +2,11 @@ package dev.couplet.bond;
 
 import dev.couplet.form.State;
 import dev.couplet.sampling.Effort;
-import dev.couplet.sampling.Progress;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Structure;
 import dev.couplet.sampling.Vigil;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.Progress;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Collections;

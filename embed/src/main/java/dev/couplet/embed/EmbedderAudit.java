@@ -2,8 +2,8 @@ package dev.couplet.embed;
 
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;

@@ -1,7 +1,7 @@
 package dev.couplet.solve;
 
 import dev.couplet.model.Plan;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import dev.couplet.sampling.End;
 import java.util.List;
 import java.util.Locale;

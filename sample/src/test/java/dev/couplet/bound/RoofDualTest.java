@@ -9,8 +9,8 @@ import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Run;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 

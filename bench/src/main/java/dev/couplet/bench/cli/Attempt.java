@@ -2,10 +2,10 @@ package dev.couplet.bench.cli;
 
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
-import dev.couplet.sampling.Progress;
 import dev.couplet.sampling.Run;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
+import dev.couplet.sampling.Watch.Progress;
+import dev.couplet.sampling.Watch.StopSignal;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.Consumer;

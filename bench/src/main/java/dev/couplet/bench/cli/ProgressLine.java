@@ -1,6 +1,6 @@
 package dev.couplet.bench.cli;
 
-import dev.couplet.sampling.Progress;
+import dev.couplet.sampling.Watch.Progress;
 import java.io.PrintWriter;
 import java.util.Locale;
 import java.util.function.Consumer;

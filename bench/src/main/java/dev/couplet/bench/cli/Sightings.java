@@ -1,6 +1,6 @@
 package dev.couplet.bench.cli;
 
-import dev.couplet.sampling.Progress;
+import dev.couplet.sampling.Watch.Progress;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;

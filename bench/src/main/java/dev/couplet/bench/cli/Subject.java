@@ -5,7 +5,7 @@ import dev.couplet.form.Qubo;
 import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowering;
 import dev.couplet.model.Plan;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Structure;
 import java.util.List;

@@ -3,7 +3,7 @@ package dev.couplet.bench.instances;
 import dev.couplet.bench.instances.EntryList.Places;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.TokenReader;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.util.List;
 

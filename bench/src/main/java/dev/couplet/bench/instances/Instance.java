@@ -1,8 +1,8 @@
 package dev.couplet.bench.instances;
 
 import dev.couplet.form.Qubo;
-import dev.couplet.model.Sense;
 import dev.couplet.model.Statement;
+import dev.couplet.model.Statement.Sense;
 
 /**
  * One problem that stands in a file or comes from a generator: a form as it stands, or a model that

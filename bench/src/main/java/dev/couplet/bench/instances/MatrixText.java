@@ -1,7 +1,7 @@
 package dev.couplet.bench.instances;
 
 import dev.couplet.form.MatrixMarket;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.util.List;
 import java.util.Locale;

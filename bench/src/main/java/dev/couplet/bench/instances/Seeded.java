@@ -1,8 +1,8 @@
 package dev.couplet.bench.instances;
 
-import dev.couplet.form.PairVisitor;
 import dev.couplet.form.Qubo;
-import dev.couplet.model.Sense;
+import dev.couplet.form.Qubo.PairVisitor;
+import dev.couplet.model.Statement.Sense;
 import java.util.List;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;

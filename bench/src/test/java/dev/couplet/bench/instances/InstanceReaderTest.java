@@ -7,7 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.couplet.form.FormatException;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;

@@ -8,7 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.couplet.bench.instances.PublishedData.Published;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
-import dev.couplet.model.Sense;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.util.List;
 import org.junit.jupiter.api.Test;

@@ -5,7 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.bench.instances.PublishedData.Published;
-import dev.couplet.form.PairVisitor;
+import dev.couplet.form.Qubo.PairVisitor;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;

@@ -3,7 +3,7 @@ package dev.couplet.examples.rounds;
 import dev.couplet.form.Qubo;
 import dev.couplet.lower.Ledger;
 import dev.couplet.lower.Lowered;
-import dev.couplet.lower.Weight;
+import dev.couplet.lower.Lowered.Weight;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;

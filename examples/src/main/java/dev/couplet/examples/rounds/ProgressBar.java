@@ -1,6 +1,6 @@
 package dev.couplet.examples.rounds;
 
-import dev.couplet.sampling.Progress;
+import dev.couplet.sampling.Watch.Progress;
 import java.io.PrintStream;
 import java.time.Duration;
 import java.util.Locale;

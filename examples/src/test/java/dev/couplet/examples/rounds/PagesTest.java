@@ -6,8 +6,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.LoweringAudit;
 import dev.couplet.lower.Lowered;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.lower.Lowering;
-import dev.couplet.lower.Weight;
 import dev.couplet.lower.Weights;
 import dev.couplet.model.Plan;
 import dev.couplet.sampling.Effort;

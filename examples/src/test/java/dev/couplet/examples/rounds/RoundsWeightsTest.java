@@ -5,8 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.anneal.Annealing;
 import dev.couplet.lower.Lowered;
+import dev.couplet.lower.Lowered.Weight;
 import dev.couplet.lower.Lowering;
-import dev.couplet.lower.Weight;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Run;
 import java.util.List;
