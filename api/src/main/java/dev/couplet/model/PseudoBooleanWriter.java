@@ -1,6 +1,7 @@
 package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.math.BigDecimal;
@@ -33,9 +34,7 @@ final class PseudoBooleanWriter {
     this.statement = statement;
     this.objective = new PseudoBooleanObjective(statement);
     for (Decision decision : statement.decisions()) {
-      if (decision instanceof Choice<?> choice) {
-        addCode(choice);
-      }
+      statement.exactlyOne(decision).forEach(group -> addCode(decision, group));
     }
     for (Rule rule : statement.rules()) {
       addRule(rule);
@@ -43,51 +42,71 @@ final class PseudoBooleanWriter {
     objective.requireWhole();
   }
 
-  private void addCode(Choice<?> choice) {
+  private void addCode(Decision decision, List<Integer> group) {
     Polynomial.Builder sum = Polynomial.builder(statement.literals());
-    for (int k = 0; k < choice.values(); k++) {
-      sum.add(1, choice.firstLiteral() + k);
-    }
-    String name = "one option of '" + choice.name() + "'";
-    lines.add(new Line(name, sum.build(), List.of(), 1, 1, true));
+    group.forEach(literal -> sum.add(1, literal));
+    lines.add(new Line(decision.code(), sum.build(), List.of(), 1, 1, true));
   }
 
   private void addRule(Rule rule) {
-    boolean free = !rule.required() && rule.costPerUnit() == 0;
-    if (rule.terms().terms() == 0 || free) {
+    if (rule.squared()) {
+      throw new IllegalArgumentException(
+          "rule '"
+              + rule.name()
+              + "' costs the square of its amount, which the format cannot say; prefer it at a cost"
+              + " for each unit, or state the square as an objective");
+    }
+    for (Rule.Part part : rule.parts()) {
+      if (part.terms().terms() > 0 && (rule.required() || rule.costPerUnit() != 0)) {
+        addPart(rule, part);
+      }
+    }
+  }
+
+  private void addPart(Rule rule, Rule.Part part) {
+    List<Count> over = misses(rule, part, part.range().highest() - part.highest(), -1);
+    List<Count> under = misses(rule, part, part.lowest() - part.range().lowest(), 1);
+    if (part.step() > 1 || part.lowest() == part.highest()) {
+      List<Count> all = new ArrayList<>(over);
+      all.addAll(under);
+      double steps = (part.highest() - part.lowest()) / part.step();
+      String meaning = "the steps of '" + rule.name() + "'";
+      all.addAll(counts(meaning, steps, -(long) part.step(), BigDecimal.ZERO));
+      lines.add(new Line(rule.name(), part.terms(), all, 1, part.lowest(), true));
       return;
     }
-    List<Count> over = counts(rule, rule.range().highest() - rule.highest(), -1);
-    List<Count> under = counts(rule, rule.lowest() - rule.range().lowest(), 1);
-    if (rule.lowest() == rule.highest()) {
-      List<Count> both = new ArrayList<>(over);
-      both.addAll(under);
-      lines.add(new Line(rule.name(), rule.terms(), both, 1, rule.lowest(), true));
-      return;
+    if (Double.isFinite(part.lowest())) {
+      lines.add(new Line(rule.name(), part.terms(), under, 1, part.lowest(), false));
     }
-    if (Double.isFinite(rule.lowest())) {
-      lines.add(new Line(rule.name(), rule.terms(), under, 1, rule.lowest(), false));
-    }
-    if (Double.isFinite(rule.highest())) {
-      lines.add(new Line(rule.name(), rule.terms(), over, -1, rule.highest(), false));
+    if (Double.isFinite(part.highest())) {
+      lines.add(new Line(rule.name(), part.terms(), over, -1, part.highest(), false));
     }
   }
 
   /**
    * Variables that count the misses of a preferred rule on one side, up to the most there can be.
    */
-  private List<Count> counts(Rule rule, double most, int sign) {
+  private List<Count> misses(Rule rule, Rule.Part part, double most, int sign) {
+    boolean counted = !rule.required() && Double.isFinite(most);
+    double between = Math.floor(part.step() / 2);
+    BigDecimal price = Text.decimal(part.cost(1));
+    String meaning = "the miss of '" + rule.name() + "'";
+    return counted ? counts(meaning, Math.max(most, between), sign, price) : List.of();
+  }
+
+  /** Variables that hold a whole number up to the most, at a price for each unit. */
+  private List<Count> counts(String meaning, double most, long factor, BigDecimal price) {
     List<Count> counts = new ArrayList<>();
-    if (!rule.required() && Double.isFinite(most)) {
-      long held = 0;
-      for (long power = 1; held < most; power *= 2) {
-        long coefficient = Math.min(power, (long) most - held);
-        int variable = statement.literals() + counters.size();
-        counters.add(coefficient + " of the miss of '" + rule.name() + "'");
-        counts.add(new Count(sign * coefficient, variable));
-        objective.add(Text.decimal(rule.cost((double) coefficient)), variable);
-        held += coefficient;
+    long held = 0;
+    for (long power = 1; held < most; power *= 2) {
+      long coefficient = Math.min(power, (long) most - held);
+      int variable = statement.literals() + counters.size();
+      counters.add(coefficient + " of " + meaning);
+      counts.add(new Count(factor * coefficient, variable));
+      if (price.signum() != 0) {
+        objective.add(price.multiply(BigDecimal.valueOf(coefficient)), variable);
       }
+      held += coefficient;
     }
     return counts;
   }

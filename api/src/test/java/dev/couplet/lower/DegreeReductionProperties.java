@@ -24,7 +24,7 @@ class DegreeReductionProperties {
   static BitTable table(int size) {
     Model model = Model.named("products");
     model.bits("x", IntStream.range(0, size).boxed().toList());
-    return new BitTable(model.snapshot());
+    return new BitTable(new Coding(model.snapshot(), Lowering.standard()));
   }
 
   static Polynomial sum(List<Source> sources, int size) {

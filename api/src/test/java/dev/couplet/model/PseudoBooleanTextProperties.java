@@ -175,7 +175,9 @@ class PseudoBooleanTextProperties {
   /** The limits of each rule, each as "at least" or "equal", without common factors. */
   private static List<String> limits(Statement statement) {
     List<String> limits = new ArrayList<>();
-    for (Rule rule : statement.rules()) {
+    List<Rule.Part> parts =
+        statement.rules().stream().flatMap(rule -> rule.parts().stream()).toList();
+    for (Rule.Part rule : parts) {
       boolean equal = rule.lowest() == rule.highest();
       if (rule.terms().terms() > 0 && Double.isFinite(rule.lowest())) {
         limits.add(limit(rule.terms(), equal ? " = " : " >= ", (long) rule.lowest()));

@@ -11,6 +11,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.couplet.form.FormatException;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
+import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.io.StringReader;
 import java.nio.file.Files;
@@ -62,6 +63,11 @@ class PseudoBooleanTextTest {
     return assertThrows(FormatException.class, () -> read(text));
   }
 
+  private static Rule.Part only(Statement statement, int rule) {
+    assertEquals(1, statement.rules().get(rule).parts().size());
+    return statement.rules().get(rule).parts().get(0);
+  }
+
   @Test
   void aLinearTextIsRead() throws IOException {
     Statement statement = read(LINEAR);
@@ -69,12 +75,12 @@ class PseudoBooleanTextTest {
     assertEquals(Sense.MINIMIZE, statement.sense());
     assertEquals(Polynomial.builder(5).add(1, 1).add(-1, 2).build(), statement.objective());
     assertEquals(4, statement.rules().size());
-    Rule first = statement.rules().get(0);
-    assertEquals("constraint 1", first.name());
+    assertEquals("constraint 1", statement.rules().get(0).name());
+    Rule.Part first = only(statement, 0);
     assertEquals(Polynomial.builder(5).add(1, 0).add(4, 1).add(-2, 4).build(), first.terms());
     assertEquals(2, first.lowest());
     assertEquals(Double.POSITIVE_INFINITY, first.highest());
-    Rule last = statement.rules().get(3);
+    Rule.Part last = only(statement, 3);
     assertEquals(5, last.lowest());
     assertEquals(5, last.highest());
     assertEquals("x5", statement.describe(4));
@@ -88,8 +94,8 @@ class PseudoBooleanTextTest {
         Polynomial.builder(5).add(1, 1, 2).add(2, 3).add(-2, 3, 4).build(), statement.objective());
     assertEquals(
         Polynomial.builder(5).add(5, 0).add(-4, 0, 1).add(-2, 4).build(),
-        statement.rules().get(0).terms());
-    Rule last = statement.rules().get(2);
+        only(statement, 0).terms());
+    Rule.Part last = only(statement, 2);
     assertEquals(
         Polynomial.builder(5).add(-2, 0).add(-2, 1).add(2, 0, 1).add(3, 2, 3, 4).build(),
         last.terms());
@@ -103,9 +109,9 @@ class PseudoBooleanTextTest {
     String wide = "min: -1 x1 ;\n +1 x1 +1 x2 >= 1 ;\n +1 x1 ~x2 = 0 ;\n";
     assertEquals(read(wide).objective(), read(tight).objective());
     for (int k = 0; k < 2; k++) {
-      assertEquals(read(wide).rules().get(k).terms(), read(tight).rules().get(k).terms());
-      assertEquals(read(wide).rules().get(k).lowest(), read(tight).rules().get(k).lowest());
-      assertEquals(read(wide).rules().get(k).highest(), read(tight).rules().get(k).highest());
+      assertEquals(only(read(wide), k).terms(), only(read(tight), k).terms());
+      assertEquals(only(read(wide), k).lowest(), only(read(tight), k).lowest());
+      assertEquals(only(read(wide), k).highest(), only(read(tight), k).highest());
     }
   }
 
