@@ -19,15 +19,21 @@ final class Inputs {
       description = {
         "The instance: a Matrix Market file (symmetric coordinate; minimise x'Ax), an OR-Library"
             + " binary quadratic programme (maximise), a weighted edge list 'n m' / 'i j w'"
-            + " (maximum cut), or OPB, the text of the pseudo-Boolean competitions. Files compressed with gzip are read through. Also seeded:NAME, a"
-            + " published seeded instance such as seeded:p3000.1, or seeded:N:DENSITY:SEED."
+            + " (maximum cut); or, with rules, OPB (the text of the pseudo-Boolean competitions), a DIMACS graph (--as colour:K or clique), a TSPLIB"
+            + " symmetric tour, a QAPLIB quadratic assignment, an OR-Library generalised"
+            + " assignment or multi-dimensional knapsack, a job shop. Files compressed with gzip"
+            + " are read through. Also seeded:NAME, a published seeded instance such as"
+            + " seeded:p3000.1, or seeded:N:DENSITY:SEED."
       })
   private String file = "";
 
   @Option(
       names = "--as",
       paramLabel = "KIND",
-      description = "Read FILE as matrix, quadratic, cut or opb, whatever its content looks like.")
+      description = {
+        "Read FILE as matrix, quadratic, cut, colour:K (with K colours), clique, tsp, qap, gap,"
+            + " knapsack, jobshop or opb, whatever its content looks like."
+      })
   private @Nullable String kind;
 
   @Option(

@@ -22,10 +22,17 @@ public final class InstanceReader {
           new MatrixText(),
           new BinaryQuadraticText(),
           new EdgeListText(),
+          ColourText.unnumbered(),
+          new CliqueText(),
+          new TspText(),
+          new QapText(),
+          new GapText(),
+          new KnapsackText(),
+          new JobShopText(),
           new PseudoBooleanInstanceText());
 
   private static final int HEAD = 1 << 16;
-  private static final int HEAD_LINES = 3;
+  private static final int HEAD_LINES = 100;
 
   private final Optional<Format> format;
   private final OptionalInt item;
@@ -52,8 +59,9 @@ public final class InstanceReader {
    */
   public InstanceReader as(String kind) {
     for (Format candidate : FORMATS) {
-      if (candidate.kind().equals(kind)) {
-        return new InstanceReader(Optional.of(candidate), item);
+      Optional<Format> named = candidate.named(kind);
+      if (named.isPresent()) {
+        return new InstanceReader(named, item);
       }
     }
     throw new IllegalArgumentException(

@@ -2,8 +2,12 @@ package dev.couplet.bench.instances;
 
 import dev.couplet.form.FormatException;
 import dev.couplet.form.TokenReader;
+import dev.couplet.model.Statement;
 import java.io.BufferedReader;
+import java.io.IOException;
+import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.function.BiFunction;
 
 /**
  * An opened text with what a reader of a format has to know besides.
@@ -34,6 +38,36 @@ record Source(String path, String name, BufferedReader reader, OptionalInt item)
           "item " + picked + " was asked for, the file holds " + problems + "; pick a lower one");
     }
     return picked;
+  }
+
+  /**
+   * The problem that was picked of a text that begins with the number of problems.
+   *
+   * @param <P> what a problem is read as
+   */
+  <P> Instance oneOfSeveral(Reading<P> reading, BiFunction<String, P, Statement> stating)
+      throws IOException {
+    TokenReader text = tokens();
+    text.seekToken("the number of problems");
+    int problems = text.integer("the number of problems", 1, 1_000_000);
+    int picked = pick(text, problems);
+    Optional<P> found = Optional.empty();
+    for (int p = 1; p <= problems; p++) {
+      P read = reading.read(text);
+      if (p == picked) {
+        found = Optional.of(read);
+      }
+    }
+    text.endOfLine();
+    EntryList.endOfText(text);
+    String named = nameOf(picked, problems);
+    return new Instance.OfModel(named, stating.apply(named, found.orElseThrow()));
+  }
+
+  /** Reads one problem, from where the text stands. */
+  @FunctionalInterface
+  interface Reading<P> {
+    P read(TokenReader text) throws IOException;
   }
 
   /** The name of one problem of several. */

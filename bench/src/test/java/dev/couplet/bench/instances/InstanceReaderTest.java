@@ -123,7 +123,8 @@ class InstanceReaderTest {
     IllegalArgumentException fault =
         assertThrows(IllegalArgumentException.class, () -> InstanceReader.standard().as("sudoku"));
     assertEquals(
-        "there is no kind of file 'sudoku'; the kinds are matrix, quadratic, cut, opb",
+        "there is no kind of file 'sudoku'; the kinds are matrix, quadratic, cut, colour:K, clique,"
+            + " tsp, qap, gap, knapsack, jobshop, opb",
         fault.getMessage());
   }
 
