@@ -2,6 +2,7 @@ package dev.couplet.form;
 
 import dev.couplet.form.Qubo.PairVisitor;
 import java.util.Arrays;
+import java.util.function.BooleanSupplier;
 
 /**
  * The coefficients of a quadratic form: a constant, one linear coefficient a variable, and each
@@ -12,11 +13,15 @@ import java.util.Arrays;
  * variable. Nobody writes to the arrays; forms with the same pairs may share the places.
  */
 final class Quadratic {
+  private static final int LOOK_EVERY = 1 << 16;
+
   final double constant;
   final double[] linear;
   final int[] rowStart;
   final int[] column;
   final double[] value;
+  private final double magnitude;
+  private final int unitExponent;
 
   private Quadratic(
       double constant, double[] linear, int[] rowStart, int[] column, double[] value) {
@@ -25,6 +30,8 @@ final class Quadratic {
     this.rowStart = rowStart;
     this.column = column;
     this.value = value;
+    this.magnitude = sumOfMagnitudes();
+    this.unitExponent = leastUnitExponent();
   }
 
   /**
@@ -120,8 +127,33 @@ final class Quadratic {
     }
   }
 
+  /**
+   * Passes pairs on until {@code over} says so, which is asked at most 2^16 pairs and rows apart;
+   * whether all were passed.
+   */
+  boolean forEachPairUntil(BooleanSupplier over, PairVisitor visitor) {
+    int left = LOOK_EVERY;
+    for (int i = 0; i < linear.length; i++) {
+      for (int k = rowStart[i]; k < rowStart[i + 1]; k++) {
+        visitor.visit(i, column[k], value[k]);
+        if (--left <= 0) {
+          left = LOOK_EVERY;
+          if (over.getAsBoolean()) {
+            return false;
+          }
+        }
+      }
+      left--;
+    }
+    return true;
+  }
+
   /** The sum of the magnitudes of all coefficients, the constant among them. */
   double magnitude() {
+    return magnitude;
+  }
+
+  private double sumOfMagnitudes() {
     double sum = Math.abs(constant);
     for (double a : linear) {
       sum += Math.abs(a);
@@ -134,6 +166,10 @@ final class Quadratic {
 
   /** The exponent of the coarsest power of two that divides every coefficient. */
   int unitExponent() {
+    return unitExponent;
+  }
+
+  private int leastUnitExponent() {
     int exponent = unitExponent(constant);
     for (double a : linear) {
       exponent = Math.min(exponent, unitExponent(a));

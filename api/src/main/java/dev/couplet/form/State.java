@@ -169,6 +169,11 @@ public final class State implements Comparable<State> {
     return words.clone();
   }
 
+  /** The words themselves, which nobody writes to. */
+  long[] words() {
+    return words;
+  }
+
   /** The variables that are 1, a new set. */
   public BitSet toBitSet() {
     return BitSet.valueOf(words);

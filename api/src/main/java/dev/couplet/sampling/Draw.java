@@ -1,5 +1,6 @@
 package dev.couplet.sampling;
 
+import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 
 /**
@@ -13,5 +14,10 @@ public record Draw(State state, double energy, int multiplicity) {
   /** Refuses a multiplicity below 1. */
   public Draw {
     Check.positive("the multiplicity", multiplicity);
+  }
+
+  /** One draw that ended in a state, its energy computed here from the form; O(n + m). */
+  public static Draw of(Qubo form, State state) {
+    return new Draw(state, form.value(state), 1);
   }
 }

@@ -6,9 +6,8 @@ import java.util.AbstractList;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collections;
-import java.util.Comparator;
+import java.util.HashMap;
 import java.util.Iterator;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
@@ -48,35 +47,67 @@ public final class Draws implements Iterable<Draw> {
    * @throws IllegalArgumentException if there is no state, or one of another size
    */
   public static Draws of(Qubo form, List<State> states, End end, long seed) {
-    if (states.isEmpty()) {
+    Map<State, Draw> valued = new HashMap<>();
+    List<Draw> draws = new ArrayList<>(states.size());
+    for (State state : states) {
+      Draw draw = valued.get(state);
+      if (draw == null) {
+        draw = Draw.of(form, state);
+        valued.put(state, draw);
+      }
+      draws.add(draw);
+    }
+    return of(draws, end, seed);
+  }
+
+  /**
+   * Gathers draws 0, 1, 2, ..., each made by {@link Draw#of}: for runs that have valued their
+   * states already, so that nothing is left to do for it once their time is up.
+   *
+   * @param draws where each draw ended, at least one
+   * @throws IllegalArgumentException if there is no draw, or one of a multiplicity other than 1
+   */
+  public static Draws of(List<Draw> draws, End end, long seed) {
+    if (draws.isEmpty()) {
       throw new IllegalArgumentException("there is no draw; a run returns at least one state");
     }
-    Map<State, Integer> places = new LinkedHashMap<>();
-    int[] placeOf = new int[states.size()];
-    int[] counts = new int[states.size()];
-    int next = 0;
-    for (State state : states) {
-      int place = places.computeIfAbsent(state, unseen -> places.size());
-      counts[place]++;
-      placeOf[next++] = place;
+    Map<State, Integer> placeOfState = new HashMap<>();
+    List<Row> unsorted = new ArrayList<>();
+    int[] placeOf = new int[draws.size()];
+    for (int k = 0; k < placeOf.length; k++) {
+      Draw draw = draws.get(k);
+      if (draw.multiplicity() != 1) {
+        throw new IllegalArgumentException(
+            "draw " + k + " has multiplicity " + draw.multiplicity() + "; pass each by itself");
+      }
+      Integer seen = placeOfState.putIfAbsent(draw.state(), unsorted.size());
+      placeOf[k] = seen == null ? unsorted.size() : seen;
+      if (seen == null) {
+        unsorted.add(new Row(unsorted.size(), draw));
+      }
     }
-    List<Draw> unsorted = new ArrayList<>(places.size());
-    places.forEach(
-        (state, place) -> unsorted.add(new Draw(state, form.value(state), counts[place])));
     return sorted(unsorted, placeOf, end, seed);
   }
 
-  private static Draws sorted(List<Draw> unsorted, int[] placeOf, End end, long seed) {
-    List<Integer> order = new ArrayList<>(unsorted.size());
-    for (int place = 0; place < unsorted.size(); place++) {
-      order.add(place);
+  /** A row with its place in the order of first draws. Its energy orders it. */
+  private record Row(int place, Draw draw) implements Comparable<Row> {
+    @Override
+    public int compareTo(Row other) {
+      return Double.compare(draw.energy(), other.draw.energy());
     }
-    order.sort(Comparator.comparingDouble(place -> unsorted.get(place).energy()));
-    List<Draw> rows = new ArrayList<>(order.size());
-    int[] rowOfPlace = new int[order.size()];
-    for (int place : order) {
-      rowOfPlace[place] = rows.size();
-      rows.add(unsorted.get(place));
+  }
+
+  private static Draws sorted(List<Row> unsorted, int[] placeOf, End end, long seed) {
+    int[] counts = new int[unsorted.size()];
+    for (int place : placeOf) {
+      counts[place]++;
+    }
+    Collections.sort(unsorted);
+    List<Draw> rows = new ArrayList<>(unsorted.size());
+    int[] rowOfPlace = new int[unsorted.size()];
+    for (Row row : unsorted) {
+      rowOfPlace[row.place] = rows.size();
+      rows.add(new Draw(row.draw.state(), row.draw.energy(), counts[row.place]));
     }
     int[] rowOf = new int[placeOf.length];
     for (int k = 0; k < rowOf.length; k++) {

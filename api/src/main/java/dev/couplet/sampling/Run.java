@@ -1,5 +1,6 @@
 package dev.couplet.sampling;
 
+import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import java.util.List;
 import java.util.Objects;
@@ -46,6 +47,14 @@ public record Run(Effort effort, Watch watch, List<State> starts, Structure stru
   /** This run with what is known of the form. */
   public Run structure(Structure newStructure) {
     return new Run(effort, watch, starts, newStructure);
+  }
+
+  /**
+   * Begins to watch over this run on a form, with time kept for returning its draws; to be called
+   * first, on the caller's own thread.
+   */
+  public Vigil begin(Qubo form) {
+    return Vigil.begin(effort, watch, form);
   }
 
   /** Begins to watch over this run; to be called first, on the caller's own thread. */

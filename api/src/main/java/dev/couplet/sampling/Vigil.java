@@ -1,5 +1,6 @@
 package dev.couplet.sampling;
 
+import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Watch.Progress;
 import java.time.Duration;
 import java.util.OptionalDouble;
@@ -21,6 +22,16 @@ public final class Vigil {
 
   private static final long REPORT_NANOS = 50_000_000;
 
+  /** What it takes, at a guess, to finish and value a state: a variable, a pair. */
+  private static final long NANOS_A_VARIABLE = 16;
+
+  private static final long NANOS_A_PAIR = 2;
+
+  /** The share of a time limit that is kept for that at most. */
+  private static final int LARGEST_SHARE = 8;
+
+  private static final long UNLIMITED = Long.MAX_VALUE;
+
   private final Watch watch;
   private final LongSupplier clock;
   private final long began;
@@ -29,36 +40,58 @@ public final class Vigil {
   private final AtomicReference<@Nullable End> end = new AtomicReference<>();
   private long reported;
 
-  private Vigil(Effort effort, Watch watch) {
+  private Vigil(Effort effort, Watch watch, long kept) {
     this.watch = watch;
     this.clock = watch.clock();
     this.began = clock.getAsLong();
-    this.limit = effort.limit().map(Vigil::nanos).orElse(Long.MAX_VALUE);
+    this.limit = effort.limit().map(Vigil::nanos).map(all -> less(all, kept)).orElse(UNLIMITED);
     this.caller = Thread.currentThread();
     this.reported = -REPORT_NANOS;
   }
 
   /** Begins the watch over a run with this effort, made on the caller's own thread. */
   public static Vigil begin(Effort effort, Watch watch) {
-    return new Vigil(effort, watch);
+    return new Vigil(effort, watch, 0);
+  }
+
+  /**
+   * Begins the watch over a run on a form, made on the caller's own thread: of a time limit it
+   * keeps what it takes to finish and value one state, an eighth at most, so that the run can
+   * return by the end of it.
+   */
+  public static Vigil begin(Effort effort, Watch watch, Qubo form) {
+    return new Vigil(
+        effort, watch, NANOS_A_VARIABLE * form.size() + NANOS_A_PAIR * (long) form.pairs());
+  }
+
+  private static long less(long limit, long kept) {
+    return limit == UNLIMITED ? limit : limit - Math.min(kept, limit / LARGEST_SHARE);
   }
 
   private static long nanos(Duration duration) {
     try {
       return duration.toNanos();
     } catch (ArithmeticException centuries) {
-      return Long.MAX_VALUE;
+      return UNLIMITED;
     }
   }
 
   /** Whether the run has to end now; looks at signal, interrupt and clock. */
   public boolean over() {
+    return overBefore(0);
+  }
+
+  /**
+   * Whether the run has to end before an array of so many bytes could be had, at about a nanosecond
+   * a byte; if so, it ends now.
+   */
+  public boolean overBefore(long bytes) {
     if (end.get() != null) {
       return true;
     }
     if (watch.stopSignal().stopped() || caller.isInterrupted()) {
       end(End.STOPPED);
-    } else if (limit != Long.MAX_VALUE && clock.getAsLong() - began >= limit) {
+    } else if (limit != UNLIMITED && clock.getAsLong() - began >= limit - bytes) {
       end(End.DEADLINE);
     }
     return end.get() != null;

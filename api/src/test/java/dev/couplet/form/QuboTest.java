@@ -9,6 +9,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.function.Executable;
 
@@ -196,6 +197,58 @@ class QuboTest {
     assertEquals(0, tiny.pair(0, 1));
     assertEquals(1e-100, tiny.pair(1, 2));
     assertEquals(Qubo.builder(3).addPair(1, 2, 1e-100).build(), tiny);
+  }
+
+  @Test
+  void pairsArePassedUntilAskedToStop() {
+    Qubo.Builder star = Qubo.builder(200_000).addPair(0, 1, 1);
+    for (int i = 2; i < 200_000; i++) {
+      star.addPair(0, i, 1).addPair(i - 1, i, 2);
+    }
+    Qubo form = star.build();
+    List<Double> all = new ArrayList<>();
+    form.forEachPair((i, j, value) -> all.add(i + value / j));
+    for (int stop : new int[] {1, 3, 100}) {
+      List<Double> passed = new ArrayList<>();
+      int[] asked = {0};
+      int[] before = {0};
+      boolean whole =
+          form.forEachPairUntil(
+              () -> {
+                assertTrue(passed.size() - before[0] <= 1 << 16);
+                before[0] = passed.size();
+                return ++asked[0] == stop;
+              },
+              (i, j, value) -> passed.add(i + value / j));
+      assertEquals(stop > asked[0], whole);
+      assertEquals(all.subList(0, whole ? all.size() : before[0]), passed);
+      assertTrue(asked[0] == stop || asked[0] >= all.size() >> 16);
+    }
+  }
+
+  /** Zeros in every place, and a term of rounding: as by a plain walk over all pairs. */
+  @Test
+  void aValueAddsUpInTheOrderOfRows() {
+    SplittableRandom random = new SplittableRandom(4);
+    Qubo.Builder builder = Qubo.builder(130).addConstant(0.1);
+    for (int i = 0; i < 130; i++) {
+      builder.addLinear(i, random.nextDouble(-1, 1));
+      builder.addPair(i, (i + 1 + random.nextInt(128)) % 130, random.nextDouble(-1, 1));
+    }
+    Qubo form = builder.build();
+    for (int k = 0; k < 100; k++) {
+      State state = State.ofWords(130, random.nextLong(), random.nextLong(), random.nextInt(4));
+      double sum = form.constant();
+      for (int i = 0; i < 130; i++) {
+        if (state.get(i)) {
+          sum += form.linear(i);
+          for (int j = i + 1; j < 130; j++) {
+            sum += state.get(j) ? form.pair(i, j) : 0;
+          }
+        }
+      }
+      assertEquals(sum, form.value(state));
+    }
   }
 
   @Test

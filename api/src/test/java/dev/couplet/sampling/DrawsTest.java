@@ -42,6 +42,25 @@ class DrawsTest {
   }
 
   @Test
+  void drawsThatAreValuedAlreadyAreGatheredAlike() {
+    for (String[] states : new String[][] {{"11"}, {"00", "11", "00", "10"}, {"01", "10", "10"}}) {
+      List<Draw> valued = Stream.of(states).map(text -> Draw.of(FORM, State.parse(text))).toList();
+      assertEquals(draws(states), Draws.of(valued, End.DONE, 7));
+    }
+    assertEquals(row("10", 3, 1), Draw.of(FORM, State.parse("10")));
+  }
+
+  @Test
+  void valuedDrawsComeOneByOneAndOneAtLeast() {
+    assertThrows(IllegalArgumentException.class, () -> Draws.of(List.of(), End.DONE, 7));
+    List<Draw> merged = List.of(row("00", 1, 1), row("10", 3, 2));
+    String message =
+        assertThrows(IllegalArgumentException.class, () -> Draws.of(merged, End.DONE, 7))
+            .getMessage();
+    assertEquals("draw 1 has multiplicity 2; pass each by itself", message);
+  }
+
+  @Test
   void rowsOfEqualEnergyStandInTheOrderOfTheirFirstDraw() {
     assertEquals(List.of(row("01", 3, 1), row("10", 3, 2)), draws("01", "10", "10").rows());
     assertEquals(List.of(row("10", 3, 2), row("01", 3, 1)), draws("10", "01", "10").rows());

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Watch.Progress;
 import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
@@ -50,6 +51,38 @@ class VigilTest {
     clock.set(1_500);
     assertTrue(vigil.over());
     assertEquals(End.DEADLINE, vigil.reason());
+  }
+
+  /** By the figures of the class: 16 ns a variable and 2 ns a pair, of the limit an eighth. */
+  @Test
+  void onAFormTimeIsKeptForReturning() {
+    Qubo form = Qubo.builder(10).addPair(0, 1, 1).addPair(2, 3, 1).build();
+    Watch watch = Watch.none().clock(clock::get);
+    Vigil vigil = Vigil.begin(Effort.within(Duration.ofNanos(10_000)), watch, form);
+    clock.set(1_000 + 10_000 - 165);
+    assertFalse(vigil.over());
+    clock.addAndGet(1);
+    assertTrue(vigil.over());
+    assertEquals(End.DEADLINE, vigil.reason());
+    clock.set(1_000);
+    Vigil brief = Run.of(Effort.within(Duration.ofNanos(80))).watch(watch).begin(form);
+    clock.set(1_069);
+    assertFalse(brief.over());
+    clock.set(1_070);
+    assertTrue(brief.over());
+    assertFalse(Vigil.begin(Effort.draws(1), watch, form).over());
+  }
+
+  @Test
+  void whatCannotBeHadInTimeIsNotBegun() {
+    Vigil vigil = begin(Effort.within(Duration.ofNanos(500)));
+    clock.set(1_300);
+    assertFalse(vigil.overBefore(199));
+    assertFalse(vigil.over());
+    assertTrue(vigil.overBefore(200));
+    assertEquals(End.DEADLINE, vigil.reason());
+    assertTrue(vigil.over());
+    assertFalse(begin(Effort.draws(1)).overBefore(Long.MAX_VALUE));
   }
 
   @Test

@@ -24,13 +24,13 @@ final class Annealer implements Drawer {
   private final Reassignment reassignment;
   private final Descent descent;
 
-  Annealer(Adjacency rows, Run run, Schedule schedule, Finish finish) {
+  Annealer(Adjacency rows, Run run, Schedule schedule, Finish finish, Pace setUp) {
     this.run = run;
     this.schedule = schedule;
     this.finish = finish;
     this.fields = new LocalFields(rows);
     this.metropolis = new Metropolis(fields);
-    this.reassignment = new Reassignment(fields, run.structure());
+    this.reassignment = new Reassignment(fields, run.structure(), setUp);
     this.descent = new Descent(fields);
   }
 
@@ -38,10 +38,9 @@ final class Annealer implements Drawer {
   public List<State> draw(int first, int count, Pace pace) {
     SplittableRandom random = Streams.of(run.effort().seed(), first);
     State begin = DrawLoop.begin(fields.size(), run, first, random);
-    if (pace.look()) {
+    if (pace.look() || !fields.set(begin, pace)) {
       return List.of(begin);
     }
-    fields.set(begin);
     int sweeps = schedule.sweeps(first);
     for (int t = 0; t < sweeps; t++) {
       double inverse = schedule.inverseTemperature(t, sweeps);
@@ -57,10 +56,14 @@ final class Annealer implements Drawer {
 
   /** Also a draw that was told to end goes down a little, so that its state is worth returning. */
   private void descend(Pace pace) {
-    Pace own = pace.ended() ? Pace.closing() : pace;
-    descent.run(own);
-    while (!own.ended() && reassignment.descend(descent.least())) {
-      descent.run(own);
+    if (!pace.ended()) {
+      descent.run(pace);
+    }
+    while (!pace.ended() && reassignment.descend(pace)) {
+      descent.run(pace);
+    }
+    if (pace.ended()) {
+      descent.close();
     }
   }
 }

@@ -4,6 +4,8 @@ import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Qubo;
 import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.DrawLoop;
+import dev.couplet.kernel.Drawer;
+import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.ReplicaRows;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
@@ -11,6 +13,8 @@ import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Vigil;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.function.Supplier;
 
 /**
  * Simulated annealing: Metropolis sweeps at a falling temperature, then a descent to a local
@@ -25,9 +29,10 @@ import java.util.OptionalDouble;
  * another of its bits, in one step, without climbing over the penalty between them.
  *
  * <p>If the coefficients are small integers in units of their common divisor (pairs up to 15, a
- * variable with all its pairs up to 127) and there are 32 draws or more, or as many as time allows,
- * 64 draws are made at once, with random numbers of their own: each bit of a word belongs to one.
- * Those are other draws than the same seed gives to a run of fewer draws.
+ * variable with all its pairs up to 127) and there are 32 draws or more, or as many as time allows
+ * in a form of at most 2^14 variables, 64 draws are made at once, with random numbers of their own:
+ * each bit of a word belongs to one. Those are other draws than the same seed gives to a run of
+ * fewer draws.
  *
  * <p>Cost: a sweep takes O(n + d) steps, d the degrees of the variables that flip: O(n + m) at
  * most; made 64 at once, a draw takes about a twentieth of that. Memory: 24 bytes a pair, and 16
@@ -38,6 +43,10 @@ import java.util.OptionalDouble;
 @CheckReturnValue
 public final class Annealing implements Sampler {
   private static final int MANY = 32;
+
+  /** In larger forms, time is better spent on one long draw than on 64 short ones. */
+  private static final int MOST_BITS_OF_TIMED = 1 << 14;
+
   private static final Annealing STANDARD =
       new Annealing(
           Cooling.geometric(), OptionalDouble.empty(), OptionalDouble.empty(), Finish.DESCENT);
@@ -91,37 +100,37 @@ public final class Annealing implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    Vigil vigil = run.begin(form);
     run.requireFit(form.size());
-    if (vigil.over()) {
+    Pace setUp = Pace.of(vigil);
+    Optional<Adjacency> rows = setUp.look() ? Optional.empty() : Adjacency.of(form, setUp);
+    Optional<ReplicaRows> replicas =
+        rows.filter(built -> many(built, run)).flatMap(built -> ReplicaRows.of(built, setUp));
+    int batch = replicas.isPresent() ? ReplicaAnnealer.BATCH : 1;
+    Optional<Schedule> schedule = rows.map(built -> schedule(built, run, batch, setUp));
+    if (schedule.isEmpty() || setUp.look()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
-    Adjacency rows = Adjacency.of(form);
-    Optional<ReplicaRows> replicas = many(run) ? ReplicaRows.of(rows) : Optional.empty();
-    int batch = replicas.isPresent() ? ReplicaAnnealer.BATCH : 1;
-    Schedule schedule =
-        new Schedule(cooling, temperatures(rows, run), Sweeps.of(rows, run.effort(), batch));
-    return DrawLoop.run(
-        form,
-        run,
-        vigil,
-        batch,
-        () ->
-            replicas.isPresent()
-                ? new ReplicaAnnealer(replicas.get(), run, schedule, finish)
-                : new Annealer(rows, run, schedule, finish));
+    Supplier<Drawer> drawers =
+        replicas.isPresent()
+            ? () -> new ReplicaAnnealer(replicas.get(), run, schedule.get(), finish)
+            : () -> new Annealer(rows.get(), run, schedule.get(), finish, Pace.of(vigil));
+    return DrawLoop.run(form, run, vigil, batch, drawers);
   }
 
-  /** Whether there are draws enough to be worth making 64 at once, all by single flips. */
-  private static boolean many(Run run) {
-    return run.effort().draws().orElse(Integer.MAX_VALUE) >= MANY
-        && run.structure().exactlyOne().isEmpty();
+  /** Whether 64 draws are to be made at once, all by single flips. */
+  private static boolean many(Adjacency rows, Run run) {
+    OptionalInt draws = run.effort().draws();
+    boolean worthwhile =
+        draws.isPresent() ? draws.getAsInt() >= MANY : rows.size() <= MOST_BITS_OF_TIMED;
+    return worthwhile && run.structure().exactlyOne().isEmpty();
   }
 
-  private Temperatures temperatures(Adjacency rows, Run run) {
-    Temperatures own = Temperatures.of(rows, run.structure());
+  private Schedule schedule(Adjacency rows, Run run, int batch, Pace setUp) {
+    Temperatures own = Temperatures.of(rows, run.structure(), setUp);
     double first = hot.orElse(Math.max(own.hot(), cold.orElse(0)));
-    return new Temperatures(first, cold.orElse(Math.min(own.cold(), first)));
+    Temperatures ends = new Temperatures(first, cold.orElse(Math.min(own.cold(), first)));
+    return new Schedule(cooling, ends, Sweeps.of(rows, run.effort(), batch));
   }
 
   @Override

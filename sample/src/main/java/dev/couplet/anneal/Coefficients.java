@@ -10,42 +10,74 @@ import java.util.List;
  *
  * <p>Within an exactly-one set, pairs and the common part of the linear coefficients only hold the
  * code together: what counts is how the linear coefficients differ. Elsewhere all count.
- *
- * @param pairs of the pairs, each twice; 0 within a set
- * @param linear of the variables; in a set, less the lowest of the set
  */
-@SuppressWarnings("ArrayRecordComponent") // Passed from one step to the next, never kept.
-record Coefficients(double[] pairs, double[] linear) {
-  static Coefficients of(Adjacency rows, Structure structure) {
-    if (structure.exactlyOne().isEmpty()) {
-      return new Coefficients(rows.weight(), rows.linear());
-    }
-    double[] linear = rows.linear().clone();
-    int[] setOf = new int[rows.size()];
+final class Coefficients {
+  private final Adjacency rows;
+
+  /** For each variable its set, or -1; empty if there are no sets. */
+  private final int[] setOf;
+
+  /** For each set the lowest linear coefficient. */
+  private final double[] lowest;
+
+  private Coefficients(Adjacency rows, Structure structure) {
+    this.rows = rows;
+    this.lowest = new double[structure.exactlyOne().size()];
+    this.setOf = new int[lowest.length == 0 ? 0 : rows.size()];
     Arrays.fill(setOf, -1);
-    for (int s = 0; s < structure.exactlyOne().size(); s++) {
-      List<Integer> set = structure.exactlyOne().get(s);
-      double lowest = Double.POSITIVE_INFINITY;
+    Arrays.fill(lowest, Double.POSITIVE_INFINITY);
+    int s = 0;
+    for (List<Integer> set : structure.exactlyOne()) {
       for (int bit : set) {
         setOf[bit] = s;
-        lowest = Math.min(lowest, linear[bit]);
+        lowest[s] = Math.min(lowest[s], rows.linear()[bit]);
       }
-      for (int bit : set) {
-        linear[bit] -= lowest;
-      }
+      s++;
     }
-    return new Coefficients(between(rows, setOf), linear);
   }
 
-  private static double[] between(Adjacency rows, int[] setOf) {
-    double[] pairs = rows.weight().clone();
-    for (int i = 0; i < rows.size(); i++) {
-      for (int k = rows.start()[i]; setOf[i] >= 0 && k < rows.start()[i + 1]; k++) {
-        if (setOf[rows.neighbour()[k]] == setOf[i]) {
-          pairs[k] = 0;
-        }
+  /**
+   * Magnitudes above zero of a spread sample of the coefficients that count, ascending: of about
+   * {@code most} pairs and as many variables at most. O(n).
+   */
+  static double[] sample(Adjacency rows, Structure structure, int most) {
+    Coefficients all = new Coefficients(rows, structure);
+    double[] magnitude = new double[4 * most];
+    int count = all.gatherPairs(magnitude, most);
+    count = all.gatherLinear(magnitude, count, most);
+    Arrays.sort(magnitude, 0, count);
+    return Arrays.copyOf(magnitude, count);
+  }
+
+  private int gatherPairs(double[] to, int most) {
+    int step = 1 + rows.weight().length / most;
+    int end = 0;
+    int row = 0;
+    for (int k = 0; k < rows.weight().length; k += step) {
+      while (setOf.length > 0 && rows.start()[row + 1] <= k) {
+        row++;
+      }
+      boolean within = set(row) >= 0 && set(row) == set(rows.neighbour()[k]);
+      if (!within && rows.weight()[k] != 0) {
+        to[end++] = Math.abs(rows.weight()[k]);
       }
     }
-    return pairs;
+    return end;
+  }
+
+  private int set(int i) {
+    return setOf.length == 0 ? -1 : setOf[i];
+  }
+
+  private int gatherLinear(double[] to, int count, int most) {
+    int step = 1 + rows.size() / most;
+    int end = count;
+    for (int i = 0; i < rows.size(); i += step) {
+      double value = rows.linear()[i] - (set(i) < 0 ? 0 : lowest[set(i)]);
+      if (value != 0) {
+        to[end++] = Math.abs(value);
+      }
+    }
+    return end;
   }
 }

@@ -8,6 +8,7 @@ import dev.couplet.kernel.ReplicaRows;
 import dev.couplet.kernel.ReplicaSweeps;
 import dev.couplet.kernel.Streams;
 import dev.couplet.sampling.Run;
+import dev.couplet.sampling.Vigil;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -31,6 +32,11 @@ final class ReplicaAnnealer implements Drawer {
     this.finish = finish;
   }
 
+  /** How many states can be valued between two looks at the clock; one at least. */
+  private static int soon(ReplicaRows rows) {
+    return (int) Math.max(1, Vigil.STEPS / (rows.size() + rows.pairs() + 1));
+  }
+
   @Override
   public List<State> draw(int first, int count, Pace pace) {
     long seed = run.effort().seed();
@@ -52,6 +58,6 @@ final class ReplicaAnnealer implements Drawer {
     if (finish == Finish.DESCENT) {
       sweeps.descend(pace.ended() ? Pace.closing() : pace);
     }
-    return sweeps.states(count);
+    return sweeps.states(pace.ended() ? Math.min(count, soon(rows)) : count);
   }
 }

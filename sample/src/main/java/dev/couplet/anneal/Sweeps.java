@@ -7,7 +7,8 @@ import dev.couplet.sampling.Effort;
  * How many sweeps each draw makes.
  *
  * <p>Draws of one generation make the same number, and each generation twice as many as the one
- * before, from the number of the first on.
+ * before, from the number of the first on. In a timed run on a large form a generation is a single
+ * draw, and the first is so short that something is found soon.
  */
 record Sweeps(int first, int generation) {
   private static final int COUNTED = 1000;
@@ -15,12 +16,19 @@ record Sweeps(int first, int generation) {
   private static final int DRAWS_A_GENERATION = 16;
   private static final double STEPS = 0x1p30;
 
+  /** More variables than this make a form large. */
+  private static final int LARGE = 1 << 14;
+
+  private static final int FIRST_ATTEMPTS = 1 << 24;
+
   static Sweeps of(Adjacency rows, Effort effort, int batch) {
     if (effort.sweeps().isPresent()) {
       return new Sweeps(effort.sweeps().getAsInt(), Integer.MAX_VALUE);
     }
     if (effort.draws().isEmpty()) {
-      return new Sweeps(SHORTEST, Math.max(batch, DRAWS_A_GENERATION));
+      return rows.size() > LARGE && batch == 1
+          ? new Sweeps(Math.max(1, Math.min(SHORTEST, FIRST_ATTEMPTS / rows.size())), 1)
+          : new Sweeps(SHORTEST, Math.max(batch, DRAWS_A_GENERATION));
     }
     double sweep = 1.0 + rows.size() + 2.0 * rows.pairs();
     int fitting = (int) Math.min(COUNTED, STEPS / sweep);

@@ -1,6 +1,7 @@
 package dev.couplet.anneal;
 
 import dev.couplet.kernel.Adjacency;
+import dev.couplet.kernel.Pace;
 import dev.couplet.sampling.Structure;
 import java.util.Arrays;
 
@@ -15,9 +16,10 @@ import java.util.Arrays;
 record Temperatures(double hot, double cold) {
   private static final int SAMPLE = 1 << 12;
 
-  static Temperatures of(Adjacency rows, Structure structure) {
-    double[] scale = scales(rows);
-    double[] coefficient = sample(Coefficients.of(rows, structure));
+  /** The temperatures of a form; those of a part of it if the pace ends. */
+  static Temperatures of(Adjacency rows, Structure structure, Pace pace) {
+    double[] scale = scales(rows, pace);
+    double[] coefficient = Coefficients.sample(rows, structure, SAMPLE);
     if (scale.length == 0 || coefficient.length == 0) {
       return new Temperatures(1, 1);
     }
@@ -36,12 +38,12 @@ record Temperatures(double hot, double cold) {
   }
 
   /** The scales above zero, ascending; a spread sample of the variables if there are many. */
-  private static double[] scales(Adjacency rows) {
+  private static double[] scales(Adjacency rows, Pace pace) {
     int n = rows.size();
     int step = 1 + n / SAMPLE;
     double[] scale = new double[(n + step - 1) / step];
     int count = 0;
-    for (int i = 0; i < n; i += step) {
+    for (int i = 0; i < n && !pace.after(rows.degree(i)); i += step) {
       double value = scale(rows, i);
       if (value > 0) {
         scale[count++] = value;
@@ -68,25 +70,5 @@ record Temperatures(double hot, double cold) {
       square += half * half;
     }
     return unit * Math.sqrt(mean * mean + square);
-  }
-
-  /** Magnitudes above zero of a spread sample of the coefficients, ascending. */
-  private static double[] sample(Coefficients coefficients) {
-    double[] magnitude = new double[4 * SAMPLE];
-    int count = gather(coefficients.pairs(), magnitude, 0);
-    count = gather(coefficients.linear(), magnitude, count);
-    Arrays.sort(magnitude, 0, count);
-    return Arrays.copyOf(magnitude, count);
-  }
-
-  private static int gather(double[] from, double[] to, int count) {
-    int step = 1 + from.length / SAMPLE;
-    int end = count;
-    for (int k = 0; k < from.length; k += step) {
-      if (from[k] != 0) {
-        to[end++] = Math.abs(from[k]);
-      }
-    }
-    return end;
   }
 }

@@ -1,6 +1,9 @@
 package dev.couplet.bound;
 
 import dev.couplet.form.Qubo;
+import dev.couplet.sampling.Vigil;
+import java.util.Optional;
+import java.util.function.BooleanSupplier;
 
 /**
  * A form in whole numbers, so that arithmetic on it is exact.
@@ -26,6 +29,18 @@ final class ScaledForm {
   private final double slack;
 
   ScaledForm(Qubo form) {
+    this(form, new boolean[1], () -> false);
+  }
+
+  /** The form in whole numbers, unless its run is over before. */
+  static Optional<ScaledForm> of(Qubo form, Vigil vigil) {
+    boolean[] whole = {false};
+    ScaledForm scaled = new ScaledForm(form, whole, vigil::over);
+    return whole[0] ? Optional.of(scaled) : Optional.empty();
+  }
+
+  /** Tells in {@code whole} whether all pairs were passed before the run was over. */
+  private ScaledForm(Qubo form, boolean[] whole, BooleanSupplier over) {
     double magnitude = form.magnitude();
     size = form.size();
     shift = magnitude == 0 ? 0 : BITS - Math.getExponent(magnitude);
@@ -38,14 +53,21 @@ final class ScaledForm {
       linear[i] = whole(form.linear(i));
     }
     int[] next = {0};
-    form.forEachPair(
-        (i, j, value) -> {
-          int p = next[0]++;
-          first[p] = i;
-          second[p] = j;
-          pair[p] = whole(value);
-        });
-    step = form.exact() ? commonDivisor() : 1;
+    long[] divisor = {0};
+    for (long value : linear) {
+      divisor[0] = commonDivisor(divisor[0], Math.abs(value));
+    }
+    whole[0] =
+        form.forEachPairUntil(
+            over,
+            (i, j, value) -> {
+              int p = next[0]++;
+              first[p] = i;
+              second[p] = j;
+              pair[p] = whole(value);
+              divisor[0] = commonDivisor(divisor[0], Math.abs(pair[p]));
+            });
+    step = form.exact() ? divisor[0] : 1;
     slack = form.exact() ? 0 : roundingOf(form);
   }
 
@@ -59,19 +81,8 @@ final class ScaledForm {
     return ofScaling + Rounding.ofEnergy(form) + Rounding.ofSums(form, 16);
   }
 
-  private long commonDivisor() {
-    long divisor = 0;
-    for (long value : linear) {
-      divisor = commonDivisor(divisor, Math.abs(value));
-    }
-    for (long value : pair) {
-      divisor = commonDivisor(divisor, Math.abs(value));
-    }
-    return divisor;
-  }
-
   private static long commonDivisor(long a, long b) {
-    while (b != 0) {
+    while (b != 0 && a != b) {
       long rest = a % b;
       a = b;
       b = rest;

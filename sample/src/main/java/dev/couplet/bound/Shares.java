@@ -17,13 +17,15 @@ final class Shares {
   private final long[] left;
   private final long[] right;
 
-  /** Negative pairs are split evenly, the others not at all. */
-  Shares(ScaledForm form) {
+  /**
+   * Negative pairs are split evenly, the others not at all; nor is what the run has no time for.
+   */
+  Shares(ScaledForm form, Vigil vigil) {
     this.form = form;
     own = form.linear.clone();
     left = new long[form.pair.length];
     right = new long[form.pair.length];
-    for (int p = 0; p < left.length; p++) {
+    for (int p = 0; p < left.length && !((p + 1) % LOOK_EVERY == 0 && vigil.over()); p++) {
       long value = form.pair[p];
       if (value < 0) {
         give(p, value / 2, value - value / 2);

@@ -15,11 +15,14 @@ import java.util.OptionalDouble;
  * problem: a review, 2007). For forms without cycles it reaches the minimum, in general at most the
  * roof dual (Hammer, Hansen and Simeone 1984).
  *
- * <p>Time O(n + m) a round, memory O(n + m). Rounds end early when four in a row gain nothing.
+ * <p>Time O(n + m) a round, memory O(n + m). Rounds end early when four in a row gain nothing. If
+ * the run ends before a large form is set up, the bound is negative infinity.
  */
 public final class SplitBound implements Bound {
   /** Shares still move while the bound stands still: a round or two without gain prove nothing. */
   private static final int PATIENCE = 4;
+
+  private static final int SMALL = 1 << 16;
 
   private final int rounds;
 
@@ -48,10 +51,19 @@ public final class SplitBound implements Bound {
   @Override
   public double below(Qubo form, Run run) {
     Vigil vigil = run.begin();
-    ScaledForm scaled = new ScaledForm(form);
-    Shares shares = new Shares(scaled);
-    long best = shares.bound();
     int most = run.effort().sweeps().orElse(rounds);
+    // A small form is bounded whatever the vigil says: that takes less than two looks are apart.
+    if (form.pairs() > SMALL && vigil.overBefore(32L * form.pairs())) {
+      return Double.NEGATIVE_INFINITY;
+    }
+    return ScaledForm.of(form, vigil)
+        .map(scaled -> below(scaled, most, vigil))
+        .orElse(Double.NEGATIVE_INFINITY);
+  }
+
+  private static double below(ScaledForm scaled, int most, Vigil vigil) {
+    Shares shares = new Shares(scaled, vigil);
+    long best = shares.bound();
     int idle = 0;
     for (int round = 0; round < most; round++) {
       if (!shares.improve(round % 2 == 0, vigil)) {

@@ -54,7 +54,7 @@ public final class BranchAndBound implements Sampler {
   @Override
   public Draws sample(Qubo form, Run run) {
     run.requireFit(form.size());
-    Vigil vigil = run.begin();
+    Vigil vigil = run.begin(form);
     SplittableRandom random = new SplittableRandom(run.effort().seed());
     State best = WarmStart.of(form, run.starts(), random, vigil);
     double energy = form.value(best);

@@ -1,6 +1,7 @@
 package dev.couplet.kernel;
 
 import dev.couplet.form.Qubo;
+import java.util.Optional;
 
 /**
  * A form laid out by rows, each pair in the rows of both its variables.
@@ -17,6 +18,7 @@ public final class Adjacency {
   private final double[] linear;
   private final double constant;
   private final boolean exact;
+  private final int[] portions;
 
   private Adjacency(
       int[] start,
@@ -31,6 +33,7 @@ public final class Adjacency {
     this.linear = linear;
     this.constant = constant;
     this.exact = exact;
+    this.portions = Portions.of(start);
   }
 
   /**
@@ -39,37 +42,67 @@ public final class Adjacency {
    * @throws IllegalArgumentException if the form has more than 2^30 pairs
    */
   public static Adjacency of(Qubo form) {
+    return of(form, Pace.free()).orElseThrow();
+  }
+
+  /**
+   * The rows of a form, unless the pace ends before they are built.
+   *
+   * @throws IllegalArgumentException if the form has more than 2^30 pairs
+   */
+  public static Optional<Adjacency> of(Qubo form, Pace pace) {
     int n = form.size();
     if (form.pairs() > 1 << 30) {
       throw new IllegalArgumentException(
           "the form has " + form.pairs() + " pairs, its rows can hold at most " + (1 << 30));
     }
     int[] next = new int[n + 1];
-    form.forEachPair(
-        (i, j, value) -> {
-          next[i]++;
-          next[j]++;
-        });
-    int[] start = new int[n + 1];
-    for (int i = 0; i < n; i++) {
+    boolean counted =
+        form.forEachPairUntil(
+            pace::look,
+            (i, j, value) -> {
+              next[i]++;
+              next[j]++;
+            });
+    return counted ? filled(form, starts(next), next, pace) : Optional.empty();
+  }
+
+  /** Where rows of the given lengths begin; lengths become the same. */
+  private static int[] starts(int[] next) {
+    int[] start = new int[next.length];
+    for (int i = 0; i + 1 < next.length; i++) {
       start[i + 1] = start[i] + next[i];
       next[i] = start[i];
     }
+    return start;
+  }
+
+  private static Optional<Adjacency> filled(Qubo form, int[] start, int[] next, Pace pace) {
+    if (pace.lookBefore(12L * start[form.size()])) {
+      return Optional.empty();
+    }
+    int n = form.size();
     int[] neighbour = new int[start[n]];
     double[] weight = new double[start[n]];
     // Pairs arrive with i ascending, then j: so every row fills up in ascending order.
-    form.forEachPair(
-        (i, j, value) -> {
-          neighbour[next[i]] = j;
-          weight[next[i]++] = value;
-          neighbour[next[j]] = i;
-          weight[next[j]++] = value;
-        });
+    boolean filled =
+        form.forEachPairUntil(
+            pace::look,
+            (i, j, value) -> {
+              neighbour[next[i]] = j;
+              weight[next[i]++] = value;
+              neighbour[next[j]] = i;
+              weight[next[j]++] = value;
+            });
+    if (!filled) {
+      return Optional.empty();
+    }
     double[] linear = new double[n];
     for (int i = 0; i < n; i++) {
       linear[i] = form.linear(i);
     }
-    return new Adjacency(start, neighbour, weight, linear, form.constant(), form.exact());
+    return Optional.of(
+        new Adjacency(start, neighbour, weight, linear, form.constant(), form.exact()));
   }
 
   /** The number of variables n. */
@@ -115,6 +148,14 @@ public final class Adjacency {
   /** Whether sums of coefficients are free of rounding. */
   public boolean exact() {
     return exact;
+  }
+
+  /**
+   * Boundaries of ranges of rows of which one pass does not outlast a {@link Pace}: 0 first, n
+   * last.
+   */
+  int[] portions() {
+    return portions;
   }
 
   /** The sum of the magnitudes of the coefficients that variable {@code i} has a part in. */

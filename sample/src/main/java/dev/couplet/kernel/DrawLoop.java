@@ -2,6 +2,7 @@ package dev.couplet.kernel;
 
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
@@ -23,6 +24,8 @@ import java.util.function.Supplier;
  * finished, so that the draws returned do not depend on the threads; but if the number of draws is
  * open, the first that reaches the target ends the run at once. A draw that stop or deadline cut
  * short is returned only if it is lower than all that were finished.
+ *
+ * <p>Each state is valued once, when its draw ends, so that little is left to do once time is up.
  */
 public final class DrawLoop {
   private final Qubo form;
@@ -66,7 +69,7 @@ public final class DrawLoop {
   public static Draws unbegun(Qubo form, Run run, Vigil vigil) {
     long seed = run.effort().seed();
     State first = begin(form.size(), run, 0, Streams.of(seed, 0));
-    return Draws.of(form, List.of(first), vigil.reason(), seed);
+    return Draws.of(List.of(Draw.of(form, first)), vigil.reason(), seed);
   }
 
   /** Where draw {@code number} begins: at its start, or else at random. */
@@ -98,13 +101,13 @@ public final class DrawLoop {
   }
 
   private void take(int number, State state, boolean ended) {
-    double energy = form.value(state);
-    boolean reached = effort.target().isPresent() && energy <= effort.target().getAsDouble();
+    Draw draw = Draw.of(form, state);
+    boolean reached = effort.target().isPresent() && draw.energy() <= effort.target().getAsDouble();
     if (ended && !reached) {
-      kept.cutShort(number, state, energy);
+      kept.cutShort(number, draw);
       return;
     }
-    kept.finished(number, state, energy);
+    kept.finished(number, draw);
     if (reached) {
       cut.accumulateAndGet(number, Math::min);
       if (effort.draws().isEmpty()) {
@@ -143,6 +146,6 @@ public final class DrawLoop {
     } else if (kept.total() == limit) {
       end = End.DONE;
     }
-    return Draws.of(form, kept.upTo(last), end, effort.seed());
+    return Draws.of(kept.upTo(last), end, effort.seed());
   }
 }

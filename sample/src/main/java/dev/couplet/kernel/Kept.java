@@ -1,6 +1,6 @@
 package dev.couplet.kernel;
 
-import dev.couplet.form.State;
+import dev.couplet.sampling.Draw;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -14,10 +14,16 @@ import org.jspecify.annotations.Nullable;
  * memory.
  */
 final class Kept {
-  private record Entry(int number, State state, double energy) {}
+  private record Entry(int number, Draw draw) {
+    double energy() {
+      return draw.energy();
+    }
+  }
 
   private static final Comparator<Entry> BY_ENERGY =
       Comparator.comparingDouble(Entry::energy).thenComparingInt(Entry::number);
+
+  private static final Comparator<Entry> BY_NUMBER = Comparator.comparingInt(Entry::number);
 
   private final int capacity;
   private List<Entry> finished = new ArrayList<>();
@@ -33,28 +39,31 @@ final class Kept {
     return new Kept(Integer.MAX_VALUE);
   }
 
-  /** Keeps as many states as fit into 2^24 words, 1,024 at least and 2^20 at most. */
+  /**
+   * Keeps as many states as fit into 2^24 words, 1,024 at least and 2^14 at most: more would take
+   * too long to sort and merge when time is up.
+   */
   static Kept within(int size) {
     int words = 1 + size / 64;
-    return new Kept(Math.min(1 << 20, Math.max(1 << 10, (1 << 24) / words)));
+    return new Kept(Math.min(1 << 14, Math.max(1 << 10, (1 << 24) / words)));
   }
 
-  synchronized void finished(int number, State state, double energy) {
-    finished.add(new Entry(number, state, energy));
+  synchronized void finished(int number, Draw draw) {
+    finished.add(new Entry(number, draw));
     total++;
-    best = Math.min(best, energy);
+    best = Math.min(best, draw.energy());
     if (finished.size() >= capacity) {
       finished.sort(BY_ENERGY);
       finished = new ArrayList<>(finished.subList(0, capacity / 2));
     }
   }
 
-  synchronized void cutShort(int number, State state, double energy) {
-    Entry entry = new Entry(number, state, energy);
+  synchronized void cutShort(int number, Draw draw) {
+    Entry entry = new Entry(number, draw);
     if (cutShort == null || BY_ENERGY.compare(entry, cutShort) < 0) {
       cutShort = entry;
     }
-    best = Math.min(best, energy);
+    best = Math.min(best, draw.energy());
   }
 
   /** The lowest energy so far, infinite before the first. */
@@ -68,19 +77,28 @@ final class Kept {
   }
 
   /**
-   * The states of the draws up to a number, in order of their numbers; one that was cut short is
-   * among them only if it is lower than every other.
+   * The draws up to a number, in order of their numbers; one that was cut short is among them only
+   * if it is lower than every other.
    */
-  synchronized List<State> upTo(int last) {
-    List<Entry> kept = new ArrayList<>(finished);
-    kept.removeIf(entry -> entry.number > last);
-    kept.sort(Comparator.comparingInt(Entry::number));
-    Entry extra = cutShort;
-    if (extra != null
-        && extra.number <= last
-        && kept.stream().allMatch(entry -> extra.energy < entry.energy)) {
-      kept.add(extra);
+  synchronized List<Draw> upTo(int last) {
+    List<Entry> kept = new ArrayList<>(finished.size() + 1);
+    double lowest = Double.POSITIVE_INFINITY;
+    for (Entry entry : finished) {
+      if (entry.number <= last) {
+        kept.add(entry);
+        lowest = Math.min(lowest, entry.energy());
+      }
     }
-    return kept.stream().map(Entry::state).toList();
+    kept.sort(BY_NUMBER);
+    if (cutShort != null
+        && cutShort.number <= last
+        && (kept.isEmpty() || cutShort.energy() < lowest)) {
+      kept.add(cutShort);
+    }
+    List<Draw> draws = new ArrayList<>(kept.size());
+    for (Entry entry : kept) {
+      draws.add(entry.draw);
+    }
+    return draws;
   }
 }

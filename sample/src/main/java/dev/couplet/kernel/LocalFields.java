@@ -38,19 +38,41 @@ public final class LocalFields {
 
   /** Moves to a state; O(n + m). */
   public void set(State state) {
+    boolean whole = set(state, Pace.free());
+    assert whole : "a free pace never ends";
+  }
+
+  /** Moves to a state; if the pace ends that, returns false, and the fields are of no use. */
+  public boolean set(State state, Pace pace) {
     for (int i = 0; i < spin.length; i++) {
       spin[i] = state.spin(i);
     }
-    refresh();
+    return refresh(pace);
   }
 
-  /** Computes the fields afresh from the form's coefficients; O(n + m). */
-  public void refresh() {
+  /**
+   * Computes the fields afresh from the form's coefficients; O(n + m). If the pace ends that,
+   * returns false, and some fields are as they were.
+   */
+  public boolean refresh(Pace pace) {
+    int[] portion = rows.portions();
+    for (int p = 0; p + 1 < portion.length; p++) {
+      int from = portion[p];
+      int to = portion[p + 1];
+      refresh(from, to);
+      if (pace.after((long) to - from + rows.start()[to] - rows.start()[from])) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private void refresh(int from, int to) {
     int[] start = rows.start();
     int[] neighbour = rows.neighbour();
     double[] weight = rows.weight();
     double[] linear = rows.linear();
-    for (int i = 0; i < field.length; i++) {
+    for (int i = from; i < to; i++) {
       double sum = linear[i];
       for (int k = start[i]; k < start[i + 1]; k++) {
         if (spin[neighbour[k]] < 0) {
@@ -81,12 +103,18 @@ public final class LocalFields {
   /** The state as it is now. */
   public State state() {
     long[] words = new long[(spin.length + 63) >>> 6];
-    for (int i = 0; i < spin.length; i++) {
-      if (spin[i] < 0) {
-        words[i >> 6] |= 1L << i;
-      }
+    for (int w = 0; w < words.length; w++) {
+      words[w] = word(spin, w << 6, Math.min(spin.length, (w + 1) << 6));
     }
     return State.ofWords(spin.length, words);
+  }
+
+  private static long word(double[] spin, int from, int to) {
+    long word = 0;
+    for (int i = from; i < to; i++) {
+      word |= (Double.doubleToRawLongBits(spin[i]) >>> 63) << i;
+    }
+    return word;
   }
 
   /** The number of variables. */

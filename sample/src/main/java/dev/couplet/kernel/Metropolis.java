@@ -12,12 +12,10 @@ import java.util.SplittableRandom;
  */
 public final class Metropolis {
   private final LocalFields fields;
-  private final int[] portion;
 
   /** Sweeps over the given state. */
   public Metropolis(LocalFields fields) {
     this.fields = fields;
-    this.portion = Portions.of(fields.rows());
   }
 
   /**
@@ -25,6 +23,7 @@ public final class Metropolis {
    * of each variable that flips.
    */
   public boolean sweep(double inverseTemperature, SplittableRandom random, Pace pace) {
+    int[] portion = fields.rows().portions();
     for (int p = 0; p + 1 < portion.length; p++) {
       if (pace.after(attempt(portion[p], portion[p + 1], inverseTemperature, random))) {
         return false;

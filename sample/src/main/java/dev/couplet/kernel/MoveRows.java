@@ -1,6 +1,7 @@
 package dev.couplet.kernel;
 
 import dev.couplet.form.Qubo;
+import java.util.Optional;
 
 /**
  * The coefficients of a form as whole numbers, laid out for {@link Moves}: built once, shared by
@@ -32,41 +33,65 @@ public final class MoveRows {
   private final int length;
   private final int common;
   private final int[][] packed;
+  private final Adjacency adjacency;
   private final int[] start;
   private final int[] neighbour;
   private final int[] weight;
 
-  private MoveRows(Qubo form) {
-    this.scale = Scale.of(form);
+  private MoveRows(Qubo form, Scale scale, int[][] packed, Adjacency rows, Pace pace) {
+    int width = width(form, scale);
+    this.scale = scale;
     this.size = form.size();
     this.linear = new int[size];
     for (int i = 0; i < size; i++) {
       linear[i] = scale.whole(form.linear(i));
     }
-    int width = width(form);
     this.strands = Integer.SIZE / width;
-    this.common = width == Integer.SIZE ? 0 : scale.zeros();
-    this.length = (size + strands - 1) / strands;
-    boolean dense = dense(form, width);
-    Adjacency rows = Adjacency.of(dense ? Qubo.builder(0).build() : form);
-    this.packed = dense ? pack(form, width) : new int[0][];
+    this.common = common(scale, width);
+    this.length = length(size, width);
+    this.packed = packed;
+    this.adjacency = rows;
     this.start = rows.start();
     this.neighbour = rows.neighbour();
     this.weight = new int[neighbour.length];
-    for (int k = 0; k < weight.length; k++) {
+    for (int k = 0; k < weight.length && !pace.after(1); k++) {
       weight[k] = scale.whole(rows.weight()[k]);
     }
   }
 
   /** The rows of a form; O(n + m) for sparse ones, O(n^2) for dense ones. */
   public static MoveRows of(Qubo form) {
-    return new MoveRows(form);
+    return of(form, Pace.free()).orElseThrow();
   }
 
-  private int width(Qubo form) {
+  /** The rows of a form, unless the pace ends before they are built. */
+  public static Optional<MoveRows> of(Qubo form, Pace pace) {
+    Scale scale = Scale.of(form, pace);
+    int width = width(form, scale);
+    boolean dense = dense(form, width);
+    int[][] packed = dense && !pace.ended() ? pack(form, scale, width, pace) : new int[0][];
+    Qubo sparse = dense ? Qubo.builder(0).build() : form;
+    return pace.ended()
+        ? Optional.empty()
+        : Adjacency.of(sparse, pace)
+            .filter(rows -> !pace.lookBefore(8L * rows.pairs()))
+            .map(rows -> new MoveRows(form, scale, packed, rows, pace))
+            .filter(whole -> !pace.ended());
+  }
+
+  private static int common(Scale scale, int width) {
+    return width == Integer.SIZE ? 0 : scale.zeros();
+  }
+
+  private static int length(int size, int width) {
+    int strands = Integer.SIZE / width;
+    return (size + strands - 1) / strands;
+  }
+
+  private static int width(Qubo form, Scale scale) {
     for (int width = Byte.SIZE; width < Integer.SIZE; width *= 2) {
       boolean fits = (scale.largest() >> scale.zeros()) < (1 << (width - 1));
-      boolean worthwhile = (long) size * width >= (long) STRAND * Integer.SIZE;
+      boolean worthwhile = (long) form.size() * width >= (long) STRAND * Integer.SIZE;
       if (fits && worthwhile && dense(form, width)) {
         return width;
       }
@@ -79,15 +104,23 @@ public final class MoveRows {
     return 2.0 * DENSE * form.pairs() >= all && all * width / Byte.SIZE <= MOST_BYTES;
   }
 
-  private int[][] pack(Qubo form, int width) {
-    int[][] all = new int[size][length];
-    form.forEachPair(
-        (i, j, value) -> {
-          int bits = (scale.whole(value) >> common) & (int) ((1L << width) - 1);
-          all[i][j % length] |= bits << (j / length * width);
-          all[j][i % length] |= bits << (i / length * width);
-        });
-    return all;
+  private static int[][] pack(Qubo form, Scale scale, int width, Pace pace) {
+    int common = common(scale, width);
+    int length = length(form.size(), width);
+    int[][] all = new int[form.size()][];
+    for (int i = 0; i < all.length; i++) {
+      all[i] = new int[pace.after(length) ? 0 : length];
+    }
+    boolean whole =
+        !pace.ended()
+            && form.forEachPairUntil(
+                pace::look,
+                (i, j, value) -> {
+                  int bits = (scale.whole(value) >> common) & (int) ((1L << width) - 1);
+                  all[i][j % length] |= bits << (j / length * width);
+                  all[j][i % length] |= bits << (i / length * width);
+                });
+    return whole ? all : new int[0][];
   }
 
   /** Whether the whole numbers are the form's coefficients times 2^exponent, without rounding. */
@@ -98,6 +131,11 @@ public final class MoveRows {
   /** An energy of the form in the units of the moves, not rounded. */
   public double inUnits(double energy) {
     return Math.scalb(energy, scale.exponent());
+  }
+
+  /** The form by neighbours, with its own coefficients; empty if the rows are full. */
+  public Adjacency adjacency() {
+    return adjacency;
   }
 
   /** Whether the rows are full. */

@@ -60,12 +60,22 @@ public final class Moves {
 
   /** Moves to a state and frees all moves; as many flips as the state has ones. */
   public void set(State state) {
+    boolean whole = set(state, Pace.free());
+    assert whole : "a free pace never ends";
+  }
+
+  /** Moves to a state and frees all moves; if the pace ends that, returns false, half way there. */
+  public boolean set(State state, Pace pace) {
     clear();
     for (int i = 0; i < size; i++) {
       if (state.get(i)) {
         flip(i);
+        if (pace.after(rows.dense() ? size : 1L + rows.start()[i + 1] - rows.start()[i])) {
+          return false;
+        }
       }
     }
+    return true;
   }
 
   /** The number of variables. */

@@ -2,27 +2,41 @@ package dev.couplet.kernel;
 
 import dev.couplet.sampling.Vigil;
 import java.util.function.BooleanSupplier;
+import java.util.function.LongPredicate;
 
 /**
  * How a kernel finds out whether to go on: it tells the steps it has done, and every 2^16 of them
  * the watch over the run is asked. Belongs to one thread and one draw.
  *
- * <p>An elementary step is one attempted flip or one update of a neighbour. A kernel tells its
- * steps in portions of at most 2^19, so that the watch is asked at most 2^20 steps apart.
+ * <p>An elementary step is one attempted flip, one update of a neighbour, or one coefficient passed
+ * over. A kernel tells its steps in portions of at most 2^16, so that the watch is asked at most
+ * 2^17 steps apart, an eighth of what is promised.
  */
 public final class Pace {
   /** The largest portion of steps that may be told at once. */
-  public static final int PORTION = 1 << 19;
+  public static final int PORTION = 1 << 16;
 
   private static final int LOOK = 1 << 16;
 
   private final BooleanSupplier over;
+  private final LongPredicate overBefore;
+  private long left = Long.MAX_VALUE;
   private long since;
   private boolean ended;
 
   /** A pace that asks the given question. */
   public Pace(BooleanSupplier over) {
+    this(over, bytes -> over.getAsBoolean());
+  }
+
+  private Pace(BooleanSupplier over, LongPredicate overBefore) {
     this.over = over;
+    this.overBefore = overBefore;
+  }
+
+  /** A pace for work of a run that is no draw: setting up, for one. */
+  public static Pace of(Vigil vigil) {
+    return new Pace(vigil::over, vigil::overBefore);
   }
 
   /** A pace that never ends. */
@@ -30,15 +44,18 @@ public final class Pace {
     return new Pace(() -> false);
   }
 
-  /** A pace for what is still to be done when a draw was told to end: about 2^20 steps. */
+  /** A pace for what is still to be done when a draw was told to end: about 2^19 steps. */
   public static Pace closing() {
-    int[] looks = {Vigil.STEPS / LOOK};
-    return new Pace(() -> --looks[0] <= 0);
+    Pace pace = free();
+    pace.left = Vigil.STEPS / 2;
+    return pace;
   }
 
   /** Tells of steps done; whether the draw has to end. */
   public boolean after(long steps) {
     since += steps;
+    left -= steps;
+    ended = ended || left <= 0;
     return since < LOOK ? ended : look();
   }
 
@@ -46,6 +63,13 @@ public final class Pace {
   public boolean look() {
     since = 0;
     ended = ended || over.getAsBoolean();
+    return ended;
+  }
+
+  /** Asks whether the run ends before an array of so many bytes could be had. */
+  public boolean lookBefore(long bytes) {
+    since = 0;
+    ended = ended || overBefore.test(bytes);
     return ended;
   }
 

@@ -8,13 +8,13 @@ final class Portions {
 
   /**
    * Boundaries of ranges of rows, 0 first and n last, each with at most {@link Pace#PORTION} rows
-   * and places together, or of one row.
+   * and places together, or of one row; {@code start} tells where each row begins.
    */
-  static int[] of(Adjacency rows) {
-    int[] start = rows.start();
+  static int[] of(int[] start) {
+    int size = start.length - 1;
     int[] bounds = new int[16];
     int count = 1;
-    for (int i = 0; i < rows.size(); i++) {
+    for (int i = 0; i < size; i++) {
       int from = bounds[count - 1];
       long work = (long) (i + 1 - from) + start[i + 1] - start[from];
       if (work > Pace.PORTION && i > from) {
@@ -24,7 +24,7 @@ final class Portions {
         bounds[count++] = i;
       }
     }
-    bounds[count++] = rows.size();
+    bounds[count++] = size;
     return Arrays.copyOf(bounds, count);
   }
 }

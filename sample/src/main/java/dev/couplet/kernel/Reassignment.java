@@ -12,46 +12,81 @@ import java.util.SplittableRandom;
  *
  * <p>A move from i to j changes the energy by {@code field[j] - field[i] - b_ij}. Sets of which not
  * exactly one bit is 1 are left to single flips. Memory: one double for each two bits of a set;
- * sets of more than {@value #LARGEST} bits are left out.
+ * sets of more than {@value #LARGEST} bits are left out, and those that would take more than 2^26
+ * doubles together.
  */
 public final class Reassignment {
   private static final int LARGEST = 1 << 11;
 
+  private static final long MOST_PLACES = 1L << 26;
+
   private final LocalFields fields;
   private final int[][] sets;
   private final double[][] between;
-  private final long work;
+  private final double[] least;
 
   /** Moves of the given state within the sets of a structure. */
   public Reassignment(LocalFields fields, Structure structure) {
+    this(fields, structure, Pace.free());
+  }
+
+  /** As many sets as can be laid out before the pace ends. */
+  public Reassignment(LocalFields fields, Structure structure, Pace pace) {
     this.fields = fields;
+    Adjacency rows = fields.rows();
     List<int[]> kept = new ArrayList<>();
-    for (List<Integer> set : structure.exactlyOne()) {
-      if (set.size() > 1 && set.size() <= LARGEST) {
-        kept.add(set.stream().mapToInt(Integer::intValue).toArray());
+    List<double[]> pairs = new ArrayList<>();
+    int[] place = new int[structure.exactlyOne().isEmpty() ? 0 : rows.size()];
+    Arrays.fill(place, -1);
+    long free = MOST_PLACES;
+    for (List<Integer> members : structure.exactlyOne()) {
+      int size = members.size();
+      boolean fits = size > 1 && size <= LARGEST && (long) size * size <= free;
+      if (fits && !pace.ended()) {
+        int[] set = members.stream().mapToInt(Integer::intValue).toArray();
+        free -= (long) size * size;
+        kept.add(set);
+        pairs.add(between(rows, set, place, pace));
       }
     }
     this.sets = kept.toArray(new int[0][]);
-    this.between = new double[sets.length][];
-    long degrees = 0;
-    for (int s = 0; s < sets.length; s++) {
-      between[s] = between(fields.rows(), sets[s]);
-      degrees += sets[s].length + 2L * fields.rows().degree(sets[s][0]);
+    this.between = pairs.toArray(new double[0][]);
+    this.least = new double[sets.length];
+    for (int s = 0; !rows.exact() && s < sets.length && !pace.ended(); s++) {
+      least[s] = least(rows, sets[s], pace);
     }
-    this.work = degrees;
   }
 
-  private static double[] between(Adjacency rows, int[] set) {
+  /** The pairs within a set, row by row; {@code place} is -1 everywhere, before and after. */
+  private static double[] between(Adjacency rows, int[] set, int[] place, Pace pace) {
     double[] pairs = new double[set.length * set.length];
     for (int a = 0; a < set.length; a++) {
-      int from = rows.start()[set[a]];
-      int to = rows.start()[set[a] + 1];
-      for (int b = 0; b < set.length; b++) {
-        int found = Arrays.binarySearch(rows.neighbour(), from, to, set[b]);
-        pairs[a * set.length + b] = found < 0 ? 0 : rows.weight()[found];
+      place[set[a]] = a;
+    }
+    for (int a = 0; a < set.length && !pace.after(set.length + rows.degree(set[a])); a++) {
+      for (int k = rows.start()[set[a]]; k < rows.start()[set[a] + 1]; k++) {
+        int b = place[rows.neighbour()[k]];
+        if (b >= 0) {
+          pairs[a * set.length + b] = rows.weight()[k];
+        }
       }
     }
+    for (int bit : set) {
+      place[bit] = -1;
+    }
     return pairs;
+  }
+
+  /** What a move within a set must at least gain to count: below 0 by the rounding of two rows. */
+  private static double least(Adjacency rows, int[] set, Pace pace) {
+    double least = 0;
+    for (int bit : set) {
+      least = Math.min(least, 2 * Descent.least(rows, bit));
+      if (pace.after(rows.degree(bit))) {
+        break;
+      }
+    }
+    return least;
   }
 
   /** Whether there is anything to move. */
@@ -63,6 +98,9 @@ public final class Reassignment {
   public boolean sweep(double inverseTemperature, SplittableRandom random, Pace pace) {
     for (int s = 0; s < sets.length; s++) {
       int[] set = sets[s];
+      if (pace.after(set.length)) {
+        return false;
+      }
       int from = only(set);
       if (from < 0) {
         continue;
@@ -77,21 +115,24 @@ public final class Reassignment {
       if (accepted) {
         fields.flip(set[from]);
         fields.flip(set[to]);
+        if (pace.after((long) fields.rows().degree(set[from]) + fields.rows().degree(set[to]))) {
+          return false;
+        }
       }
     }
-    return !pace.after(work);
+    return true;
   }
 
-  /** Moves every set to its best bit, once; whether any moved. */
-  public boolean descend(double least) {
+  /** Moves every set to its best bit, once, unless the pace ends it; whether any moved. */
+  public boolean descend(Pace pace) {
     boolean moved = false;
-    for (int s = 0; s < sets.length; s++) {
+    for (int s = 0; s < sets.length && !pace.after(2L * sets[s].length); s++) {
       int from = only(sets[s]);
       if (from < 0) {
         continue;
       }
       int best = from;
-      double lowest = least;
+      double lowest = least[s];
       for (int to = 0; to < sets[s].length; to++) {
         double change = to == from ? 0 : change(s, from, to);
         if (change < lowest) {

@@ -29,50 +29,71 @@ public final class ReplicaRows {
 
   private final int[] order;
   private final List<ReplicaBlock> blocks;
+  private final long pairs;
   private final double half;
   private final int gainDigits;
   private final int weightDigits;
   private final boolean halves;
 
-  private ReplicaRows(Adjacency rows, ReplicaScale scale) {
-    this.order = Colouring.order(rows);
+  private ReplicaRows(int[] order, List<ReplicaBlock> blocks, ReplicaScale scale, long pairs) {
+    this.pairs = pairs;
+    this.order = order;
+    this.blocks = blocks;
     this.half = scale.half();
-    this.gainDigits = Integer.SIZE - Integer.numberOfLeadingZeros(scale.largestGain());
-    this.weightDigits = Integer.SIZE - Integer.numberOfLeadingZeros(scale.largestWeight());
-    this.blocks = blocks(rows);
-    boolean odd = false;
-    for (int i = 0; i < rows.size(); i++) {
-      odd |= (long) (rows.linear()[i] / half) % 2 != 0;
-    }
-    this.halves = odd;
+    this.gainDigits = digits(scale.largestGain());
+    this.weightDigits = digits(scale.largestWeight());
+    this.halves = scale.odd();
+  }
+
+  private static int digits(int number) {
+    return Integer.SIZE - Integer.numberOfLeadingZeros(number);
   }
 
   /** The rows, if gains are at most 127 steps. O(n + m) time and memory. */
   public static Optional<ReplicaRows> of(Adjacency rows) {
-    ReplicaScale scale = ReplicaScale.of(rows);
-    return scale.half() == 0 || scale.largestGain() > LARGEST_GAIN
-        ? Optional.empty()
-        : Optional.of(new ReplicaRows(rows, scale));
+    return of(rows, Pace.free());
   }
 
-  private List<ReplicaBlock> blocks(Adjacency rows) {
+  /** The rows, if gains are at most 127 steps and the pace does not end before they are built. */
+  public static Optional<ReplicaRows> of(Adjacency rows, Pace pace) {
+    ReplicaScale scale = ReplicaScale.of(rows, pace);
+    if (pace.ended() || scale.half() == 0 || scale.largestGain() > LARGEST_GAIN) {
+      return Optional.empty();
+    }
+    return Colouring.order(rows, pace).flatMap(order -> of(rows, order, scale, pace));
+  }
+
+  private static Optional<ReplicaRows> of(
+      Adjacency rows, int[] order, ReplicaScale scale, Pace pace) {
     int[] position = new int[order.length];
     for (int p = 0; p < order.length; p++) {
       position[order[p]] = p;
     }
-    int digits = weightDigits > 1 ? weightDigits : 0;
+    int weightDigits = digits(scale.largestWeight());
+    int masks = weightDigits > 1 ? weightDigits : 0;
+    int[] seen = new int[order.length];
     List<ReplicaBlock> all = new ArrayList<>();
     for (int from = 0; from < order.length; ) {
-      int length = Colouring.independent(rows, order, from, BLOCK);
-      all.add(new ReplicaBlock(rows, order, position, from, length, half, digits));
+      int length = Colouring.independent(rows, order, from, BLOCK, seen);
+      ReplicaBlock block =
+          new ReplicaBlock(rows, order, position, from, length, scale.half(), masks);
+      all.add(block);
       from += length;
+      if (pace.after((long) length * (1 + block.place.length))) {
+        return Optional.empty();
+      }
     }
-    return List.copyOf(all);
+    return Optional.of(new ReplicaRows(order, List.copyOf(all), scale, rows.pairs()));
   }
 
   /** The number of variables n. */
   public int size() {
     return order.length;
+  }
+
+  /** The number of pairs m. */
+  public long pairs() {
+    return pairs;
   }
 
   /** The variable at each place. */

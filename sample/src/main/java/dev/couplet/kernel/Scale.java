@@ -14,42 +14,54 @@ import dev.couplet.form.Qubo;
 record Scale(int exponent, boolean exact, int largest, int zeros) {
   private static final int FIELD_BITS = 27;
   private static final int MOST_ZEROS = 24;
+  private static final Scale UNKNOWN = new Scale(0, false, 0, 0);
 
-  static Scale of(Qubo form) {
+  /** The scale of a form; of no use if the pace ends before it is found. */
+  static Scale of(Qubo form, Pace pace) {
     double[] magnitude = new double[form.size()];
     boolean[] whole = {true};
     for (int i = 0; i < magnitude.length; i++) {
       magnitude[i] = Math.abs(form.linear(i));
       whole[0] &= form.linear(i) == Math.rint(form.linear(i));
     }
-    form.forEachPair(
-        (i, j, value) -> {
-          magnitude[i] += Math.abs(value);
-          magnitude[j] += Math.abs(value);
-          whole[0] &= value == Math.rint(value);
-        });
+    boolean summed =
+        form.forEachPairUntil(
+            pace::look,
+            (i, j, value) -> {
+              magnitude[i] += Math.abs(value);
+              magnitude[j] += Math.abs(value);
+              whole[0] &= value == Math.rint(value);
+            });
+    if (!summed) {
+      return UNKNOWN;
+    }
     double field = 0;
     for (double sum : magnitude) {
       field = Math.max(field, sum);
     }
     int fitting = field == 0 ? 0 : FIELD_BITS - 1 - Math.getExponent(field);
-    return measured(form, whole[0] ? Math.min(0, fitting) : fitting);
+    return measured(form, whole[0] ? Math.min(0, fitting) : fitting, pace);
   }
 
-  private static Scale measured(Qubo form, int exponent) {
+  private static Scale measured(Qubo form, int exponent, Pace pace) {
     Scale bare = new Scale(exponent, false, 0, 0);
     int[] seen = {0, 0};
     boolean[] exact = {true};
     for (int i = 0; i < form.size(); i++) {
       exact[0] &= bare.keeps(form.linear(i));
     }
-    form.forEachPair(
-        (i, j, value) -> {
-          int number = bare.whole(value);
-          seen[0] = Math.max(seen[0], Math.abs(number));
-          seen[1] |= number;
-          exact[0] &= bare.keeps(value);
-        });
+    boolean measured =
+        form.forEachPairUntil(
+            pace::look,
+            (i, j, value) -> {
+              int number = bare.whole(value);
+              seen[0] = Math.max(seen[0], Math.abs(number));
+              seen[1] |= number;
+              exact[0] &= bare.keeps(value);
+            });
+    if (!measured) {
+      return UNKNOWN;
+    }
     int zeros = Math.min(MOST_ZEROS, Integer.numberOfTrailingZeros(seen[1]));
     return new Scale(exponent, exact[0], seen[0], zeros);
   }

@@ -40,7 +40,9 @@ public final class Threads {
       onFailure.run();
     }
     guarded.run();
-    others.forEach(Threads::await);
+    for (Thread other : others) {
+      await(other);
+    }
     rethrow(failure.get());
   }
 

@@ -8,12 +8,14 @@ import dev.couplet.kernel.Descent;
 import dev.couplet.kernel.DrawLoop;
 import dev.couplet.kernel.Drawer;
 import dev.couplet.kernel.LocalFields;
+import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.Streams;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Vigil;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Goes down from random states, or from the starts of the run, by single flips that lower the
@@ -38,12 +40,14 @@ public final class GreedyDescent implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    Vigil vigil = run.begin(form);
     run.requireFit(form.size());
-    if (vigil.over()) {
+    Pace setUp = Pace.of(vigil);
+    Optional<Adjacency> built = setUp.look() ? Optional.empty() : Adjacency.of(form, setUp);
+    if (built.isEmpty()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
-    Adjacency rows = Adjacency.of(form);
+    Adjacency rows = built.get();
     return DrawLoop.run(form, run, vigil, 1, () -> drawer(rows, run));
   }
 
@@ -53,8 +57,7 @@ public final class GreedyDescent implements Sampler {
     long seed = run.effort().seed();
     return (first, count, pace) -> {
       State begin = DrawLoop.begin(rows.size(), run, first, Streams.of(seed, first));
-      if (!pace.look()) {
-        fields.set(begin);
+      if (!pace.look() && fields.set(begin, pace)) {
         descent.run(pace);
         return List.of(fields.state());
       }

@@ -21,10 +21,15 @@ final class RelinkPath {
     this.flipped = new int[moves.size()];
   }
 
-  /** Leaves the moves at the lowest state of the middle third, all of them free. */
+  /**
+   * Leaves the moves at the lowest state of the middle third, all of them free, unless the pace
+   * ends it.
+   */
   void walk(State from, State to, Budget budget, SplittableRandom random, Pace pace) {
     int distance = from.distance(to);
-    moves.set(from);
+    if (!moves.set(from, pace)) {
+      return;
+    }
     for (int i = 0; i < moves.size(); i++) {
       if (from.get(i) == to.get(i)) {
         moves.block(i);
@@ -42,6 +47,9 @@ final class RelinkPath {
         lowest = moves.energy();
         best = walked;
       }
+    }
+    if (pace.ended()) {
+      return;
     }
     while (walked > best) {
       moves.flip(flipped[--walked]);

@@ -15,6 +15,9 @@ final class Relinker implements Drawer {
   /** Elites are exhausted after this many paths in a row that did not improve them. */
   private static final int EXHAUSTED = 60;
 
+  /** In the place of an energy that nobody has asked for: above all others. */
+  private static final long UNKNOWN = Long.MAX_VALUE - 1;
+
   private final Workbench bench;
   private final RelinkPath path;
   private final Run run;
@@ -60,7 +63,11 @@ final class Relinker implements Drawer {
     Elites pool = new Elites(elites);
     State next = begin;
     do {
-      bench.descend(next, random, pace);
+      State reached = bench.descend(next, random, pace);
+      if (pace.ended()) {
+        pool.add(reached, UNKNOWN);
+        return pool;
+      }
       bench.walk().run(patience, budget, random, pace);
       pool.add(bench.walk().bestState(), bench.walk().bestEnergy());
       next = LocalFields.random(begin.size(), random);
@@ -80,6 +87,9 @@ final class Relinker implements Drawer {
       return false;
     }
     path.walk(pool.state(from), pool.state(to), budget, random, pace);
+    if (pace.ended()) {
+      return false;
+    }
     bench.walk().run(patience, budget, random, pace);
     return pool.improve(bench.walk().bestState(), bench.walk().bestEnergy());
   }

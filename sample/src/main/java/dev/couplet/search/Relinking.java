@@ -3,10 +3,12 @@ package dev.couplet.search;
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Qubo;
 import dev.couplet.kernel.DrawLoop;
+import dev.couplet.kernel.Pace;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Vigil;
+import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.function.Supplier;
 
@@ -67,14 +69,17 @@ public final class Relinking implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    Vigil vigil = run.begin(form);
     run.requireFit(form.size());
-    if (vigil.over()) {
+    Pace setUp = Pace.of(vigil);
+    Optional<Supplier<Workbench>> benches =
+        setUp.look() ? Optional.empty() : Workbench.of(form, run, setUp);
+    if (benches.isEmpty()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
-    Supplier<Workbench> benches = Workbench.of(form, run);
+    Supplier<Workbench> each = benches.get();
     int idle = patience.orElse((int) Math.min(1 << 30, Math.max(1000, 4L * form.size())));
-    return DrawLoop.run(form, run, vigil, 1, () -> new Relinker(benches.get(), run, elites, idle));
+    return DrawLoop.run(form, run, vigil, 1, () -> new Relinker(each.get(), run, elites, idle));
   }
 
   @Override

@@ -12,6 +12,7 @@ import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Vigil;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.SplittableRandom;
 import java.util.function.Supplier;
@@ -58,13 +59,16 @@ public final class Tabu implements Sampler {
 
   @Override
   public Draws sample(Qubo form, Run run) {
-    Vigil vigil = run.begin();
+    Vigil vigil = run.begin(form);
     run.requireFit(form.size());
-    if (vigil.over()) {
+    Pace setUp = Pace.of(vigil);
+    Optional<Supplier<Workbench>> benches =
+        setUp.look() ? Optional.empty() : Workbench.of(form, run, setUp);
+    if (benches.isEmpty()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
-    Supplier<Workbench> benches = Workbench.of(form, run);
-    return DrawLoop.run(form, run, vigil, 1, () -> drawer(benches.get(), run));
+    Supplier<Workbench> each = benches.get();
+    return DrawLoop.run(form, run, vigil, 1, () -> drawer(each.get(), run));
   }
 
   private Drawer drawer(Workbench bench, Run run) {
@@ -80,7 +84,10 @@ public final class Tabu implements Sampler {
   private static State search(
       Workbench bench, Run run, State begin, long idle, SplittableRandom random, Pace pace) {
     bench.goal().begin();
-    bench.descend(begin, random, pace);
+    State reached = bench.descend(begin, random, pace);
+    if (pace.ended()) {
+      return reached;
+    }
     Budget budget = Budget.of(run.effort());
     bench.walk().run(idle, budget, random, pace);
     State best = bench.walk().bestState();

@@ -54,8 +54,11 @@ final class FormSolver {
     OptionalDouble target = run.effort().target();
     Draws draws = DrawStage.run(form, run.starts(), run.structure(), bound, target, course);
     End end = DrawStage.end(draws, target);
-    Draws best = proof.filter(known -> known.best().energy() < draws.best().energy()).orElse(draws);
-    return best.end(end).bound(Math.min(bound, best.best().energy()));
+    boolean better = proof.isPresent() && proof.get().best().energy() < draws.best().energy();
+    Draws best = (better ? proof.get() : draws).end(end);
+    return bound == Double.NEGATIVE_INFINITY
+        ? best
+        : best.bound(Math.min(bound, best.best().energy()));
   }
 
   /** A state takes about a nanosecond; half the time may go into a proof. */

@@ -5,7 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.Forms;
+import dev.couplet.kernel.Pace;
+import dev.couplet.kernel.ReplicaRows;
 import dev.couplet.kernel.SamplerContract;
 import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
@@ -13,6 +16,7 @@ import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Structure;
+import dev.couplet.sampling.Vigil;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 
@@ -78,6 +82,27 @@ class ManyDrawsTest extends SamplerContract {
     double[] separate = meanAndError(method.sample(form, single));
     double error = Math.hypot(packed[1], separate[1]);
     assertEquals(separate[0], packed[0], 3.5 * error);
+  }
+
+  /** Of a batch that is cut short, no more states come back than can be valued soon. */
+  @Test
+  void anEndedBatchGivesAsManyStatesAsThereIsTimeToValue() {
+    for (int size : new int[] {1 << 10, 1 << 18, 1 << 19}) {
+      Qubo form = Forms.ring(size);
+      Adjacency rows = Adjacency.of(form);
+      Temperatures ends = new Temperatures(2, 1);
+      Schedule schedule = new Schedule(Cooling.linear(), ends, new Sweeps(100, 1));
+      ReplicaAnnealer annealer =
+          new ReplicaAnnealer(
+              ReplicaRows.of(rows).orElseThrow(),
+              Run.of(Effort.draws(64)),
+              schedule,
+              Finish.DESCENT);
+      int[] looks = {0};
+      List<State> states = annealer.draw(0, 64, new Pace(() -> ++looks[0] >= 3));
+      assertEquals(Math.max(1, Math.min(64, Vigil.STEPS / (3 * size + 1))), states.size());
+      assertTrue(states.stream().allMatch(state -> state.size() == size));
+    }
   }
 
   private static Structure oneBitKnown() {

@@ -39,6 +39,17 @@ public final class Forms {
     return form.build();
   }
 
+  /** A ring with chords: twice as many pairs as variables. */
+  public static Qubo ring(int size) {
+    Qubo.Builder form = Qubo.builder(size);
+    for (int i = 0; i < size; i++) {
+      form.addLinear(i, i % 3 - 1);
+      form.addPair(i, (i + 1) % size, 1);
+      form.addPair(i, (i + 1001) % size, -1);
+    }
+    return form.build();
+  }
+
   /** A square lattice with periodic borders of spins that are aligned by couplings of -1. */
   public static Qubo ferromagnet(int side) {
     Ising.Builder form = Ising.builder(side * side);

@@ -105,7 +105,7 @@ class ReassignmentTest {
     for (int start = 0; start < 27; start++) {
       fields.set(state(start));
       Reassignment moves = new Reassignment(fields, structure());
-      while (moves.descend(0)) {
+      while (moves.descend(Pace.free())) {
         assertEquals(SETS, fields.state().ones());
       }
       double reached = form.value(fields.state());

@@ -16,7 +16,9 @@ import dev.couplet.sampling.Sampler;
 import dev.couplet.sampling.Watch;
 import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import java.util.concurrent.atomic.AtomicLong;
 import org.junit.jupiter.api.Test;
 
@@ -139,6 +141,28 @@ public abstract class SamplerContract {
     assertValid(form, draws);
     // Once the 200th look has found the time up, nobody needs to look again but to take its leave.
     assertTrue(clock.get() <= 220_000_000, "looks: " + clock.get() / 1_000_000);
+  }
+
+  /**
+   * A form that takes many looks to set up: wherever the deadline comes, the run looks no more once
+   * it knows, and returns something valid.
+   */
+  @Test
+  void theDeadlineMayComeAtAnyLookAlsoWhileSettingUp() {
+    Qubo form = Forms.ring(1 << 17);
+    Set<State> begun = new HashSet<>();
+    for (int look = 1; look <= 100; look += 1 + look / 4) {
+      AtomicLong clock = new AtomicLong(-1);
+      Watch ticking = Watch.none().clock(() -> clock.incrementAndGet() * 1_000_000_000);
+      Run run = Run.of(Effort.within(Duration.ofSeconds(look))).watch(ticking);
+      Draws draws = sampler().sample(form, run);
+      assertEquals(End.DEADLINE, draws.end());
+      assertValid(form, draws);
+      // It began at 0, and one more look is allowed to a draw that takes its leave.
+      assertTrue(clock.get() <= look + 1, "looks: " + clock.get() + " of " + look);
+      begun.add(draws.best().state());
+    }
+    assertTrue(begun.size() > 1, "no run came beyond its beginning");
   }
 
   @Test

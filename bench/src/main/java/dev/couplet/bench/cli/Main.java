@@ -28,6 +28,7 @@ import picocli.CommandLine.Spec;
     subcommands = {
       SolveCommand.class,
       RateCommand.class,
+      OverrunCommand.class,
       FitCommand.class,
       LowerCommand.class,
       CommandLine.HelpCommand.class

@@ -35,11 +35,24 @@ final class TimedOptions {
 
   /** As much work as a part of the time allows. */
   Effort share(double part) {
+    return within("--seconds", seconds, part).seed(seed);
+  }
+
+  /**
+   * As much work as a time allows.
+   *
+   * @param option the option that names the time
+   * @throws IllegalArgumentException if the time is not above zero, or out of all reason
+   */
+  static Effort within(String option, double seconds) {
+    return within(option, seconds, 1);
+  }
+
+  private static Effort within(String option, double seconds, double part) {
     if (!(seconds > 0 && seconds <= LONGEST)) {
       throw new IllegalArgumentException(
-          "--seconds is " + seconds + ", it must be above 0 and at most a thousand million");
+          option + " is " + seconds + ", it must be above 0 and at most a thousand million");
     }
-    Duration time = Duration.ofNanos(Math.max(1, (long) (seconds * part * 1e9)));
-    return Effort.within(time).seed(seed);
+    return Effort.within(Duration.ofNanos(Math.max(1, (long) (seconds * part * 1e9))));
   }
 }
