@@ -31,10 +31,14 @@ final class Check {
     if (needed <= length) {
       return length;
     }
+    entries(needed);
+    return (int) Math.min(LONGEST_ARRAY, Math.max(needed, length + (length >> 1)));
+  }
+
+  static void entries(long needed) {
     if (needed > LONGEST_ARRAY) {
       throw new IllegalArgumentException("a form holds at most " + LONGEST_ARRAY + " entries");
     }
-    return (int) Math.min(LONGEST_ARRAY, Math.max(needed, length + (length >> 1)));
   }
 
   static double finite(String what, double value) {

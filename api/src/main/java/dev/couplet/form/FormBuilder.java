@@ -1,30 +1,25 @@
 package dev.couplet.form;
 
-import java.util.Arrays;
-
 /**
  * Collects the coefficients of a quadratic form. Repeated entries add up, in the order of arrival;
  * sums that come to zero are left out. Building takes time linear in the number of variables and
  * entries.
  *
- * <p>Memory: 16 bytes an entry, half as much again while it grows, and the form that is built;
- * entries that do not arrive in order take 8 more while they are sorted.
+ * <p>Memory: 16 bytes an entry, and 12 more while the form is built; entries that do not arrive in
+ * order take those twice, but no longer the 16.
  */
 abstract class FormBuilder<B extends FormBuilder<B>> {
   private final int size;
   private final double[] linear;
   private double constant;
-  private int[] rows = new int[16];
-  private int[] columns = new int[16];
-  private double[] values = new double[16];
-  private int count;
-  private boolean ordered = true;
+  private final PairLog pairs;
   private boolean rounding;
 
   FormBuilder(int size) {
     Check.size(size);
     this.size = size;
     this.linear = new double[size];
+    this.pairs = new PairLog(size);
   }
 
   abstract B self();
@@ -56,21 +51,8 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
     if (!Double.isFinite(value)) {
       Check.finite("the coefficient of pair (" + i + ", " + j + ")", value);
     }
-    append(Math.min(i, j), Math.max(i, j), value);
+    pairs.add(Math.min(i, j), Math.max(i, j), value);
     return self();
-  }
-
-  private void append(int row, int column, double value) {
-    if (count == rows.length) {
-      grow();
-    }
-    if (ordered && count > 0) {
-      int last = rows[count - 1];
-      ordered = last < row || (last == row && columns[count - 1] <= column);
-    }
-    rows[count] = row;
-    columns[count] = column;
-    values[count++] = value;
   }
 
   B add(Quadratic other, double factor) {
@@ -88,7 +70,7 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
     for (int i = 0; i < scaled.size(); i++) {
       linear[i] += scaled.linear[i];
     }
-    scaled.forEachPair(this::append);
+    scaled.forEachPair(pairs::add);
     return self();
   }
 
@@ -101,25 +83,9 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
     return self();
   }
 
-  private void grow() {
-    int capacity = Check.capacity(rows.length, count + 1L);
-    rows = Arrays.copyOf(rows, capacity);
-    columns = Arrays.copyOf(columns, capacity);
-    values = Arrays.copyOf(values, capacity);
-  }
-
   Quadratic finish() {
-    merge();
-    int[] rowStart = new int[size + 1];
-    for (int p = 0; p < count; p++) {
-      rowStart[rows[p] + 1]++;
-    }
-    for (int i = 0; i < size; i++) {
-      rowStart[i + 1] += rowStart[i];
-    }
-    int[] column = Arrays.copyOf(columns, count);
-    double[] value = Arrays.copyOf(values, count);
-    Quadratic form = Quadratic.of(constant, linear.clone(), rowStart, column, value);
+    PairLog.Rows rows = pairs.compress();
+    Quadratic form = Quadratic.of(constant, linear.clone(), rows.start, rows.column, rows.value);
     if (!rounding && form.magnitude() >= Check.EXACT_LIMIT && form.unitExponent() >= 0) {
       throw new IllegalArgumentException(
           "the integer coefficients add up to "
@@ -128,28 +94,5 @@ abstract class FormBuilder<B extends FormBuilder<B>> {
               + " call allowRounding()");
     }
     return form;
-  }
-
-  /** Brings the entries in order, adds up those of one pair, and drops sums of zero. */
-  private void merge() {
-    if (!ordered) {
-      PairOrder.sort(rows, columns, values, count, size);
-      ordered = true;
-    }
-    int kept = 0;
-    for (int p = 0; p < count; ) {
-      int row = rows[p];
-      int column = columns[p];
-      double sum = 0;
-      while (p < count && rows[p] == row && columns[p] == column) {
-        sum += values[p++];
-      }
-      if (sum != 0) {
-        rows[kept] = row;
-        columns[kept] = column;
-        values[kept++] = sum;
-      }
-    }
-    count = kept;
   }
 }

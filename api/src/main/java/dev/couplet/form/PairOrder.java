@@ -1,7 +1,5 @@
 package dev.couplet.form;
 
-import java.util.Arrays;
-
 /**
  * Orders index pairs by row, then column, in time linear in their number and the largest index, or
  * by comparison where the pairs are few: a small form over many variables must not cost a pass over
@@ -27,50 +25,18 @@ final class PairOrder {
       return identity;
     }
     return count < size / FEW
-        ? compared(rows, columns, count)
+        ? compared(identity, rows, columns)
         : byKey(byKey(identity, columns, size), rows, size);
   }
 
-  private static int[] compared(int[] rows, int[] columns, int count) {
-    Integer[] order = new Integer[count];
-    Arrays.setAll(order, p -> p);
-    Arrays.sort(
-        order,
+  private static int[] compared(int[] positions, int[] rows, int[] columns) {
+    MergeSort.sort(
+        positions,
         (p, q) ->
             rows[p] != rows[q]
                 ? Integer.compare(rows[p], rows[q])
                 : Integer.compare(columns[p], columns[q]));
-    return Arrays.stream(order).mapToInt(Integer::intValue).toArray();
-  }
-
-  /** Brings entries into the order of their pairs, in place. */
-  static void sort(int[] rows, int[] columns, double[] values, int count, int size) {
-    int[] from = of(rows, columns, count, size);
-    for (int p = 0; p < count; p++) {
-      if (from[p] >= 0) {
-        cycle(rows, columns, values, from, p);
-      }
-    }
-  }
-
-  /** Moves the entries of one cycle of the permutation; places done are marked negative. */
-  private static void cycle(int[] rows, int[] columns, double[] values, int[] from, int first) {
-    int row = rows[first];
-    int column = columns[first];
-    double value = values[first];
-    int to = first;
-    while (from[to] != first) {
-      int source = from[to];
-      rows[to] = rows[source];
-      columns[to] = columns[source];
-      values[to] = values[source];
-      from[to] = ~source;
-      to = source;
-    }
-    rows[to] = row;
-    columns[to] = column;
-    values[to] = value;
-    from[to] = ~first;
+    return positions;
   }
 
   private static boolean isSorted(int[] rows, int[] columns, int count) {

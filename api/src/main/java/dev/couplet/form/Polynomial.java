@@ -1,6 +1,7 @@
 package dev.couplet.form;
 
 import java.util.Arrays;
+import org.jspecify.annotations.Nullable;
 
 /**
  * A multilinear form of any degree in 0/1 variables: a sum of coefficients times products of
@@ -126,16 +127,81 @@ public final class Polynomial {
     return builder(size).add(this, 1).add(other, 1).build();
   }
 
-  /** This polynomial with every coefficient multiplied by {@code number}. */
+  /** The sum of the magnitudes of all coefficients: no value is larger in magnitude. */
+  public double magnitude() {
+    double sum = 0;
+    for (double one : coefficient) {
+      sum += Math.abs(one);
+    }
+    return sum;
+  }
+
+  /** The constant and all negative coefficients added up: no value is lower. */
+  public double lowest() {
+    double sum = constant();
+    for (int t = constantTerms(); t < coefficient.length; t++) {
+      sum += Math.min(0, coefficient[t]);
+    }
+    return sum;
+  }
+
+  /** The constant and all positive coefficients added up: no value is higher. */
+  public double highest() {
+    double sum = constant();
+    for (int t = constantTerms(); t < coefficient.length; t++) {
+      sum += Math.max(0, coefficient[t]);
+    }
+    return sum;
+  }
+
+  /** How many terms have no variable: 0 or 1. */
+  private int constantTerms() {
+    return coefficient.length > 0 && width(0) == 0 ? 1 : 0;
+  }
+
+  /** Whether every coefficient is a whole number. */
+  public boolean whole() {
+    for (double one : coefficient) {
+      if (one != Math.rint(one)) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /**
+   * This polynomial with every coefficient multiplied by {@code number}; linear in its terms, whose
+   * places are shared.
+   *
+   * @throws IllegalArgumentException if a product is not finite
+   */
   @CheckReturnValue
   public Polynomial times(double number) {
-    return number == 1 ? this : builder(size).add(this, number).build();
+    if (number == 1) {
+      return this;
+    }
+    double[] scaled = new double[coefficient.length];
+    boolean zeros = false;
+    for (int t = 0; t < scaled.length; t++) {
+      scaled[t] = number * coefficient[t];
+      zeros |= scaled[t] == 0;
+      if (!Double.isFinite(scaled[t])) {
+        int[] product = Arrays.copyOfRange(factor, start[t], start[t + 1]);
+        Check.finite("the coefficient of the product of " + Arrays.toString(product), scaled[t]);
+      }
+    }
+    return zeros
+        ? builder(size).add(this, number).build()
+        : new Polynomial(size, start, factor, scaled);
   }
 
   /** The product with another polynomial in the same variables; all pairs of terms are formed. */
   @CheckReturnValue
   public Polynomial times(Polynomial other) {
     requireSameSize(other);
+    if (degree() <= 1 && equals(other)) {
+      return LinearSquare.of(this);
+    }
     Builder product = builder(size);
     forEachTerm(
         (left, ours) ->
@@ -151,6 +217,24 @@ public final class Polynomial {
    */
   @CheckReturnValue
   public Qubo toQubo() {
+    return Qubo.builder(size).add(this, 1).build();
+  }
+
+  /** Adds every term, multiplied, to a form in at least as many variables. */
+  void addTo(Qubo.Builder form, double number) {
+    requireQuadratic();
+    for (int t = 0; t < coefficient.length; t++) {
+      double amount = number * coefficient[t];
+      int first = start[t];
+      switch (start[t + 1] - first) {
+        case 0 -> form.addConstant(amount);
+        case 1 -> form.addLinear(factor[first], amount);
+        default -> form.addPair(factor[first], factor[first + 1], amount);
+      }
+    }
+  }
+
+  private void requireQuadratic() {
     if (degree() > 2) {
       int[] longest = Arrays.copyOfRange(factor, start[terms() - 1], start[terms()]);
       throw new IllegalArgumentException(
@@ -160,15 +244,16 @@ public final class Polynomial {
               + longest.length
               + " variables, a Qubo holds products of at most 2; reduce the degree first");
     }
-    Qubo.Builder qubo = Qubo.builder(size);
-    for (int t = 0; t < coefficient.length; t++) {
-      switch (width(t)) {
-        case 0 -> qubo.addConstant(coefficient[t]);
-        case 1 -> qubo.addLinear(factor[start[t]], coefficient[t]);
-        default -> qubo.addPair(factor[start[t]], factor[start[t] + 1], coefficient[t]);
-      }
-    }
-    return qubo.build();
+  }
+
+  /** The coefficient of a term by its place in the order. */
+  double coefficientAt(int term) {
+    return coefficient[term];
+  }
+
+  /** The first variable of a term by its place in the order. */
+  int variableAt(int term) {
+    return factor[start[term]];
   }
 
   private int width(int term) {
@@ -220,6 +305,7 @@ public final class Polynomial {
     private int[] factor = new int[32];
     private double[] coefficient = new double[16];
     private int terms;
+    private boolean ordered = true;
 
     private Builder(int size) {
       Check.size(size);
@@ -231,7 +317,7 @@ public final class Polynomial {
       if (!Double.isFinite(value)) {
         Check.finite("the coefficient of the product of " + Arrays.toString(variables), value);
       }
-      reserve(variables.length);
+      reserve(1, variables.length);
       int from = start[terms];
       int end = from;
       for (int variable : variables) {
@@ -239,6 +325,7 @@ public final class Polynomial {
       }
       coefficient[terms++] = value;
       start[terms] = TermOrder.canonical(factor, from, end);
+      ordered &= terms == 1 || TermOrder.compare(start, factor, terms - 2, terms - 1) <= 0;
       return this;
     }
 
@@ -256,13 +343,42 @@ public final class Polynomial {
                 + size
                 + " variables");
       }
-      polynomial.forEachTerm((value, variables) -> add(number * value, variables));
+      if (polynomial.terms() > 0) {
+        append(polynomial, number);
+      }
       return this;
     }
 
-    /** Makes room for one more term of so many variables. */
-    private void reserve(int width) {
-      int starts = Check.capacity(start.length, terms + 2L);
+    private void append(Polynomial polynomial, double number) {
+      int more = polynomial.terms();
+      int factors = polynomial.start[more];
+      reserve(more, factors);
+      int from = start[terms];
+      System.arraycopy(polynomial.factor, 0, factor, from, factors);
+      for (int t = 0; t < more; t++) {
+        double value = number * polynomial.coefficient[t];
+        int end = from + polynomial.start[t + 1];
+        if (!Double.isFinite(value)) {
+          int[] product = Arrays.copyOfRange(factor, start[terms], end);
+          Check.finite("the coefficient of the product of " + Arrays.toString(product), value);
+        }
+        coefficient[terms++] = value;
+        start[terms] = end;
+      }
+      int first = terms - more;
+      ordered &= first == 0 || TermOrder.compare(start, factor, first - 1, first) <= 0;
+    }
+
+    /** Makes room for all products of up to two of so many variables. */
+    void reserveProducts(int variables) {
+      long pairs = (long) variables * (variables - 1) / 2;
+      Check.entries(2 * pairs + variables);
+      reserve((int) pairs + variables + 1, (int) (2 * pairs) + variables);
+    }
+
+    /** Makes room for more terms of so many variables together. */
+    private void reserve(int more, int width) {
+      int starts = Check.capacity(start.length, terms + 1L + more);
       if (starts > start.length) {
         start = Arrays.copyOf(start, starts);
         coefficient = Arrays.copyOf(coefficient, starts);
@@ -280,33 +396,48 @@ public final class Polynomial {
      */
     @CheckReturnValue
     public Polynomial build() {
-      int[] order = TermOrder.of(start, factor, terms, size);
+      return ordered ? summed(null) : summed(TermOrder.of(start, factor, terms, size));
+    }
+
+    /** Adds up equal products, which are neighbours in the order; without one, as they lie. */
+    private Polynomial summed(int @Nullable [] order) {
       int[] ownStart = new int[terms + 1];
       int[] ownFactor = new int[start[terms]];
       double[] own = new double[terms];
       int kept = 0;
       for (int p = 0; p < terms; ) {
-        int first = order[p];
+        int first = at(order, p);
         double sum = 0;
-        while (p < terms && TermOrder.sameProduct(start, factor, first, order[p])) {
-          sum += coefficient[order[p++]];
+        while (p < terms && TermOrder.same(start, factor, first, at(order, p))) {
+          sum += coefficient[at(order, p++)];
         }
         if (!Double.isFinite(sum)) {
           int[] product = Arrays.copyOfRange(factor, start[first], start[first + 1]);
           Check.finite("the sum of the coefficients of " + Arrays.toString(product), sum);
         }
         if (sum != 0) {
-          int width = start[first + 1] - start[first];
-          System.arraycopy(factor, start[first], ownFactor, ownStart[kept], width);
+          int to = ownStart[kept];
+          for (int k = start[first]; k < start[first + 1]; k++) {
+            ownFactor[to++] = factor[k];
+          }
           own[kept++] = sum;
-          ownStart[kept] = ownStart[kept - 1] + width;
+          ownStart[kept] = to;
         }
       }
       return new Polynomial(
-          size,
-          Arrays.copyOf(ownStart, kept + 1),
-          Arrays.copyOf(ownFactor, ownStart[kept]),
-          Arrays.copyOf(own, kept));
+          size, cut(ownStart, kept + 1), cut(ownFactor, ownStart[kept]), cut(own, kept));
+    }
+
+    private static int at(int @Nullable [] order, int position) {
+      return order == null ? position : order[position];
+    }
+
+    private static int[] cut(int[] array, int length) {
+      return array.length == length ? array : Arrays.copyOf(array, length);
+    }
+
+    private static double[] cut(double[] array, int length) {
+      return array.length == length ? array : Arrays.copyOf(array, length);
     }
   }
 }

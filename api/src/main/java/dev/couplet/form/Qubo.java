@@ -184,6 +184,18 @@ public final class Qubo {
     }
 
     /**
+     * Adds a polynomial, every coefficient multiplied by {@code factor}; as adding its terms one by
+     * one, in its order.
+     *
+     * @throws IllegalArgumentException if it has more variables than this builder, its degree is
+     *     above 2, or a product is not finite
+     */
+    public Builder add(Polynomial polynomial, double factor) {
+      polynomial.addTo(this, factor);
+      return this;
+    }
+
+    /**
      * The form; the builder can go on and build again.
      *
      * @throws IllegalArgumentException if a sum overflows, or integer coefficients are too large

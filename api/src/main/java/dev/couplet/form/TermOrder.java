@@ -1,7 +1,6 @@
 package dev.couplet.form;
 
 import java.util.Arrays;
-import java.util.Comparator;
 
 /**
  * Orders the products of a polynomial by degree, then by their variables.
@@ -11,12 +10,18 @@ import java.util.Comparator;
  * arrival.
  */
 final class TermOrder {
+  /** So few terms are compared, whatever their degree. */
+  private static final int FEW = 64;
+
   private TermOrder() {}
 
   /** Sorts the variables of one product and drops repeats; returns the end of what is left. */
   static int canonical(int[] factor, int from, int to) {
     if (to - from < 2) {
       return to;
+    }
+    if (to - from == 2) {
+      return canonicalPair(factor, from);
     }
     Arrays.sort(factor, from, to);
     int end = from + 1;
@@ -28,6 +33,14 @@ final class TermOrder {
     return end;
   }
 
+  private static int canonicalPair(int[] factor, int from) {
+    int first = factor[from];
+    int second = factor[from + 1];
+    factor[from] = Math.min(first, second);
+    factor[from + 1] = Math.max(first, second);
+    return first == second ? from + 1 : from + 2;
+  }
+
   /** The variables of both products. */
   static int[] join(int[] left, int[] right) {
     int[] joined = Arrays.copyOf(left, left.length + right.length);
@@ -35,23 +48,40 @@ final class TermOrder {
     return joined;
   }
 
-  static boolean sameProduct(int[] start, int[] factor, int a, int b) {
-    return Arrays.equals(factor, start[a], start[a + 1], factor, start[b], start[b + 1]);
+  /** Whether two terms have the same product. */
+  static boolean same(int[] start, int[] factor, int a, int b) {
+    int first = start[a];
+    int other = start[b];
+    int width = start[a + 1] - first;
+    if (start[b + 1] - other != width) {
+      return false;
+    }
+    for (int k = 0; k < width; k++) {
+      if (factor[first + k] != factor[other + k]) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** Positions {@code 0 .. terms - 1} in canonical order. */
   static int[] of(int[] start, int[] factor, int terms, int size) {
     int[] order = new int[terms];
-    int low = orderOfShort(start, factor, terms, size, order);
-    Integer[] long_ = new Integer[terms - low];
-    for (int t = 0, p = 0; t < terms; t++) {
-      if (start[t + 1] - start[t] > 2) {
-        long_[p++] = t;
-      }
+    if (terms <= FEW) {
+      Arrays.setAll(order, p -> p);
+      MergeSort.sort(order, (a, b) -> compare(start, factor, a, b));
+      return order;
     }
-    Arrays.sort(long_, comparing(start, factor));
-    for (int p = 0; p < long_.length; p++) {
-      order[low + p] = long_[p];
+    int low = orderOfShort(start, factor, terms, size, order);
+    if (low < terms) {
+      int[] others = new int[terms - low];
+      for (int t = 0, p = 0; t < terms; t++) {
+        if (start[t + 1] - start[t] > 2) {
+          others[p++] = t;
+        }
+      }
+      MergeSort.sort(others, (a, b) -> compare(start, factor, a, b));
+      System.arraycopy(others, 0, order, low, others.length);
     }
     return order;
   }
@@ -82,13 +112,24 @@ final class TermOrder {
     return count;
   }
 
-  private static Comparator<Integer> comparing(int[] start, int[] factor) {
-    return (a, b) -> compare(factor, start[a], start[a + 1], factor, start[b], start[b + 1]);
+  /** Compares two terms. */
+  static int compare(int[] start, int[] factor, int a, int b) {
+    return compare(factor, start[a], start[a + 1], factor, start[b], start[b + 1]);
   }
 
   /** Compares two products: by degree, then by their variables. */
   static int compare(int[] left, int from, int to, int[] right, int rightFrom, int rightTo) {
-    int byDegree = Integer.compare(to - from, rightTo - rightFrom);
-    return byDegree != 0 ? byDegree : Arrays.compare(left, from, to, right, rightFrom, rightTo);
+    int width = to - from;
+    if (width != rightTo - rightFrom) {
+      return width < rightTo - rightFrom ? -1 : 1;
+    }
+    for (int k = 0; k < width; k++) {
+      int one = left[from + k];
+      int other = right[rightFrom + k];
+      if (one != other) {
+        return one < other ? -1 : 1;
+      }
+    }
+    return 0;
   }
 }

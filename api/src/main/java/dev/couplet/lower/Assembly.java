@@ -156,18 +156,7 @@ final class Assembly {
     refuseTooLarge();
     Qubo.Builder form = Qubo.builder(bits.size());
     for (Source source : sources) {
-      double factor = source.factor();
-      source
-          .terms()
-          .forEachTerm(
-              (coefficient, variables) -> {
-                double amount = factor * coefficient;
-                switch (variables.length) {
-                  case 0 -> form.addConstant(amount);
-                  case 1 -> form.addLinear(variables[0], amount);
-                  default -> form.addPair(variables[0], variables[1], amount);
-                }
-              });
+      form = form.add(source.terms(), source.factor());
     }
     return form.build();
   }

@@ -29,29 +29,20 @@ final class Terms {
 
   /** The lowest value over all bit patterns that the coefficients' signs allow. */
   static double lowest(Polynomial polynomial) {
-    double[] sum = {0};
-    polynomial.forEachTerm(
-        (coefficient, variables) ->
-            sum[0] += variables.length == 0 ? coefficient : Math.min(0, coefficient));
-    return sum[0];
+    return polynomial.lowest();
   }
 
   /** The highest value over all bit patterns that the coefficients' signs allow. */
   static double highest(Polynomial polynomial) {
-    return -lowest(polynomial.times(-1));
+    return polynomial.highest();
   }
 
   static double magnitude(Polynomial polynomial) {
-    double[] sum = {0};
-    polynomial.forEachTerm((coefficient, variables) -> sum[0] += Math.abs(coefficient));
-    return sum[0];
+    return polynomial.magnitude();
   }
 
   static boolean whole(Polynomial polynomial) {
-    boolean[] whole = {true};
-    polynomial.forEachTerm(
-        (coefficient, variables) -> whole[0] &= coefficient == Math.rint(coefficient));
-    return whole[0];
+    return polynomial.whole();
   }
 
   /** The variables that occur, ascending. */

@@ -1,6 +1,7 @@
 package dev.couplet.form;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -8,9 +9,12 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
+import java.util.Set;
+import java.util.SplittableRandom;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.Combinators;
+import net.jqwik.api.Example;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.Provide;
@@ -159,5 +163,96 @@ class PolynomialProperties {
       State longer = State.parse(state.toText() + "101");
       assertEquals(polynomial.value(state), wider.value(longer));
     }
+  }
+
+  /** All pairs of terms, one by one: the square of a linear polynomial takes a shorter way. */
+  @Property
+  void squaresAreTheProductsOfAllPairs(@ForAll long seed) {
+    SplittableRandom random = new SplittableRandom(seed);
+    Polynomial.Builder linear = Polynomial.builder(SIZE);
+    for (int t = random.nextInt(7); t > 0; t--) {
+      double value = random.nextBoolean() ? random.nextInt(-3, 4) : random.nextDouble(-1, 1);
+      if (random.nextInt(4) == 0) {
+        linear.add(value);
+      } else {
+        linear.add(value, random.nextInt(SIZE));
+      }
+    }
+    Polynomial built = linear.build();
+    Polynomial.Builder slow = Polynomial.builder(SIZE);
+    built.forEachTerm(
+        (a, left) -> built.forEachTerm((b, right) -> slow.add(a * b, TermOrder.join(left, right))));
+    assertEquals(slow.build(), built.times(built));
+  }
+
+  @Property
+  void magnitudeAndSignsBoundEveryValue(@ForAll("terms") List<Term> terms) {
+    Polynomial polynomial = polynomial(terms);
+    double[] sums = new double[3];
+    boolean[] whole = {true};
+    polynomial.forEachTerm(
+        (coefficient, variables) -> {
+          boolean constant = variables.length == 0;
+          sums[0] += Math.abs(coefficient);
+          sums[1] += constant || coefficient < 0 ? coefficient : 0;
+          sums[2] += constant || coefficient > 0 ? coefficient : 0;
+        });
+    assertEquals(sums[0], polynomial.magnitude());
+    assertEquals(sums[1], polynomial.lowest());
+    assertEquals(sums[2], polynomial.highest());
+    assertTrue(polynomial.whole());
+    Polynomial finer = Polynomial.builder(SIZE).add(polynomial, 1).add(0.5, 0, 1).build();
+    assertFalse(finer.whole());
+  }
+
+  /** Scaling by a number, adding scaled and adding term by term are the same. */
+  @Property
+  void scaledTermsAreTheSameInEveryWay(
+      @ForAll("terms") List<Term> terms, @ForAll("terms") List<Term> others, @ForAll long seed) {
+    double number = new SplittableRandom(seed).nextInt(-2, 3) / 2.0;
+    Polynomial first = polynomial(terms);
+    Polynomial second = polynomial(others);
+    Polynomial.Builder slow = Polynomial.builder(SIZE);
+    first.forEachTerm((coefficient, variables) -> slow.add(coefficient, variables));
+    second.forEachTerm((coefficient, variables) -> slow.add(number * coefficient, variables));
+    assertEquals(slow.build(), Polynomial.builder(SIZE).add(first, 1).add(second, number).build());
+    assertEquals(slow.build(), first.plus(second.times(number)));
+  }
+
+  /** A form of polynomials is the same as one of their terms. */
+  @Property
+  void formsAddPolynomials(@ForAll("terms") List<Term> terms, @ForAll("terms") List<Term> others) {
+    List<Polynomial> parts = new ArrayList<>();
+    for (List<Term> list : List.of(terms, others)) {
+      List<Term> quadratic =
+          list.stream().filter(term -> Set.copyOf(term.variables()).size() <= 2).toList();
+      parts.add(polynomial(quadratic));
+    }
+    Qubo.Builder slow = Qubo.builder(SIZE);
+    for (int k = 0; k < 2; k++) {
+      double factor = k + 0.5;
+      parts
+          .get(k)
+          .forEachTerm(
+              (coefficient, variables) -> {
+                switch (variables.length) {
+                  case 0 -> slow.addConstant(factor * coefficient);
+                  case 1 -> slow.addLinear(variables[0], factor * coefficient);
+                  default -> slow.addPair(variables[0], variables[1], factor * coefficient);
+                }
+              });
+    }
+    Qubo fast = Qubo.builder(SIZE).add(parts.get(0), 0.5).add(parts.get(1), 1.5).build();
+    assertEquals(slow.build(), fast);
+  }
+
+  @Example
+  void formsRefuseWhatDoesNotFit() {
+    Polynomial cubic = Polynomial.builder(3).add(1, 0, 1, 2).build();
+    assertThrows(IllegalArgumentException.class, () -> Qubo.builder(3).add(cubic, 1));
+    Polynomial wide = Polynomial.builder(3).add(1, 2).build();
+    assertThrows(IllegalArgumentException.class, () -> Qubo.builder(2).add(wide, 1));
+    assertThrows(IllegalArgumentException.class, () -> Qubo.builder(3).add(wide, Double.NaN));
+    assertThrows(IllegalArgumentException.class, () -> wide.times(Double.POSITIVE_INFINITY));
   }
 }
