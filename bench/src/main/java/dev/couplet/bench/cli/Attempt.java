@@ -73,10 +73,18 @@ record Attempt(
     return subject.best().apply(draws);
   }
 
+  /**
+   * Whether no plan keeps the rules: the weights of the standard lowering are proved to suffice, so
+   * that the lowest state of the form stands for a feasible plan if there is one.
+   */
+  private boolean infeasible() {
+    return draws.proved() && value().isEmpty();
+  }
+
   /** A proved bound on every value, if there is one that says anything. */
   OptionalDouble bound() {
     OptionalDouble bound = draws.bound();
-    return bound.isPresent() && Double.isFinite(bound.getAsDouble())
+    return !infeasible() && bound.isPresent() && Double.isFinite(bound.getAsDouble())
         ? OptionalDouble.of(subject.turn(bound.getAsDouble()))
         : OptionalDouble.empty();
   }
@@ -103,6 +111,13 @@ record Attempt(
         Table.fixed(hitSeconds, 3),
         Table.value(bound()),
         Table.value(gap),
-        gap.equals(OptionalDouble.of(0)) ? "optimal" : "none");
+        proof(gap));
+  }
+
+  private String proof(OptionalDouble gap) {
+    if (infeasible()) {
+      return "infeasible";
+    }
+    return gap.equals(OptionalDouble.of(0)) ? "optimal" : "none";
   }
 }

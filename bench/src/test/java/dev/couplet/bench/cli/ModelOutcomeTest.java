@@ -82,8 +82,22 @@ class ModelOutcomeTest {
     assertEquals(List.of("-", "-", "-", "-", "infeasible"), answered.cells().subList(6, 11));
     Attempt attempt = attempt(contradiction(), "enumeration", Effort.draws(1));
     assertFalse(attempt.reached());
-    assertEquals("-", attempt.cells().get(6));
-    assertEquals("none", attempt.cells().get(10));
+    assertEquals(List.of("-", "-", "-", "-", "infeasible"), attempt.cells().subList(6, 11));
+  }
+
+  /** Nothing is proved by a sampler that just did not find a plan. */
+  @Test
+  void aSamplerWithoutAPlanProvesNothing() {
+    Sampler one = (form, run) -> Draws.of(form, List.of(State.parse("11100")), End.DONE, 1);
+    Attempt attempt =
+        Attempt.make(
+            Subject.of(knapsack()),
+            new Methods.Method("one", one),
+            Effort.draws(1),
+            progress -> {},
+            System::nanoTime);
+    assertFalse(attempt.reached());
+    assertEquals(List.of("-", "-", "-", "-", "none"), attempt.cells().subList(6, 11));
   }
 
   /** A sampler whose best state breaks the rule, and whose second does not. */
