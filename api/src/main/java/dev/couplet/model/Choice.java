@@ -1,9 +1,8 @@
 package dev.couplet.model;
 
 import dev.couplet.form.CheckReturnValue;
-import java.util.HashMap;
+import java.util.Collection;
 import java.util.List;
-import java.util.Map;
 
 /**
  * A decision for exactly one of several options.
@@ -16,20 +15,12 @@ import java.util.Map;
 public final class Choice<T> implements Decision {
   private final String name;
   private final Slot slot;
-  private final List<T> options;
-  private final Map<T, Integer> positions;
+  private final Positions<T> options;
 
-  Choice(Model owner, String name, int firstLiteral, List<T> options) {
+  Choice(Model owner, String name, int firstLiteral, Collection<T> options) {
     this.name = name;
+    this.options = new Positions<>("choice '" + name + "'", "option", options);
     this.slot = new Slot(owner, firstLiteral, options.size(), 1);
-    this.options = options;
-    this.positions = new HashMap<>();
-    for (T option : options) {
-      if (positions.putIfAbsent(option, positions.size()) != null) {
-        throw new IllegalArgumentException(
-            "choice '" + name + "' lists option " + option + " twice");
-      }
-    }
   }
 
   @Override
@@ -49,7 +40,7 @@ public final class Choice<T> implements Decision {
 
   /** The options, in the order given. */
   public List<T> options() {
-    return options;
+    return options.items();
   }
 
   /**
@@ -62,12 +53,7 @@ public final class Choice<T> implements Decision {
   }
 
   int positionOf(T option) {
-    Integer position = positions.get(option);
-    if (position == null) {
-      throw new IllegalArgumentException(
-          "'" + option + "' is not an option of choice '" + name + "': " + Text.list(options));
-    }
-    return position;
+    return options.of(option, "an option");
   }
 
   Slot slot() {

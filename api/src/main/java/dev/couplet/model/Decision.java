@@ -4,7 +4,7 @@ package dev.couplet.model;
  * Something a plan has to settle. Made by a {@link Model}, which owns it; decisions are compared by
  * identity.
  */
-public sealed interface Decision permits Bit, Choice {
+public sealed interface Decision permits Bit, Spin, Count, Choice, Order, Subset {
   /** The name, unique in the model. */
   String name();
 

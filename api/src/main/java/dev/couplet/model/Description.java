@@ -3,6 +3,8 @@ package dev.couplet.model;
 import dev.couplet.form.Polynomial;
 import dev.couplet.model.Statement.Objective;
 import dev.couplet.model.Statement.Sense;
+import java.util.List;
+import java.util.stream.Collectors;
 
 /** Writes a statement in words that a person can proof-read; as long as the statement is. */
 final class Description {
@@ -23,8 +25,7 @@ final class Description {
     text.append("model ").append(statement.name()).append('\n');
     for (Decision decision : statement.decisions()) {
       text.append("  decide ").append(decision.name()).append(": ");
-      text.append(decision instanceof Choice<?> choice ? options(choice) : "yes or no")
-          .append('\n');
+      text.append(values(decision)).append('\n');
     }
     for (Rule rule : statement.rules()) {
       text.append(rule.required() ? "  require " : "  prefer ").append(rule.name()).append(": ");
@@ -39,12 +40,23 @@ final class Description {
     }
   }
 
-  private static String options(Choice<?> choice) {
-    StringBuilder listed = new StringBuilder("one of ");
-    for (int k = 0; k < choice.values(); k++) {
-      listed.append(k == 0 ? "" : ", ").append(choice.options().get(k));
+  private static String values(Decision decision) {
+    if (decision instanceof Choice<?> choice) {
+      return "one of " + listed(choice.options());
+    } else if (decision instanceof Spin) {
+      return "up or down, 1 or -1";
+    } else if (decision instanceof Count count) {
+      return "a whole number from " + count.lowest() + " to " + count.highest();
+    } else if (decision instanceof Order<?> order) {
+      return "the order, at " + order.places() + " places, of " + listed(order.items());
+    } else if (decision instanceof Subset<?> subset) {
+      return "any of " + listed(subset.items());
     }
-    return listed.toString();
+    return "yes or no";
+  }
+
+  private static String listed(List<?> items) {
+    return items.stream().map(String::valueOf).collect(Collectors.joining(", "));
   }
 
   private String part(Rule.Part part) {

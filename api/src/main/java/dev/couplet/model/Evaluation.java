@@ -22,6 +22,10 @@ final class Evaluation {
       double factor = next.factor();
       if (next.expr() instanceof Literal literal) {
         sum += holds.test(literal) ? factor : 0;
+      } else if (next.expr() instanceof Spin spin) {
+        pending.push(new Pending(spin.inLiterals(), factor));
+      } else if (next.expr() instanceof Count count) {
+        pending.push(new Pending(count.inLiterals(), factor));
       } else if (next.expr() instanceof Node.Constant constant) {
         sum += factor * constant.value;
       } else if (next.expr() instanceof Node.Scaled scaled) {

@@ -69,6 +69,10 @@ final class Expansion<N> {
       N factor = next.factor();
       if (next.expr() instanceof Literal literal) {
         addLiteral(literal, factor);
+      } else if (next.expr() instanceof Spin spin) {
+        pending.push(new Pending<>(spin.inLiterals(), factor, 0));
+      } else if (next.expr() instanceof Count count) {
+        pending.push(new Pending<>(count.inLiterals(), factor, 0));
       } else if (next.expr() instanceof Node.Constant constant) {
         sink.add(arithmetic.times(factor, arithmetic.of(constant.value)), NONE);
       } else if (next.expr() instanceof Node.Scaled scaled) {

@@ -9,14 +9,15 @@ import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 
 /**
- * A number that depends on a plan: sums and products, of any degree, of literals and constants.
+ * A number that depends on a plan: sums and products, of any degree, of literals, counts, spins and
+ * constants.
  *
  * <p>Immutable. Building one takes constant time a call, {@code sum} and {@code product} time
  * linear in their arguments; nothing is multiplied out before the expression is used in a rule or
  * an objective. Mixing decisions of two models is refused at once.
  */
 @CheckReturnValue
-public abstract sealed class Expr permits Literal, Node {
+public abstract sealed class Expr permits Literal, Node, Spin, Count {
   Expr() {}
 
   /** The model whose decisions the expression speaks of; null if it is a constant. */

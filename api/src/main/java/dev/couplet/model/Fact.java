@@ -34,8 +34,18 @@ final class Fact extends Literal {
 
   /** The literal of a decision at a position in words. */
   static String describe(Decision decision, int position) {
-    return decision instanceof Choice<?> choice
-        ? choice.name() + " = " + choice.options().get(position)
-        : decision.name();
+    if (decision instanceof Choice<?> choice) {
+      return choice.name() + " = " + choice.options().get(position);
+    } else if (decision instanceof Spin) {
+      return decision.name() + " down";
+    } else if (decision instanceof Count count) {
+      return count.digits()[position] + " of '" + count.name() + "'";
+    } else if (decision instanceof Order<?> order) {
+      Object item = order.items().get(position % order.items().size());
+      return order.name() + " " + position / order.items().size() + " = " + item;
+    } else if (decision instanceof Subset<?> subset) {
+      return subset.name() + " has " + subset.items().get(position);
+    }
+    return decision.name();
   }
 }

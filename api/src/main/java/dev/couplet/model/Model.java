@@ -12,6 +12,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -21,6 +22,8 @@ import org.jspecify.annotations.Nullable;
  * takes a {@link #snapshot()} and never changes the model.
  */
 public final class Model {
+  private static final double LARGEST_COUNT = 0x1p51;
+
   private final String name;
   private final List<Decision> decisions = new ArrayList<>();
   private final List<Decision> decisionOfLiteral = new ArrayList<>();
@@ -64,8 +67,7 @@ public final class Model {
 
   /** Adds a yes/no decision for each key, named by the family's name and the key. */
   public <K> Family<K, Bit> bits(String familyName, Collection<K> keys) {
-    return Family.of(
-        familyName, keys, name -> requireFree(decisionNames, "decision", name), this::bit);
+    return family(familyName, keys, this::bit);
   }
 
   /**
@@ -78,8 +80,7 @@ public final class Model {
       throw new IllegalArgumentException(
           "choice '" + choiceName + "' has no options; give it at least one");
     }
-    Choice<T> choice =
-        new Choice<>(this, choiceName, decisionOfLiteral.size(), List.copyOf(options));
+    Choice<T> choice = new Choice<>(this, choiceName, decisionOfLiteral.size(), options);
     claim(decisionNames, "decision", choiceName);
     return add(choice);
   }
@@ -89,11 +90,114 @@ public final class Model {
    */
   public <K, T> Family<K, Choice<T>> choices(
       String familyName, Collection<K> keys, Collection<T> options) {
-    return Family.of(
-        familyName,
-        keys,
-        name -> requireFree(decisionNames, "decision", name),
-        name -> choice(name, options));
+    return family(familyName, keys, choiceName -> choice(choiceName, options));
+  }
+
+  /** Adds a decision between up and down. */
+  public Spin spin(String spinName) {
+    claim(decisionNames, "decision", spinName);
+    return add(new Spin(this, spinName, decisionOfLiteral.size()));
+  }
+
+  /** Adds a spin for each key, named by the family's name and the key. */
+  public <K> Family<K, Spin> spins(String familyName, Collection<K> keys) {
+    return family(familyName, keys, this::spin);
+  }
+
+  /**
+   * Adds a decision for a whole number from lowest to highest, both included.
+   *
+   * @throws IllegalArgumentException if lowest is above highest, or one of them beyond 2^51
+   */
+  public Count count(String countName, long lowest, long highest) {
+    if (lowest > highest) {
+      throw new IllegalArgumentException(
+          "count '"
+              + countName
+              + "' would range from "
+              + lowest
+              + " to "
+              + highest
+              + "; swap them");
+    }
+    for (long end : new long[] {lowest, highest}) {
+      if (Math.abs((double) end) >= LARGEST_COUNT) {
+        throw new IllegalArgumentException(
+            "count '" + countName + "' would reach " + end + ", beyond 2^51; choose a larger unit");
+      }
+    }
+    claim(decisionNames, "decision", countName);
+    return add(new Count(this, countName, decisionOfLiteral.size(), lowest, highest));
+  }
+
+  /** Adds a count for each key, named by the family's name and the key. */
+  public <K> Family<K, Count> counts(
+      String familyName, Collection<K> keys, long lowest, long highest) {
+    return family(familyName, keys, countName -> count(countName, lowest, highest));
+  }
+
+  /** Adds a decision for the order of all items. */
+  public <T> Order<T> order(String orderName, Collection<T> items) {
+    return order(orderName, items, items.size());
+  }
+
+  /**
+   * Adds a decision for which of the items come at so many places, in what order.
+   *
+   * @throws IllegalArgumentException if there is no place, fewer items than places, or an item
+   *     stands twice
+   */
+  public <T> Order<T> order(String orderName, Collection<T> items, int places) {
+    if (places < 1 || places > items.size()) {
+      throw new IllegalArgumentException(
+          "order '"
+              + orderName
+              + "' has "
+              + places
+              + " places for "
+              + items.size()
+              + " items; it takes 1 to as many places as items");
+    }
+    Order<T> order = new Order<>(this, orderName, decisionOfLiteral.size(), items, places);
+    requireFree(statementNames, "rule or objective", order.onceRule());
+    claim(decisionNames, "decision", orderName);
+    add(order);
+    if (places > 1) {
+      require(order.onceRule(), order.once());
+    }
+    return order;
+  }
+
+  /** Adds an order of all items for each key, named by the family's name and the key. */
+  public <K, T> Family<K, Order<T>> orders(
+      String familyName, Collection<K> keys, Collection<T> items) {
+    return family(familyName, keys, orderName -> order(orderName, items));
+  }
+
+  /**
+   * Adds a decision which of the items to take.
+   *
+   * @throws IllegalArgumentException if there is no item, or one stands twice
+   */
+  public <T> Subset<T> subset(String subsetName, Collection<T> items) {
+    if (items.isEmpty()) {
+      throw new IllegalArgumentException(
+          "subset '" + subsetName + "' has no items; give it at least one");
+    }
+    Subset<T> subset = new Subset<>(this, subsetName, decisionOfLiteral.size(), items);
+    claim(decisionNames, "decision", subsetName);
+    return add(subset);
+  }
+
+  /** Adds a subset of the items for each key, named by the family's name and the key. */
+  public <K, T> Family<K, Subset<T>> subsets(
+      String familyName, Collection<K> keys, Collection<T> items) {
+    return family(familyName, keys, subsetName -> subset(subsetName, items));
+  }
+
+  private <K, D extends Decision> Family<K, D> family(
+      String familyName, Collection<K> keys, Function<String, D> maker) {
+    return Family.of(familyName, keys, name -> requireFree(decisionNames, "decision", name), maker);
   }
 
   /**

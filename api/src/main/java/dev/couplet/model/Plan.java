@@ -2,6 +2,7 @@ package dev.couplet.model;
 
 import dev.couplet.form.State;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
@@ -40,7 +41,8 @@ public final class Plan implements Comparable<Plan> {
     this.open = Set.copyOf(undecided);
   }
 
-  static Plan of(Statement statement, State literals, Set<Decision> broken) {
+  static Plan of(Statement statement, State given, Set<Decision> broken) {
+    State literals = new Values(given).normal(statement);
     List<Unmet> unmet = new ArrayList<>();
     double cost = 0;
     for (Rule rule : statement.rules()) {
@@ -91,27 +93,55 @@ public final class Plan implements Comparable<Plan> {
    * @throws IllegalStateException if the plan leaves it undecided
    */
   public <T> T value(Choice<T> choice) {
-    return find(choice)
-        .orElseThrow(
-            () ->
-                new IllegalStateException(
-                    "choice '"
-                        + choice.name()
-                        + "' is undecided in this plan; look at undecided() first, or use find"));
+    return decided(choice).of(choice);
   }
 
   /** The option that a choice takes, if it is decided. */
   public <T> Optional<T> find(Choice<T> choice) {
-    statement.require(choice);
-    if (open.contains(choice)) {
-      return Optional.empty();
+    return isDecided(choice) ? Optional.of(value(choice)) : Optional.empty();
+  }
+
+  /** The number that a count is; refusals as for a choice. */
+  public long value(Count count) {
+    return decided(count).of(count);
+  }
+
+  /** +1 where a spin is up, -1 where it is down. */
+  public int value(Spin spin) {
+    return decided(spin).of(spin);
+  }
+
+  /**
+   * The items at the places of an order, from the first on; refusals as for a choice. Where the
+   * plan breaks the rule that no item comes twice, one does.
+   */
+  public <T> List<T> value(Order<T> order) {
+    return decided(order).of(order);
+  }
+
+  /** The items that a subset takes, in the order of its items. */
+  public <T> Set<T> value(Subset<T> subset) {
+    return decided(subset).of(subset);
+  }
+
+  /**
+   * Whether a decision has one value under the plan.
+   *
+   * @throws IllegalArgumentException if it is of another model
+   */
+  public boolean isDecided(Decision decision) {
+    statement.require(decision);
+    return !open.contains(decision);
+  }
+
+  private Values decided(Decision decision) {
+    if (!isDecided(decision)) {
+      throw new IllegalStateException(
+          "decision '"
+              + decision.name()
+              + "' is undecided in this plan; look at undecided() first, or use isDecided");
     }
-    int first = choice.slot().first();
-    int position = 0;
-    while (!literals.get(first + position)) {
-      position++;
-    }
-    return Optional.of(choice.options().get(position));
+    return new Values(literals);
   }
 
   /** The value of a bit. */
@@ -185,9 +215,7 @@ public final class Plan implements Comparable<Plan> {
   }
 
   private Object shown(Decision decision) {
-    return decision instanceof Choice<?> choice
-        ? find(choice).<Object>map(option -> option).orElse("undecided")
-        : value((Bit) decision);
+    return isDecided(decision) ? new Values(literals).shown(decision) : "undecided";
   }
 
   /**
@@ -211,13 +239,9 @@ public final class Plan implements Comparable<Plan> {
      * @throws IllegalArgumentException if it is of another model, or has no such option
      */
     public <T> Draft set(Choice<T> choice, T option) {
-      statement.require(choice);
-      int position = choice.positionOf(option);
-      for (int k = 0; k < choice.values(); k++) {
-        literals[choice.slot().first() + k] = k == position;
-      }
-      decided.add(choice);
-      return this;
+      boolean[] pattern = new boolean[choice.options().size()];
+      pattern[choice.positionOf(option)] = true;
+      return write(choice, pattern);
     }
 
     /**
@@ -226,9 +250,69 @@ public final class Plan implements Comparable<Plan> {
      * @throws IllegalArgumentException if it is of another model
      */
     public Draft set(Bit bit, boolean value) {
-      statement.require(bit);
-      literals[bit.index()] = value;
-      decided.add(bit);
+      return write(bit, value);
+    }
+
+    /** Sets a spin to +1 or -1; refusals as for a choice. */
+    public Draft set(Spin spin, int value) {
+      if (value != 1 && value != -1) {
+        throw new IllegalArgumentException(
+            "spin '" + spin.name() + "' cannot be " + value + ", it is 1 or -1");
+      }
+      return write(spin, value < 0);
+    }
+
+    /**
+     * Sets a count.
+     *
+     * @throws IllegalArgumentException if it is of another model, or the number out of its range
+     */
+    public Draft set(Count count, long value) {
+      long above = count.requireWithin(value) - count.lowest();
+      return write(count, Digits.pattern(above, count.digits()));
+    }
+
+    /**
+     * Sets an order: an item for each place, from the first on.
+     *
+     * @throws IllegalArgumentException if it is of another model, has another number of places, or
+     *     one of the items is not among its own
+     */
+    public <T> Draft set(Order<T> order, List<? extends T> value) {
+      if (value.size() != order.places()) {
+        throw new IllegalArgumentException(
+            "order '"
+                + order.name()
+                + "' has "
+                + order.places()
+                + " places, "
+                + value.size()
+                + " items are given");
+      }
+      boolean[] pattern = new boolean[order.places() * order.items().size()];
+      for (int place = 0; place < value.size(); place++) {
+        pattern[place * order.items().size() + order.positionOf(value.get(place))] = true;
+      }
+      return write(order, pattern);
+    }
+
+    /**
+     * Sets a subset: the items that are taken.
+     *
+     * @throws IllegalArgumentException if it is of another model, or has no such item
+     */
+    public <T> Draft set(Subset<T> subset, Collection<? extends T> taken) {
+      boolean[] pattern = new boolean[subset.items().size()];
+      for (T item : taken) {
+        pattern[subset.positionOf(item)] = true;
+      }
+      return write(subset, pattern);
+    }
+
+    private Draft write(Decision decision, boolean... pattern) {
+      int first = statement.firstLiteral(decision);
+      System.arraycopy(pattern, 0, literals, first, pattern.length);
+      decided.add(decision);
       return this;
     }
 

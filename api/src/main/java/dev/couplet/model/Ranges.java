@@ -51,7 +51,8 @@ final class Ranges {
     terms++;
     boolean ofBits = true;
     for (int literal : literals) {
-      ofBits &= decisionOf.apply(literal) instanceof Bit;
+      Decision decision = decisionOf.apply(literal);
+      ofBits &= decision instanceof Bit || Slot.of(decision).groups() == 0;
     }
     if (literals.length == 0) {
       lowest += coefficient;

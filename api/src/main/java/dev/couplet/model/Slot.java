@@ -17,7 +17,16 @@ record Slot(Model owner, int first, int literals, int groups) {
     if (decision instanceof Bit bit) {
       return new Slot(bit.owner(), bit.index(), 1, 0);
     }
-    return ((Choice<?>) decision).slot();
+    if (decision instanceof Choice<?> choice) {
+      return choice.slot();
+    } else if (decision instanceof Spin spin) {
+      return spin.slot();
+    } else if (decision instanceof Count count) {
+      return count.slot();
+    } else if (decision instanceof Order<?> order) {
+      return order.slot();
+    }
+    return ((Subset<?>) decision).slot();
   }
 
   /** The number of literals in each group; 0 without groups. */

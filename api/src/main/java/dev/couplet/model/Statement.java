@@ -235,7 +235,7 @@ public final class Statement {
               + name()
               + "'");
     }
-    if (slot.first() >= literals()) {
+    if (slot.first() + slot.literals() > literals()) {
       throw new IllegalArgumentException(
           "decision '"
               + decision.name()

@@ -213,7 +213,7 @@ class ModelTest {
     Plan three = statement.plan(State.parse("111"));
     assertEquals(2, three.unmet().get(0).amount());
     IllegalStateException open = assertThrows(IllegalStateException.class, () -> three.value(van));
-    assertTrue(open.getMessage().contains("choice 'van' is undecided"), open.getMessage());
+    assertTrue(open.getMessage().contains("decision 'van' is undecided"), open.getMessage());
     Plan second = statement.plan(State.parse("010"));
     assertEquals("large", second.value(van));
     assertTrue(second.undecided().isEmpty());
