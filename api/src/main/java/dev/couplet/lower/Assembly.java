@@ -49,6 +49,9 @@ final class Assembly {
     for (Rule rule : statement.rules()) {
       addRule(rule);
     }
+    List<Source> quadratic = DegreeReduction.of(List.copyOf(sources), settings.aim(), bits);
+    sources.clear();
+    sources.addAll(quadratic);
     return new Lowered(
         statement, qubo(), coding, bits, ledger(), List.copyOf(weights), structure());
   }
@@ -84,7 +87,7 @@ final class Assembly {
     if (rule.alwaysKept()) {
       weights.add(new Weight(rule.name(), "nothing", 0, "every plan keeps it"));
     } else if (rule.required()) {
-      List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits);
+      List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits, settings.aim());
       addPenalty(rule.name(), Kind.PENALTY, Penalty.sum(penalties, bits.size()));
     } else {
       addPreferred(rule);
@@ -102,7 +105,7 @@ final class Assembly {
     double unitCost = 0;
     for (Rule.Part part : rule.parts()) {
       if (!part.alwaysKept()) {
-        PreferredRule preferred = PreferredRule.of(part, rule.squared(), rule.name(), coding, bits);
+        PreferredRule preferred = PreferredRule.of(part, rule, coding, bits, settings.aim());
         parts.add(preferred);
         addSource(rule.name(), Kind.COST, preferred.cost(), part.cost(1));
         unitCost = Math.max(unitCost, part.cost(1));
@@ -123,7 +126,7 @@ final class Assembly {
   }
 
   private void addSource(String name, Kind kind, Polynomial terms, double factor) {
-    sources.add(new Source(name, kind, DegreeReduction.of(terms, name, bits), factor));
+    sources.add(new Source(name, kind, terms, factor));
   }
 
   /** Lowest over all bit patterns, highest under any plan; preferred rules included. */
@@ -199,7 +202,7 @@ final class Assembly {
 
   /** Penalties are whole before they are weighed; rounded ones would not vanish where they must. */
   private static void refuseInexact(Source source, double magnitude) {
-    if (source.kind() != Kind.OBJECTIVE && magnitude >= WHOLE_LIMIT) {
+    if (isWhole(source.kind()) && magnitude >= WHOLE_LIMIT) {
       throw new IllegalArgumentException(
           "the whole coefficients of the penalty of '"
               + source.name()
@@ -207,6 +210,10 @@ final class Assembly {
               + Weights.shown(magnitude)
               + ", they are exact below 2^51; choose larger units there");
     }
+  }
+
+  private static boolean isWhole(Kind kind) {
+    return kind != Kind.OBJECTIVE && kind != Kind.PRODUCT;
   }
 
   private Structure structure() {

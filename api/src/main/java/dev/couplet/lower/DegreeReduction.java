@@ -1,7 +1,5 @@
 package dev.couplet.lower;
 
-import dev.couplet.form.Polynomial;
-import dev.couplet.lower.Ledger.Kind;
 import dev.couplet.lower.Ledger.Source;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -36,12 +34,6 @@ final class DegreeReduction {
   static List<Source> of(List<Source> sources, Aim aim, BitTable bits) {
     boolean quadratic = sources.stream().allMatch(source -> source.terms().degree() <= 2);
     return quadratic ? sources : new DegreeReduction(sources, aim, bits).reduced();
-  }
-
-  /** A polynomial by itself brought to degree 2. */
-  static Polynomial of(Polynomial polynomial, String source, BitTable bits) {
-    Source only = new Source(source, Kind.OBJECTIVE, polynomial, 1);
-    return of(List.of(only), Aim.AUXILIARIES, bits).get(0).terms();
   }
 
   private static List<Product> products(List<Source> sources) {
@@ -90,6 +82,6 @@ final class DegreeReduction {
   }
 
   private ReductionDraft draft(SharedPairs shared, ProductForms forms) {
-    return new ReductionDraft(sources, products, shared, forms, bits.size());
+    return new ReductionDraft(sources, products, shared, forms, bits.meanings());
   }
 }

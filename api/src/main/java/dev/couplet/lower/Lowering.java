@@ -27,6 +27,8 @@ import java.util.Set;
  *   <tr><td>rule on one or two literals</td><td>0</td><td>1</td><td>twice the largest amount</td></tr>
  *   <tr><td>at most one of n (also as any two exceed the limit)</td><td>0</td><td>n(n-1)/2</td>
  *     <td>n - 1</td></tr>
+ *   <tr><td>at least one of n &gt; 2 (also as each reaches the limit)</td><td>ceil(log2 n) - 1</td>
+ *     <td>at most (n + bits)(n + bits - 1)/2</td><td>at most n(3n - 2)/8</td></tr>
  *   <tr><td>linear equality, coefficients up to c</td><td>0</td><td>n(n-1)/2</td><td>2c^2, or
  *     c |c - 2 value|</td></tr>
  *   <tr><td>linear inequality</td><td>floor(log2 R) + 1</td><td>(n + bits)(n + bits - 1)/2</td>
@@ -46,16 +48,18 @@ import java.util.Set;
 @CheckReturnValue
 public final class Lowering {
   private static final Lowering STANDARD =
-      new Lowering(Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot());
+      new Lowering(Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot(), Aim.AUXILIARIES);
 
   private final Weights weights;
   private final Map<String, Double> byName;
   private final ChoiceEncoding choices;
+  private final Aim aim;
 
-  private Lowering(Weights weights, Map<String, Double> byName, ChoiceEncoding choices) {
+  private Lowering(Weights weights, Map<String, Double> byName, ChoiceEncoding choices, Aim aim) {
     this.weights = weights;
     this.byName = byName;
     this.choices = choices;
+    this.aim = aim;
   }
 
   /** The defaults: choices with one bit an option, weights by the range bound. */
@@ -65,12 +69,29 @@ public final class Lowering {
 
   /** These settings with another way to choose weights. */
   public Lowering with(Weights newWeights) {
-    return new Lowering(newWeights, byName, choices);
+    return new Lowering(newWeights, byName, choices, aim);
   }
 
   /** These settings with another code for choices. */
   public Lowering with(ChoiceEncoding newChoices) {
-    return new Lowering(weights, byName, newChoices);
+    return new Lowering(weights, byName, newChoices, aim);
+  }
+
+  /**
+   * These settings with products of three and more bits replaced so that auxiliary bits are few,
+   * and of the ways that take as many so that the largest coefficient is small. The default.
+   */
+  public Lowering fewestAuxiliaries() {
+    return new Lowering(weights, byName, choices, Aim.AUXILIARIES);
+  }
+
+  /**
+   * These settings with products of three and more bits replaced so that the largest coefficient is
+   * small, and of the ways that reach it so that auxiliary bits are few: for hosts that hold
+   * coefficients with few digits.
+   */
+  public Lowering smallestCoefficients() {
+    return new Lowering(weights, byName, choices, Aim.COEFFICIENTS);
   }
 
   /**
@@ -87,7 +108,7 @@ public final class Lowering {
     }
     Map<String, Double> more = new LinkedHashMap<>(byName);
     more.put(rule, value);
-    return new Lowering(weights, Collections.unmodifiableMap(more), choices);
+    return new Lowering(weights, Collections.unmodifiableMap(more), choices, aim);
   }
 
   /**
@@ -131,6 +152,10 @@ public final class Lowering {
                 + "' has no rule of that name");
       }
     }
+  }
+
+  Aim aim() {
+    return aim;
   }
 
   ChoiceEncoding encoding(Decision decision) {

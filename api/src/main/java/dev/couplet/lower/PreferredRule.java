@@ -1,6 +1,7 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.model.Rule;
 import dev.couplet.model.Rule.Part;
 import java.util.Optional;
 
@@ -20,9 +21,15 @@ import java.util.Optional;
  */
 record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
   /** The part of a rule; its cost is the amount, or the square of the amount. */
-  static PreferredRule of(Part part, boolean squared, String rule, Coding coding, BitTable bits) {
+  static PreferredRule of(Part part, Rule rule, Coding coding, BitTable bits, Aim aim) {
     Limits limits = Limits.exact(part, coding);
-    return squared ? squared(limits, rule, bits) : single(limits, rule, bits);
+    Optional<Penalty> clause = ClauseForm.of(limits, rule.name(), bits, aim);
+    if (clause.isPresent()) {
+      double amount = ClauseForm.amount(limits);
+      Polynomial cost = clause.get().terms().times(rule.squared() ? amount * amount : amount);
+      return new PreferredRule(cost, Optional.empty(), clause.get().form());
+    }
+    return rule.squared() ? squared(limits, rule.name(), bits) : single(limits, rule.name(), bits);
   }
 
   /** At the best slack, the square of the remaining difference is the amount squared. */

@@ -10,13 +10,15 @@ import java.util.List;
 
 /**
  * One plan to bring all sources to degree 2: pairs that bits are put for, and the forms of the
- * products that are longer still. Its bits are numbered from {@code first}, those of pairs first.
+ * products that are longer still. Its bits are numbered from {@code first} on, those of pairs
+ * before the others.
  */
 final class ReductionDraft {
   private final List<Source> sources;
   private final List<Product> products;
   private final SharedPairs shared;
   private final ProductForms forms;
+  private final List<String> meanings;
   private final int first;
   private final int auxiliaries;
 
@@ -25,12 +27,16 @@ final class ReductionDraft {
       List<Product> products,
       SharedPairs shared,
       ProductForms forms,
-      int first) {
+      List<String> meanings) {
     this.sources = sources;
     this.products = products;
     this.shared = shared;
     this.forms = forms;
-    this.first = first;
+    this.first = meanings.size();
+    this.meanings = new ArrayList<>(meanings);
+    for (Substitution one : shared.substitutions()) {
+      this.meanings.add(this.meanings.get(one.x()) + " and " + this.meanings.get(one.y()));
+    }
     int sum = shared.substitutions().size();
     for (int p = 0; p < products.size(); p++) {
       sum += forms.auxiliaries(products.get(p).coefficient(), shared.variables(p).length);
@@ -58,11 +64,8 @@ final class ReductionDraft {
 
   /** Adds the bits to the table; gives the sources of degree 2. */
   List<Source> writeTo(BitTable bits) {
-    List<String> meanings = new ArrayList<>(bits.meanings());
     for (Substitution one : shared.substitutions()) {
-      String meaning = meanings.get(one.x()) + " and " + meanings.get(one.y());
-      meanings.add(meaning);
-      int w = bits.add(meaning);
+      int w = bits.add(meanings.get(bits.size()));
       bits.completeWith(values -> values[w] = values[one.x()] && values[one.y()]);
     }
     for (int p = 0; p < products.size(); p++) {
@@ -134,7 +137,7 @@ final class ReductionDraft {
       } else {
         Polynomial.Builder own = Polynomial.builder(first + auxiliaries);
         tie.addTo(own, one.x(), one.y(), first + k);
-        ties.add(new Source("product " + (ties.size() + 1), Kind.PRODUCT, own.build(), 1));
+        ties.add(new Source("product of " + meanings.get(first + k), Kind.PRODUCT, own.build(), 1));
       }
     }
     return ties;

@@ -3,6 +3,8 @@ package dev.couplet.lower;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.audit.LoweringAudit;
+import dev.couplet.audit.RandomModels;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import dev.couplet.lower.Ledger.Kind;
@@ -25,6 +27,12 @@ class DegreeReductionProperties {
     Model model = Model.named("products");
     model.bits("x", IntStream.range(0, size).boxed().toList());
     return new BitTable(new Coding(model.snapshot(), Lowering.standard()));
+  }
+
+  /** A polynomial by itself, brought to degree 2 with few auxiliary bits. */
+  static Polynomial reduced(Polynomial polynomial, String name, BitTable table) {
+    Source only = new Source(name, Kind.OBJECTIVE, polynomial, 1);
+    return DegreeReduction.of(List.of(only), Aim.AUXILIARIES, table).get(0).terms();
   }
 
   static Polynomial sum(List<Source> sources, int size) {
@@ -72,5 +80,16 @@ class DegreeReductionProperties {
       }
     }
     Assume.that(small);
+  }
+
+  @Property(tries = 40)
+  void modelsPassTheAuditWithSmallCoefficients(
+      @ForAll long seed, @ForAll RandomModels.Regime regime) {
+    Model model = RandomModels.of(regime, seed);
+    Lowered small = Lowering.standard().smallestCoefficients().lower(model);
+    LoweringAudit.exhaustive(small).orThrow();
+    assertTrue(
+        small.auxiliaryBits()
+            >= Lowering.standard().fewestAuxiliaries().lower(model).auxiliaryBits());
   }
 }

@@ -38,7 +38,7 @@ class DegreeReductionTest {
     BitTable bits = new BitTable(new Coding(model.snapshot(), Lowering.standard()));
     int[] all = IntStream.range(0, degree).toArray();
     Polynomial product = Polynomial.builder(degree).add(coefficient, all).build();
-    Polynomial quadratic = DegreeReduction.of(product, "product", bits);
+    Polynomial quadratic = DegreeReductionProperties.reduced(product, "product", bits);
     assertTrue(quadratic.degree() <= 2);
     assertEquals(degree + auxiliaries, bits.size());
     for (long pattern = 0; pattern < 1L << degree; pattern++) {

@@ -3,12 +3,17 @@ package dev.couplet.lower;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.audit.LoweringAudit;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import dev.couplet.lower.Ledger.Kind;
 import dev.couplet.lower.Ledger.Source;
+import dev.couplet.model.Bit;
+import dev.couplet.model.Expr;
+import dev.couplet.model.Model;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -85,6 +90,58 @@ class SharedPairsTest {
     assertEquals(optimum, lowest);
   }
 
+  /** The same as a model, each square an objective, audited on every pattern. */
+  @ParameterizedTest
+  @CsvSource({"3, 1", "4, 2", "5, 2", "6, 7", "7, 3", "8, 8", "9, 12", "10, 13", "11, 5", "12, 10"})
+  void modelsWithSharedBitsPassTheAudit(int n, double optimum) {
+    Model model = Model.named("low autocorrelation");
+    List<Bit> x = List.copyOf(model.bits("x", numbers(n)).decisions());
+    for (int k = 1; k < n; k++) {
+      int distance = k;
+      Expr sum = Expr.sum(numbers(n - k), i -> spin(x, i).times(spin(x, i + distance)));
+      model.minimize("C" + k, sum.times(sum));
+    }
+    Lowered lowered = Lowering.standard().lower(model);
+    LoweringAudit.Report report = LoweringAudit.exhaustive(lowered);
+    report.orThrow();
+    assertEquals(optimum, report.optimum().orElseThrow());
+    LoweringAudit.exhaustive(Lowering.standard().smallestCoefficients().lower(model)).orThrow();
+  }
+
+  private static List<Integer> numbers(int n) {
+    return IntStream.range(0, n).boxed().toList();
+  }
+
+  private static Expr spin(List<Bit> x, int i) {
+    return Expr.constant(1).minus(x.get(i).times(2));
+  }
+
+  /** A rule and an objective that have products in common: its weight can still be told apart. */
+  @Test
+  void aRuleThatSharesBitsWithTheObjectiveIsAnalysed() {
+    Model model = Model.named("triples");
+    List<Bit> x = List.copyOf(model.bits("x", numbers(6)).decisions());
+    Expr pair = x.get(0).times(x.get(1));
+    Expr gain = Expr.sum(numbers(4), k -> pair.times(x.get(k + 2)).times(k + 1));
+    Expr used = Expr.sum(numbers(4), k -> pair.times(x.get(k + 2)));
+    model.maximize("gain", gain);
+    model.require("two", used.atMost(2));
+    Lowered lowered = Lowering.standard().lower(model);
+    List<String> sources =
+        IntStream.range(0, lowered.qubo().size())
+            .boxed()
+            .flatMap(bit -> lowered.ledger().linear(bit).stream())
+            .filter(entry -> entry.kind() == Kind.PRODUCT)
+            .map(Ledger.Entry::source)
+            .toList();
+    assertEquals(List.of("product of x 0 and x 1"), sources);
+    LoweringAudit.Report report = LoweringAudit.exhaustive(lowered);
+    report.orThrow();
+    assertEquals(7, report.optimum().orElseThrow(), "4 + 3");
+    assertEquals(
+        2, report.weights().get(0).infimum().orElseThrow(), "one more gains 2 and misses by 1");
+  }
+
   /** With small coefficients first, the largest is no larger and the bits are no fewer. */
   @ParameterizedTest
   @CsvSource({"5", "8", "12"})
@@ -112,13 +169,13 @@ class SharedPairsTest {
   void pairsAreSharedWhereThatSaves() {
     Polynomial one = Polynomial.builder(6).add(2, 0, 1, 2, 3).build();
     BitTable table = DegreeReductionProperties.table(6);
-    Polynomial alone = DegreeReduction.of(one, "one", table);
+    Polynomial alone = DegreeReductionProperties.reduced(one, "one", table);
     assertEquals(7, table.size());
     assertEquals(3 * 2, alone.coefficient(6), "the form of Ishikawa for degree 4");
     Polynomial three =
         Polynomial.builder(6).add(2, 0, 1, 2).add(-3, 0, 1, 3).add(4, 0, 1, 4).build();
     table = DegreeReductionProperties.table(6);
-    Polynomial shared = DegreeReduction.of(three, "three", table);
+    Polynomial shared = DegreeReductionProperties.reduced(three, "three", table);
     assertEquals(7, table.size());
     List<String> meanings = table.meanings();
     assertEquals(meanings.get(0) + " and " + meanings.get(1), meanings.get(6));
