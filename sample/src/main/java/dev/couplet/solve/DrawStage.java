@@ -29,8 +29,9 @@ final class DrawStage {
       Structure structure,
       double bound,
       OptionalDouble target,
+      int share,
       Course course) {
-    Effort effort = course.left();
+    Effort effort = course.left(share);
     double stopAt = Math.max(bound, target.orElse(Double.NEGATIVE_INFINITY));
     Run run = new Run(effort.target(stopAt), course.watch(), starts, structure);
     Draws draws = method(form, run).sample(form, run);

@@ -52,7 +52,7 @@ final class FormSolver {
             .orElse(Double.NEGATIVE_INFINITY);
     double bound = Math.max(ofProof, BoundStage.byForm(form, course));
     OptionalDouble target = run.effort().target();
-    Draws draws = DrawStage.run(form, run.starts(), run.structure(), bound, target, course);
+    Draws draws = DrawStage.run(form, run.starts(), run.structure(), bound, target, 100, course);
     End end = DrawStage.end(draws, target);
     boolean better = proof.isPresent() && proof.get().best().energy() < draws.best().energy();
     Draws best = (better ? proof.get() : draws).end(end);

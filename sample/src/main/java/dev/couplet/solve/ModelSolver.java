@@ -1,6 +1,7 @@
 package dev.couplet.solve;
 
 import dev.couplet.exact.PlanEnumeration.Found;
+import dev.couplet.exact.plans.PlanSearch;
 import dev.couplet.form.State;
 import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowering;
@@ -15,50 +16,99 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** One run on a model, stage by stage. */
+/**
+ * One run on a model, stage by stage: few plans are looked at one by one; else a search is tried
+ * first, and where it proves nothing, draws and a second search share what is left.
+ */
 final class ModelSolver {
+  private static final int FIRST_SHARE = 30;
+  private static final int DRAWS_SHARE = 50;
+  private static final int ALL = 100;
+
   private final Statement statement;
   private final Lowering lowering;
-  private final Optional<Plan> start;
   private final Course course;
+  private final int sign;
+  private Optional<Plan> best;
+
+  /** No feasible plan costs less, in the sense that everything is minimised. */
+  private double lowest = Double.NEGATIVE_INFINITY;
 
   ModelSolver(
       Statement statement, Lowering lowering, Optional<Plan> start, Effort effort, Watch watch) {
     this.statement = statement;
     this.lowering = lowering;
-    this.start = start;
+    this.best = start;
     this.course = new Course(effort, watch);
+    this.sign = statement.sense().sign();
   }
 
   Answer answer() {
-    return PlanStage.fits(statement, course) ? byEveryPlan() : byDraws();
+    if (PlanStage.fits(statement, course)) {
+      return byEveryPlan();
+    }
+    boolean searchable = PlanSearch.standard().fits(statement);
+    if (searchable && searched(FIRST_SHARE)) {
+      return proved(End.DONE);
+    }
+    End end = ended();
+    if (end == End.DONE) {
+      end = drawn(searchable);
+    }
+    if (end == End.DEADLINE && searchable && !course.vigil().over()) {
+      if (searched(ALL)) {
+        return proved(End.DONE);
+      }
+      end = ended() == End.DONE ? End.DEADLINE : ended();
+    }
+    return answer(end);
   }
 
   private Answer byEveryPlan() {
     Found found = PlanStage.run(statement, course);
-    if (!found.complete()) {
-      Plan best = better(found.best().orElseGet(this::firstPlan));
-      return answer(best, BoundStage.byRange(statement), course.vigil().reason());
+    found.best().ifPresent(this::keep);
+    if (found.complete()) {
+      lowest = found.best().map(plan -> sign * plan.value()).orElse(Double.POSITIVE_INFINITY);
+      return proved(End.DONE);
     }
-    int sign = statement.sense().sign();
-    if (found.best().isEmpty()) {
-      double beyondAll = sign * Double.POSITIVE_INFINITY;
-      Plan nearest = start.orElseGet(this::firstPlan);
-      return new Answer(nearest, beyondAll, Proof.INFEASIBLE, End.DONE, course.stages());
-    }
-    Plan best = found.best().get();
-    return new Answer(best, best.value(), Proof.OPTIMAL, End.DONE, course.stages());
+    lowest = BoundStage.byRange(statement);
+    return answer(course.vigil().reason());
   }
 
-  private Answer byDraws() {
+  /** Searches with a share of the time left; true if that proves the answer. */
+  private boolean searched(int share) {
+    Optional<Plan> feasible = best.filter(Plan::feasible);
+    PlanSearch.Found found = SearchStage.run(statement, feasible, share, course);
+    found.best().ifPresent(this::keep);
+    lowest = Math.max(lowest, sign * found.bound());
+    return found.complete();
+  }
+
+  /** Why the run is over by now, as far as stop, deadline and target go. */
+  private End ended() {
+    OptionalDouble target = course.effort().target();
+    boolean reached =
+        target.isPresent()
+            && best.filter(Plan::feasible).isPresent()
+            && sign * best.get().value() <= sign * target.getAsDouble();
+    if (reached) {
+      return End.TARGET;
+    }
+    return course.vigil().over() ? course.vigil().reason() : End.DONE;
+  }
+
+  private End drawn(boolean searchedAfter) {
     Lowered lowered = lowering.lower(statement);
     course.finished(
         "lowering", lowered.qubo().size() + " bits, " + lowered.qubo().pairs() + " pairs");
-    double bound = BoundStage.run(lowered, course);
-    List<State> starts = start.map(lowered::complete).map(List::of).orElse(List.of());
+    lowest = Math.max(lowest, BoundStage.run(lowered, course));
+    List<State> starts = best.map(lowered::complete).map(List::of).orElse(List.of());
     OptionalDouble target = inEnergy(lowered, course.effort().target());
-    Draws draws = DrawStage.run(lowered.qubo(), starts, lowered.structure(), bound, target, course);
-    return answer(better(lowered.read(draws).best()), bound, DrawStage.end(draws, target));
+    int share = searchedAfter ? DRAWS_SHARE : ALL;
+    Draws draws =
+        DrawStage.run(lowered.qubo(), starts, lowered.structure(), lowest, target, share, course);
+    keep(lowered.read(draws).best());
+    return DrawStage.end(draws, target);
   }
 
   private static OptionalDouble inEnergy(Lowered lowered, OptionalDouble value) {
@@ -67,9 +117,9 @@ final class ModelSolver {
         : OptionalDouble.empty();
   }
 
-  /** The plan, or the one to start from if that is better. */
-  private Plan better(Plan plan) {
-    return start.filter(given -> given.compareTo(plan) < 0).orElse(plan);
+  /** Keeps the better of a plan and the best known; among equals the one known. */
+  private void keep(Plan plan) {
+    best = Optional.of(best.filter(known -> known.compareTo(plan) <= 0).orElse(plan));
   }
 
   /** Every choice at its first option, every bit unset: something to return when all else fails. */
@@ -83,12 +133,25 @@ final class ModelSolver {
     return statement.plan(State.of(values));
   }
 
-  private Answer answer(Plan plan, double lowest, End end) {
-    int sign = statement.sense().sign();
+  /** The best plan is optimal; or, if none is feasible, none can be. */
+  private Answer proved(End end) {
+    Plan plan = best.orElseGet(this::firstPlan);
+    OptionalDouble target = course.effort().target();
+    if (!plan.feasible()) {
+      double beyondAll = sign * Double.POSITIVE_INFINITY;
+      return new Answer(plan, beyondAll, Proof.INFEASIBLE, end, course.stages());
+    }
+    double bound = Math.min(lowest, sign * plan.value());
+    End why = target.isPresent() && ended() == End.TARGET ? End.TARGET : end;
+    return new Answer(plan, sign * bound + 0.0, Proof.OPTIMAL, why, course.stages());
+  }
+
+  private Answer answer(End end) {
+    Plan plan = best.orElseGet(this::firstPlan);
     double cost = sign * plan.value();
     boolean optimal = plan.feasible() && cost <= lowest;
     double bound = plan.feasible() ? Math.min(lowest, cost) : lowest;
     Proof proof = optimal ? Proof.OPTIMAL : Proof.NONE;
-    return new Answer(plan, sign * bound, proof, end, course.stages());
+    return new Answer(plan, sign * bound + 0.0, proof, end, course.stages());
   }
 }

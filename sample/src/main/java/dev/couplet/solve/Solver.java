@@ -16,11 +16,12 @@ import java.util.Optional;
  * The one-call way in: a model goes in, a plan with a bound on how far from optimal it can be comes
  * out.
  *
- * <p>Models with few plans are solved by looking at all of them, and the answer is proved. Others
- * are lowered, bounded, and drawn from until the effort is spent or a plan reaches the bound; the
- * best plan so found is no proof of anything unless {@link Answer#proof} says so. A target of the
- * effort is a value in the model's own sense. Every plan returned was checked against the model
- * itself.
+ * <p>Models with few plans are solved by looking at all of them, and the answer is proved. On
+ * others that are not too large a branch and bound over the decisions is tried. Where it proves
+ * nothing within its share of the effort, the model is lowered, bounded, and drawn from, and the
+ * search goes on from the best plan with the time that is left; that plan is no proof of anything
+ * unless {@link Answer#proof} says so. A target of the effort is a value in the model's own sense.
+ * Every plan returned was checked against the model itself.
  *
  * <p>Also a {@link Sampler} of forms, with a bound in its draws; there a target is an energy.
  * Immutable and thread-safe.

@@ -3,9 +3,10 @@
  * dev.couplet.solve.Answer}, a plan with its value, a proved bound, and how the two compare.
  *
  * <p>What it does, one stage a file: {@code PlanStage} looks at every plan where they are few
- * enough; else {@code BoundStage} bounds the value, and {@code DrawStage} lowers the model and
- * draws until the effort is spent or the bound is reached. {@code FormSolver} does the same for a
- * form without a model.
+ * enough; else {@code SearchStage} branches over the decisions of the model. What that does not
+ * prove is lowered, {@code BoundStage} bounds the value, {@code DrawStage} draws until its share of
+ * the effort is spent or the bound is reached, and a last search takes what time is left. {@code
+ * FormSolver} does without a model what can be done on a form alone.
  */
 @CheckReturnValue
 @NullMarked
