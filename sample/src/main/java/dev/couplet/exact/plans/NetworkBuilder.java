@@ -13,8 +13,24 @@ import java.util.function.Predicate;
 
 /** Reads a statement, or some of its rules, into a {@link Network}. */
 final class NetworkBuilder {
+  /** A part of a rule that some plan breaks. */
+  private record Asked(Rule rule, Rule.Part part) {
+    /** What a miss by one whole unit costs, or by its square; 0 for a required rule. */
+    BigDecimal price() {
+      BigDecimal unit = Scale.decimal(part.unit());
+      BigDecimal counted = rule.squared() ? unit.multiply(unit) : unit;
+      return Scale.decimal(rule.costPerUnit()).multiply(counted);
+    }
+
+    /** What the largest miss costs at the most. */
+    BigDecimal most() {
+      BigDecimal missed = new BigDecimal(part.largestViolation());
+      return price().multiply(rule.squared() ? missed.multiply(missed) : missed);
+    }
+  }
+
   private final Statement statement;
-  private final List<Rule> rules;
+  private final List<Asked> asked;
   private final Variables plain;
   private final Terms terms;
   private final List<Row> rows = new ArrayList<>();
@@ -26,11 +42,22 @@ final class NetworkBuilder {
 
   private NetworkBuilder(Statement statement, Predicate<Rule> kept) {
     this.statement = statement;
-    this.rules =
-        statement.rules().stream().filter(kept).filter(rule -> !rule.alwaysKept()).toList();
+    this.asked = asked(statement, kept);
     this.plain = Variables.of(statement, 0);
     this.variables = plain;
     this.terms = new Terms(plain);
+  }
+
+  private static List<Asked> asked(Statement statement, Predicate<Rule> kept) {
+    List<Asked> asked = new ArrayList<>();
+    for (Rule rule : statement.rules()) {
+      if (kept.test(rule)) {
+        rule.parts().stream()
+            .filter(part -> !part.alwaysKept())
+            .forEach(part -> asked.add(new Asked(rule, part)));
+      }
+    }
+    return asked;
   }
 
   /** The network of a statement with those of its rules that are kept. */
@@ -40,14 +67,14 @@ final class NetworkBuilder {
 
   private Network network() {
     List<Term> objective = terms.of(statement.objective().times(statement.sense().sign()), 2);
-    List<List<Term>> sums = rules.stream().map(rule -> terms.of(rule.terms(), 1)).toList();
+    List<List<Term>> sums = asked.stream().map(one -> terms.of(one.part().terms(), 1)).toList();
     List<List<Integer>> products = terms.products();
     variables = Variables.of(statement, products.size());
     costs = new long[variables.values()];
     Scale scale = scale(objective);
     objective.forEach(term -> addCost(term, scale));
-    for (int r = 0; r < rules.size(); r++) {
-      addRow(rules.get(r), sums.get(r), scale);
+    for (int r = 0; r < asked.size(); r++) {
+      addRow(asked.get(r), sums.get(r), scale);
     }
     for (int k = 0; k < products.size(); k++) {
       addProduct(products.get(k), plain.values() + 2 * k + 1);
@@ -64,17 +91,11 @@ final class NetworkBuilder {
       units.add(cost);
       magnitude = magnitude.add(cost.abs());
     }
-    for (Rule rule : rules) {
-      units.add(price(rule));
-      BigDecimal most = new BigDecimal(rule.largestViolation());
-      magnitude = magnitude.add(price(rule).multiply(most));
+    for (Asked one : asked) {
+      units.add(one.price());
+      magnitude = magnitude.add(one.most());
     }
     return Scale.of(units, magnitude);
-  }
-
-  /** What a miss by a whole unit costs; 0 for a required rule. */
-  private static BigDecimal price(Rule rule) {
-    return Scale.decimal(rule.costPerUnit()).multiply(Scale.decimal(rule.unit()));
   }
 
   private void addCost(Term term, Scale scale) {
@@ -113,7 +134,9 @@ final class NetworkBuilder {
     return row * variables.values(other) + upper - variables.first(other);
   }
 
-  private void addRow(Rule rule, List<Term> sum, Scale scale) {
+  private void addRow(Asked one, List<Term> sum, Scale scale) {
+    Rule rule = one.rule();
+    Rule.Part part = one.part();
     Map<Integer, long[]> byVariable = new TreeMap<>();
     for (Term term : sum) {
       int value = term.values().get(0);
@@ -123,7 +146,7 @@ final class NetworkBuilder {
               value - variables.first(variable)] +=
           (long) term.coefficient();
     }
-    long price = rule.required() ? -1 : scale.whole(price(rule)) * scale.fine();
+    long price = rule.required() ? -1 : scale.whole(one.price()) * scale.fine();
     if (price == 0) {
       return;
     }
@@ -132,11 +155,11 @@ final class NetworkBuilder {
             rule.name(),
             byVariable.keySet().stream().mapToInt(Integer::intValue).toArray(),
             byVariable.values().toArray(long[][]::new),
-            limit(rule.lowest()),
-            limit(rule.highest()),
-            1,
+            limit(part.lowest()),
+            limit(part.highest()),
+            (long) part.step(),
             price,
-            false);
+            rule.squared());
     grain = row.required() ? grain : gcd(grain, price);
     if (row.variables.length == 0) {
       constant += row.charge(0);

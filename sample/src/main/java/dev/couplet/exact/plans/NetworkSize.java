@@ -1,5 +1,6 @@
 package dev.couplet.exact.plans;
 
+import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -28,7 +29,9 @@ final class NetworkSize {
     Terms terms = new Terms(plain);
     List<Terms.Term> objective = terms.of(statement.objective(), 2);
     List<List<Terms.Term>> sums = new ArrayList<>();
-    statement.rules().forEach(rule -> sums.add(terms.of(rule.terms(), 1)));
+    for (Rule rule : statement.rules()) {
+      rule.parts().forEach(part -> sums.add(terms.of(part.terms(), 1)));
+    }
     int products = terms.products().size();
     NetworkSize size = new NetworkSize(Variables.of(statement, products));
     objective.forEach(term -> size.add(term.values()));

@@ -1,7 +1,6 @@
 package dev.couplet.exact.plans;
 
 import dev.couplet.form.State;
-import dev.couplet.model.Choice;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Statement;
 import java.util.ArrayList;
@@ -44,13 +43,17 @@ final class Variables {
     List<Integer> first = new ArrayList<>();
     int next = 0;
     for (Decision decision : statement.decisions()) {
-      int literal = statement.firstLiteral(decision);
-      first.add(next);
-      if (decision instanceof Choice) {
-        for (int k = 0; k < decision.values(); k++) {
-          valueOf[literal + k] = next++;
+      List<List<Integer>> groups = statement.exactlyOne(decision);
+      for (List<Integer> group : groups) {
+        first.add(next);
+        for (int literal : group) {
+          valueOf[literal] = next++;
         }
-      } else {
+      }
+      int single = groups.isEmpty() ? statement.literals(decision) : 0;
+      for (int k = 0; k < single; k++) {
+        int literal = statement.firstLiteral(decision) + k;
+        first.add(next);
         valueOf[literal] = next + 1;
         alone[literal] = true;
         next += 2;

@@ -14,8 +14,6 @@ import dev.couplet.model.Model;
 import dev.couplet.model.Plan;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
-import dev.couplet.sampling.Progress;
-import dev.couplet.sampling.StopSignal;
 import dev.couplet.sampling.Watch;
 import java.time.Duration;
 import java.util.ArrayList;
@@ -259,7 +257,7 @@ class PlanSearchTest {
 
   @Test
   void aStopBeforeTheStartIsHonoured() {
-    StopSignal stop = StopSignal.create();
+    Watch.StopSignal stop = Watch.StopSignal.create();
     stop.stop();
     Model model = Problems.tour(cities(8));
     Found found = SEARCH.search(model.snapshot(), Optional.empty(), EFFORT, Watch.stop(stop));
@@ -281,14 +279,14 @@ class PlanSearchTest {
 
   @Test
   void progressTellsPlanAndBound() {
-    List<Progress> seen = new ArrayList<>();
+    List<Watch.Progress> seen = new ArrayList<>();
     Model model = Problems.tour(cities(9));
     AtomicLong now = new AtomicLong();
     Watch watch = Watch.none().clock(() -> now.addAndGet(100_000_000)).progress(seen::add);
     Found found = SEARCH.search(model.snapshot(), Optional.empty(), EFFORT, watch);
     assertTrue(found.complete());
     assertFalse(seen.isEmpty());
-    for (Progress progress : seen) {
+    for (Watch.Progress progress : seen) {
       assertTrue(progress.bound().orElseThrow() <= shortest(cities(9)));
       assertTrue(progress.best().orElse(Double.MAX_VALUE) >= shortest(cities(9)));
     }
