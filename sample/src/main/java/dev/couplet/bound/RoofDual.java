@@ -17,6 +17,9 @@ import dev.couplet.sampling.Vigil;
 public final class RoofDual implements Bound {
   private static final RoofDual STANDARD = new RoofDual();
 
+  /** With more pairs than this the network is not built when nothing is left of the run. */
+  private static final int SMALL = 1 << 16;
+
   private RoofDual() {}
 
   /** The roof dual. */
@@ -37,6 +40,9 @@ public final class RoofDual implements Bound {
   /** The bound with the bits that it fixes, as a stage of a run that has begun. */
   public Roof roof(Qubo form, Vigil vigil) {
     ScaledForm scaled = new ScaledForm(form);
+    if (form.pairs() > SMALL && vigil.over()) {
+      return Roof.unknown(form.size(), scaled.bound(scaled.lowest()));
+    }
     Implications network = new Implications(scaled);
     boolean done = !vigil.over() && network.maximise(vigil);
     // Rounded up: twice a whole number is at least the odd number below it plus one.

@@ -90,6 +90,18 @@ final class ScaledForm {
     return a;
   }
 
+  /** A number that no energy in whole numbers is below: all that is negative, and the constant. */
+  long lowest() {
+    long sum = constant;
+    for (long value : linear) {
+      sum += Math.min(0, value);
+    }
+    for (long value : pair) {
+      sum += Math.min(0, value);
+    }
+    return sum;
+  }
+
   /** What an energy in whole numbers and a computed energy of the form may differ by. */
   double slack() {
     return slack;

@@ -1,7 +1,7 @@
 package dev.couplet.exact;
 
 import dev.couplet.form.Qubo;
-import dev.couplet.form.State;
+import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Run;
@@ -56,15 +56,15 @@ public final class BranchAndBound implements Sampler {
     run.requireFit(form.size());
     Vigil vigil = run.begin(form);
     SplittableRandom random = new SplittableRandom(run.effort().seed());
-    State best = WarmStart.of(form, run.starts(), random, vigil);
-    double energy = form.value(best);
+    Draw best = WarmStart.of(form, run.starts(), random, vigil);
+    double energy = best.energy();
     double target = run.effort().target().orElse(Double.NEGATIVE_INFINITY);
     double bound = Double.NEGATIVE_INFINITY;
     if (energy > target && !vigil.over()) {
       vigil.report(OptionalDouble.empty(), OptionalDouble.of(energy), OptionalDouble.empty());
       Branching branching = new Branching(nodes, run.effort().threads(), vigil);
       Outcome outcome = branching.solve(form, energy, Double.NEGATIVE_INFINITY);
-      best = outcome.state().orElse(best);
+      best = outcome.state().map(state -> Draw.of(form, state)).orElse(best);
       energy = Math.min(energy, outcome.energy());
       bound = Math.min(energy, outcome.bound());
       vigil.report(OptionalDouble.of(1), OptionalDouble.of(energy), OptionalDouble.of(bound));
@@ -72,7 +72,7 @@ public final class BranchAndBound implements Sampler {
     if (energy <= target) {
       vigil.end(End.TARGET);
     }
-    Draws draws = Draws.of(form, List.of(best), vigil.reason(), run.effort().seed());
+    Draws draws = Draws.of(List.of(best), vigil.reason(), run.effort().seed());
     return bound == Double.NEGATIVE_INFINITY ? draws : draws.bound(bound);
   }
 

@@ -4,9 +4,12 @@ import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
 import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.LocalFields;
+import dev.couplet.kernel.Pace;
+import dev.couplet.sampling.Draw;
 import dev.couplet.sampling.Vigil;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.SplittableRandom;
 
 /**
@@ -18,47 +21,49 @@ final class WarmStart {
   private static final int BEGINNINGS = 8;
 
   private final Qubo form;
-  private final LocalFields fields;
   private final SplittableRandom random;
   private final Vigil vigil;
-  private State best;
-  private double bestEnergy;
+  private Draw best;
 
   private WarmStart(Qubo form, SplittableRandom random, Vigil vigil) {
     this.form = form;
-    this.fields = new LocalFields(Adjacency.of(form));
     this.random = random;
     this.vigil = vigil;
-    this.best = State.zeros(form.size());
-    this.bestEnergy = form.value(best);
+    this.best = Draw.of(form, State.zeros(form.size()));
   }
 
   /** The best state found; the starts are looked at first. */
-  static State of(Qubo form, List<State> starts, SplittableRandom random, Vigil vigil) {
+  static Draw of(Qubo form, List<State> starts, SplittableRandom random, Vigil vigil) {
     WarmStart search = new WarmStart(form, random, vigil);
-    starts.forEach(search::offer);
-    if (form.size() > 0) {
-      starts.forEach(search::improve);
-      for (int k = starts.size(); k < BEGINNINGS; k++) {
-        search.improve(LocalFields.random(form.size(), random));
+    for (int k = 0; k < starts.size() && (k == 0 || !vigil.over()); k++) {
+      search.offer(starts.get(k));
+    }
+    Optional<Adjacency> rows =
+        form.size() == 0 || vigil.over() ? Optional.empty() : Adjacency.of(form, Pace.of(vigil));
+    if (rows.isPresent()) {
+      LocalFields fields = new LocalFields(rows.get());
+      starts.forEach(start -> search.improve(fields, start));
+      for (int k = starts.size(); k < BEGINNINGS && !vigil.over(); k++) {
+        search.improve(fields, LocalFields.random(form.size(), random));
       }
     }
     return search.best;
   }
 
   private void offer(State state) {
-    double energy = form.value(state);
-    if (energy < bestEnergy) {
-      bestEnergy = energy;
-      best = state;
+    Draw draw = Draw.of(form, state);
+    if (draw.energy() < best.energy()) {
+      best = draw;
     }
   }
 
-  private void improve(State from) {
+  private void improve(LocalFields fields, State from) {
+    if (!fields.set(from, Pace.of(vigil))) {
+      return;
+    }
     int size = form.size();
     int[] freeAt = new int[size];
     Arrays.fill(freeAt, 0);
-    fields.set(from);
     double energy = form.value(from);
     double record = energy;
     State recordState = from;
@@ -68,7 +73,7 @@ final class WarmStart {
       if (step % lookEvery == 0 && vigil.over()) {
         break;
       }
-      int next = next(freeAt, step, record - energy);
+      int next = next(fields, freeAt, step, record - energy);
       if (next < 0) {
         continue;
       }
@@ -84,7 +89,7 @@ final class WarmStart {
   }
 
   /** The variable whose flip costs least, of those that may move or would set a record. */
-  private int next(int[] freeAt, int step, double recordGain) {
+  private static int next(LocalFields fields, int[] freeAt, int step, double recordGain) {
     int next = -1;
     double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i < freeAt.length; i++) {
