@@ -138,15 +138,11 @@ public final class Annealing implements Sampler {
     return "Annealing("
         + cooling
         + ", hot "
-        + text(hot)
+        + Check.text(hot)
         + ", cold "
-        + text(cold)
+        + Check.text(cold)
         + ", "
         + finish
         + ")";
-  }
-
-  private static String text(OptionalDouble setting) {
-    return setting.isPresent() ? Double.toString(setting.getAsDouble()) : "from the form";
   }
 }

@@ -1,6 +1,11 @@
 package dev.couplet.anneal;
 
-/** Argument checks of this package; one place, so that the messages read alike. */
+import java.util.OptionalDouble;
+
+/**
+ * Argument checks of this package, and how settings are told; one place, so that the messages read
+ * alike.
+ */
 final class Check {
   private Check() {}
 
@@ -10,5 +15,10 @@ final class Check {
           what + " is " + value + ", it must be a finite number above zero");
     }
     return value;
+  }
+
+  /** A setting as it is told. */
+  static String text(OptionalDouble setting) {
+    return setting.isPresent() ? Double.toString(setting.getAsDouble()) : "from the form";
   }
 }

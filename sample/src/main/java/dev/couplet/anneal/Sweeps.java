@@ -35,6 +35,19 @@ record Sweeps(int first, int generation) {
     return new Sweeps(Math.max(SHORTEST, fitting), Integer.MAX_VALUE);
   }
 
+  /** A timed run makes one draw after the other, each twice as long as the one before. */
+  static Sweeps ofLadders(Adjacency rows, Effort effort, int replicas) {
+    if (effort.sweeps().isPresent()) {
+      return new Sweeps(effort.sweeps().getAsInt(), Integer.MAX_VALUE);
+    }
+    if (effort.draws().isEmpty()) {
+      return new Sweeps(SHORTEST, 1);
+    }
+    double sweep = replicas * (1.0 + rows.size() + 2.0 * rows.pairs());
+    return new Sweeps(
+        Math.max(SHORTEST, (int) Math.min(COUNTED, STEPS / sweep)), Integer.MAX_VALUE);
+  }
+
   /** The number of sweeps of one draw. */
   int of(int draw) {
     int doublings = draw / generation;

@@ -1,9 +1,10 @@
 /**
- * Simulated annealing.
+ * Simulated annealing and replica exchange.
  *
- * <p>{@link dev.couplet.anneal.Annealing} is the sampler, {@link dev.couplet.anneal.Cooling} the
- * path of its temperature from hot to cold. Both ends follow from the form's own coefficients
- * unless they are set.
+ * <p>{@link dev.couplet.anneal.Annealing} is the one sampler, {@link dev.couplet.anneal.Cooling}
+ * the path of its temperature from hot to cold; {@link dev.couplet.anneal.Tempering} is the other,
+ * with a ladder of temperatures. The ends follow from the form's own coefficients unless they are
+ * set.
  */
 @CheckReturnValue
 @NullMarked

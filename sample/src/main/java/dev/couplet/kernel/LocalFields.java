@@ -100,6 +100,20 @@ public final class LocalFields {
     }
   }
 
+  /**
+   * The energy of the state as it is now, by its fields: as the form values it, up to rounding;
+   * O(n).
+   */
+  public double energy() {
+    double[] linear = rows.linear();
+    double twice = 0;
+    for (int i = 0; i < field.length; i++) {
+      // Half of 1 - spin is x: pairs stand in the fields of both their variables.
+      twice += (1 - spin[i]) * (linear[i] + field[i]);
+    }
+    return rows.constant() + twice / 4;
+  }
+
   /** The state as it is now. */
   public State state() {
     long[] words = new long[(spin.length + 63) >>> 6];

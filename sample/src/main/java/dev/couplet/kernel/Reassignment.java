@@ -57,6 +57,18 @@ public final class Reassignment {
     }
   }
 
+  private Reassignment(LocalFields fields, Reassignment like) {
+    this.fields = fields;
+    this.sets = like.sets;
+    this.between = like.between;
+    this.least = like.least;
+  }
+
+  /** The same moves of another state of the same form; tables are shared. */
+  public Reassignment on(LocalFields other) {
+    return new Reassignment(other, this);
+  }
+
   /** The pairs within a set, row by row; {@code place} is -1 everywhere, before and after. */
   private static double[] between(Adjacency rows, int[] set, int[] place, Pace pace) {
     double[] pairs = new double[set.length * set.length];

@@ -47,33 +47,12 @@ class AnnealingDistributionTest {
   void aTemperatureOffByAFifthIsNoticed() {
     Qubo form = Forms.integers(6, 1, 5, 9);
     Draws hotter = at(7.2).sample(form, Effort.draws(DRAWS).sweeps(60));
-    assertTrue(chiSquare(form, 6.0, hotter) > 160);
+    assertTrue(ChiSquare.of(form, 6.0, hotter) > 160);
   }
 
   private static double chiSquare(Qubo form, double temperature, int sweeps) {
     Draws draws = at(temperature).sample(form, Effort.draws(DRAWS).sweeps(sweeps).seed(4));
-    return chiSquare(form, temperature, draws);
-  }
-
-  private static double chiSquare(Qubo form, double temperature, Draws draws) {
-    int states = 1 << form.size();
-    double[] weight = new double[states];
-    double sum = 0;
-    for (int bits = 0; bits < states; bits++) {
-      weight[bits] = StrictMath.exp(-form.value(Forms.state(form.size(), bits)) / temperature);
-      sum += weight[bits];
-    }
-    int[] count = new int[states];
-    for (Draw draw : draws) {
-      count[(int) draw.state().toWords()[0]] = draw.multiplicity();
-    }
-    double chiSquare = 0;
-    for (int bits = 0; bits < states; bits++) {
-      double expected = draws.total() * weight[bits] / sum;
-      assertTrue(expected > 4, "too few expected for a chi-square: " + expected);
-      chiSquare += (count[bits] - expected) * (count[bits] - expected) / expected;
-    }
-    return chiSquare;
+    return ChiSquare.of(form, temperature, draws);
   }
 
   /**

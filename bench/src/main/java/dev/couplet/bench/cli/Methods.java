@@ -3,6 +3,7 @@ package dev.couplet.bench.cli;
 import dev.couplet.anneal.Annealing;
 import dev.couplet.anneal.Cooling;
 import dev.couplet.anneal.Finish;
+import dev.couplet.anneal.Tempering;
 import dev.couplet.exact.BranchAndBound;
 import dev.couplet.exact.Elimination;
 import dev.couplet.exact.Enumeration;
@@ -27,6 +28,7 @@ final class Methods {
   static {
     SAMPLERS.put("solver", Solver.standard());
     SAMPLERS.put("annealing", Annealing.standard());
+    SAMPLERS.put("tempering", Tempering.standard());
     SAMPLERS.put("tabu", Tabu.standard());
     SAMPLERS.put("relink", Relinking.standard());
     SAMPLERS.put("descent", GreedyDescent.standard());

@@ -60,7 +60,8 @@ final class OverrunCommand implements Callable<Integer> {
       split = ",",
       completionCandidates = Methods.Names.class,
       description = "Some of ${COMPLETION-CANDIDATES} (default: ${DEFAULT-VALUE}).")
-  private List<String> methods = List.of("annealing", "tabu", "relink", "descent", "solver");
+  private List<String> methods =
+      List.of("annealing", "tempering", "tabu", "relink", "descent", "solver");
 
   @Option(
       names = "--seconds",

@@ -7,6 +7,7 @@ import com.tngtech.archunit.core.domain.JavaModifier;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
 import dev.couplet.anneal.Annealing;
+import dev.couplet.anneal.Tempering;
 import dev.couplet.audit.SamplerAudit;
 import dev.couplet.bond.HostedSampler;
 import dev.couplet.embed.Embedding;
@@ -39,6 +40,8 @@ class EverySamplerTest {
   static Stream<Sampler> samplers() {
     return Stream.of(
         Annealing.standard(),
+        Tempering.standard(),
+        Tempering.standard().clusters(),
         Tabu.standard(),
         Relinking.standard(),
         GreedyDescent.standard(),
