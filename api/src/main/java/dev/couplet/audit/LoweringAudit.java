@@ -118,7 +118,8 @@ public final class LoweringAudit {
    *
    * @param rule the rule's name, or words that name a choice's code
    * @param weight the weight that it has
-   * @param infimum every larger weight suffices and no smaller one does; infinite if no weight of
+   * @param infimum every larger weight suffices and no smaller one does (a rule whose penalty goes
+   *     below 0 where a code is broken may then ask for a heavier code); infinite if no weight of
    *     this rule alone would do; empty if the weight cannot be told apart from other parts of the
    *     form (as for preferred rules, whose auxiliary bits carry costs too), or the model has no
    *     feasible plan

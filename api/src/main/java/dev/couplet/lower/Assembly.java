@@ -12,7 +12,9 @@ import dev.couplet.model.Statement.Objective;
 import dev.couplet.model.Statement.Range;
 import dev.couplet.sampling.Structure;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
 /** One lowering under way: collects sources in the order of the statement, weighs and adds them. */
 final class Assembly {
@@ -31,6 +33,9 @@ final class Assembly {
   private final List<Source> sources = new ArrayList<>();
   private final List<Weight> weights = new ArrayList<>();
 
+  /** How far the weighted penalties of rules go below 0 on patterns that break a code. */
+  private final Map<Decision, Double> below = new HashMap<>();
+
   Assembly(Statement statement, Lowering settings) {
     this.statement = statement;
     this.settings = settings;
@@ -45,15 +50,28 @@ final class Assembly {
     for (Objective part : statement.objectives()) {
       addSource(part.name(), Kind.OBJECTIVE, coding.overBits(part.terms().times(sign)), 1);
     }
-    addCodes();
+    int objectives = sources.size();
     for (Rule rule : statement.rules()) {
       addRule(rule);
     }
+    List<Source> ofRules = takeFrom(sources, objectives);
+    List<Weight> weightsOfRules = takeFrom(weights, 0);
+    addCodes();
+    sources.addAll(ofRules);
+    weights.addAll(weightsOfRules);
     List<Source> quadratic = DegreeReduction.of(List.copyOf(sources), settings.aim(), bits);
     sources.clear();
     sources.addAll(quadratic);
     return new Lowered(
         statement, qubo(), coding, bits, ledger(), List.copyOf(weights), structure());
+  }
+
+  /** Codes come before rules, but are weighed after them. */
+  private static <T> List<T> takeFrom(List<T> list, int from) {
+    List<T> tail = list.subList(from, list.size());
+    List<T> taken = new ArrayList<>(tail);
+    tail.clear();
+    return taken;
   }
 
   /** Sources were made while bits were still being added: all are brought to the final number. */
@@ -78,7 +96,7 @@ final class Assembly {
       }
       Penalty penalty = Penalty.sum(penalties, bits.size());
       if (penalty.terms().terms() > 0) {
-        addPenalty(decision.code(), Kind.CODE, penalty);
+        addPenalty(decision.code(), Kind.CODE, penalty, below.getOrDefault(decision, 0.0));
       }
     }
   }
@@ -88,16 +106,29 @@ final class Assembly {
       weights.add(new Weight(rule.name(), "nothing", 0, "every plan keeps it"));
     } else if (rule.required()) {
       List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits, settings.aim());
-      addPenalty(rule.name(), Kind.PENALTY, Penalty.sum(penalties, bits.size()));
+      Penalty penalty = Penalty.sum(penalties, bits.size());
+      double weight = addPenalty(rule.name(), Kind.PENALTY, penalty, 0);
+      if (penalty.lowest() < 0) {
+        for (Decision decision : coding.codedIn(penalty.terms())) {
+          below.merge(decision, weight * penalty.lowest(), Double::sum);
+        }
+      }
     } else {
       addPreferred(rule);
     }
   }
 
-  private void addPenalty(String name, Kind kind, Penalty penalty) {
-    Weights.Chosen chosen = settings.choose(new Weights.Facts(name, statement, objective, whole));
-    weights.add(new Weight(name, penalty.form(), chosen.value(), chosen.reason()));
+  /** Returns the weight; what it guards may let other penalties go so far below 0. */
+  private double addPenalty(String name, Kind kind, Penalty penalty, double othersBelow) {
+    Range guarded = new Range(objective.lowest() + othersBelow, objective.highest());
+    Weights.Chosen chosen = settings.choose(new Weights.Facts(name, statement, guarded, whole));
+    String reason =
+        othersBelow == 0
+            ? chosen.reason()
+            : chosen.reason() + "; of that " + Weights.shown(-othersBelow) + " by rules";
+    weights.add(new Weight(name, penalty.form(), chosen.value(), reason));
     addSource(name, kind, penalty.terms(), chosen.value());
+    return chosen.value();
   }
 
   private void addPreferred(Rule rule) {

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -19,8 +20,8 @@ import java.util.Set;
  *
  * <p>Invariant: {@code bitOf[literal]} is the bit that is 1 exactly where the literal holds, or -1
  * if there is none; then {@code over[literal]} is the literal as a polynomial over all decision
- * bits. {@code start[literal]} is where the bits of the literal's decision begin. Immutable once
- * made.
+ * bits. {@code start[literal]} is where the bits of the literal's decision begin, {@code
+ * codeOf[bit]} which of the codes a bit is of, or -1. Immutable once made.
  */
 final class Coding {
   /** The literals {@code first ..} in code, their bits beginning at {@code bit}. */
@@ -32,6 +33,7 @@ final class Coding {
   private final int[] bitOf;
   private final int[] start;
   private final Polynomial[] over;
+  private final int[] codeOf;
   private final boolean sameNumbers;
 
   Coding(Statement statement, Lowering settings) {
@@ -50,6 +52,12 @@ final class Coding {
     }
     this.sameNumbers = same;
     coded.forEach(this::spread);
+    this.codeOf = new int[meanings.size()];
+    Arrays.fill(codeOf, -1);
+    for (int c = 0; c < coded.size(); c++) {
+      Coded one = coded.get(c);
+      Arrays.fill(codeOf, one.bit(), one.bit() + one.code().bits(), c);
+    }
   }
 
   private void allot(Decision decision, Lowering settings, Map<Integer, Code> codes) {
@@ -154,6 +162,32 @@ final class Coding {
       }
     }
     return sets;
+  }
+
+  /** Whether all literals of a polynomial are bits. */
+  boolean ofBits(Polynomial literals) {
+    boolean[] plain = {true};
+    literals.forEachTerm(
+        (coefficient, product) -> {
+          for (int literal : product) {
+            plain[0] &= bitOf[literal] >= 0;
+          }
+        });
+    return plain[0];
+  }
+
+  /**
+   * The decisions, each once, of which a polynomial over bits has bits that are not all literals.
+   */
+  Set<Decision> codedIn(Polynomial bits) {
+    Set<Decision> decisions = new LinkedHashSet<>();
+    for (int bit : Terms.variables(bits)) {
+      int at = bit < bits() ? codeOf[bit] : -1;
+      if (at >= 0 && !isPlain(coded.get(at))) {
+        decisions.add(coded.get(at).decision());
+      }
+    }
+    return decisions;
   }
 
   /** A polynomial over literals as one over decision bits. */

@@ -19,15 +19,32 @@ record Limits(Polynomial terms, double lowest, double highest, double step, Rang
    * The limits of a required rule, divided by the coefficients' common factor and rounded inwards.
    */
   static Limits tightened(Part part, Coding coding) {
+    return divided(part).over(coding).withoutImplied();
+  }
+
+  /** The same over literals instead of bits. */
+  static Limits overLiterals(Part part) {
+    return divided(part).withoutImplied();
+  }
+
+  /** The limits of a preferred rule, as they are: rounding would change the amount of a miss. */
+  static Limits exact(Part part, Coding coding) {
+    return asStated(part).over(coding).withoutImplied();
+  }
+
+  private static Limits asStated(Part part) {
+    return new Limits(part.terms(), part.lowest(), part.highest(), part.step(), part.range());
+  }
+
+  private static Limits divided(Part part) {
     double divisor = part.divisor();
     if (divisor <= 1 || part.step() > 1) {
-      return exact(part, coding);
+      return asStated(part);
     }
     Polynomial.Builder divided = Polynomial.builder(part.terms().size());
     part.terms()
         .forEachTerm((coefficient, literals) -> divided.add(coefficient / divisor, literals));
-    return over(
-        coding,
+    return new Limits(
         divided.build(),
         Math.ceil(part.lowest() / divisor),
         Math.floor(part.highest() / divisor),
@@ -37,25 +54,21 @@ record Limits(Polynomial terms, double lowest, double highest, double step, Rang
             Math.floor(part.range().highest() / divisor)));
   }
 
-  /** The limits of a preferred rule, as they are: rounding would change the amount of a miss. */
-  static Limits exact(Part part, Coding coding) {
-    return over(coding, part.terms(), part.lowest(), part.highest(), part.step(), part.range());
-  }
-
-  /** Over bits, the constants that literals bring along moved into the limits. */
-  private static Limits over(
-      Coding coding, Polynomial terms, double lowest, double highest, double step, Range range) {
+  /** From literals to bits, the constants that literals bring along moved into the limits. */
+  private Limits over(Coding coding) {
     Polynomial bits = coding.overBits(terms);
     double constant = bits.constant();
     if (constant != 0) {
       bits = Polynomial.builder(bits.size()).add(bits, 1).add(-constant).build();
     }
     Range moved = new Range(range.lowest() - constant, range.highest() - constant);
-    Limits limits = new Limits(bits, lowest - constant, highest - constant, step, moved);
-    return step > 1 ? limits : limits.withoutImplied();
+    return new Limits(bits, lowest - constant, highest - constant, step, moved);
   }
 
   private Limits withoutImplied() {
+    if (step > 1) {
+      return this;
+    }
     return new Limits(
         terms,
         lowest <= range.lowest() ? Double.NEGATIVE_INFINITY : lowest,

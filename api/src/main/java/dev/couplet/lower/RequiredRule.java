@@ -1,10 +1,20 @@
 package dev.couplet.lower;
 
+import dev.couplet.form.Polynomial;
 import dev.couplet.model.Rule;
 import java.util.List;
 import java.util.Optional;
 
-/** Chooses the penalties of a required rule's parts: the forms with fewest auxiliary bits first. */
+/**
+ * Chooses the penalties of a required rule's parts: the forms with fewest auxiliary bits first; of
+ * those without any, forms over bits before those over literals.
+ *
+ * <p>A form over literals is written over bits with the polynomials of its literals in their place:
+ * {@code (u1 - u2) (v2 - v3)} for two options of domain walls that exclude each other. Where the
+ * bits stand for a plan, literals are 0 or 1 and the form is worth what it is worth over literals.
+ * Where they break a code a literal may be -1, and the form below 0: the weights of the codes make
+ * up for that.
+ */
 final class RequiredRule {
   private RequiredRule() {}
 
@@ -12,15 +22,37 @@ final class RequiredRule {
   static List<Penalty> penalties(Rule rule, Coding coding, BitTable bits, Aim aim) {
     return rule.parts().stream()
         .filter(part -> !part.alwaysKept())
-        .map(part -> penalty(Limits.tightened(part, coding), rule.name(), bits, aim))
+        .map(part -> penalty(part, rule.name(), coding, bits, aim))
         .toList();
   }
 
-  private static Penalty penalty(Limits limits, String rule, BitTable bits, Aim aim) {
+  private static Penalty penalty(
+      Rule.Part part, String rule, Coding coding, BitTable bits, Aim aim) {
+    Limits limits = Limits.tightened(part, coding);
     Optional<Penalty> exact =
-        TwoBitForm.of(limits, bits.size())
-            .or(() -> ConflictForm.of(limits, bits.size()))
+        exact(limits, bits.size())
+            .or(() -> overLiterals(part, coding, bits.size()))
             .or(() -> ClauseForm.of(limits, rule, bits, aim));
     return exact.orElseGet(() -> SquareForm.of(limits, rule, bits));
+  }
+
+  private static Optional<Penalty> exact(Limits limits, int size) {
+    return TwoBitForm.of(limits, size).or(() -> ConflictForm.of(limits, size));
+  }
+
+  /** Of degree 2, where some literals are no bits. */
+  private static Optional<Penalty> overLiterals(Rule.Part part, Coding coding, int size) {
+    if (coding.ofBits(part.terms())) {
+      return Optional.empty();
+    }
+    return exact(Limits.overLiterals(part), part.terms().size())
+        .map(penalty -> overBits(penalty, coding, size))
+        .filter(penalty -> penalty.terms().degree() <= 2);
+  }
+
+  private static Penalty overBits(Penalty penalty, Coding coding, int size) {
+    Polynomial terms = coding.overBits(penalty.terms());
+    double lowest = Math.min(0, Terms.lowest(terms));
+    return new Penalty(terms.inVariables(size), lowest, penalty.form() + ", over literals");
   }
 }

@@ -8,9 +8,12 @@ import java.util.Locale;
 /**
  * A way to choose the weight of a rule's penalty.
  *
- * <p>Every penalty is zero where its rule is kept and at least 1 where it is broken. A weight is
- * enough if breaking the rule never pays; it should be no larger, since heavy weights make a form
- * hard to sample and coefficients hard to represent. Implementations are immutable.
+ * <p>Every penalty is zero where its rule is kept and at least 1 where it is broken, and nowhere
+ * below 0 on a plan. On patterns that stand for no plan, since they break the code of a choice, a
+ * rule over options may go below 0: the code is then weighed after the rule, as if the objective
+ * could win so much more there. A weight is enough if breaking the rule never pays; it should be no
+ * larger, since heavy weights make a form hard to sample and coefficients hard to represent.
+ * Implementations are immutable.
  */
 @FunctionalInterface
 public interface Weights {
@@ -20,7 +23,8 @@ public interface Weights {
    * @param rule the rule's name, or words that name a choice's code
    * @param statement what is lowered
    * @param objective everything that is minimised beside the penalties: its lowest value over all
-   *     bit patterns, broken codes included, and its highest under any plan
+   *     bit patterns, broken codes included, and its highest under any plan; for the weight of a
+   *     code, lower by what the weighted penalties of rules over its options can be below 0
    * @param whole whether the objective has whole coefficients only
    */
   record Facts(String rule, Statement statement, Range objective, boolean whole) {}

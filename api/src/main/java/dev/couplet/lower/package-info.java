@@ -18,8 +18,13 @@
  * with {@code SharedPairs}, each bit held to its product by a {@code Tie}.
  *
  * <p>Every penalty is zero, for the best values of its auxiliary bits, where its rule is kept, and
- * at least 1 elsewhere, broken codes included: so a weight above the objective's whole range
- * suffices.
+ * at least 1 under every plan that breaks it: so a weight above the objective's whole range
+ * suffices, as long as no penalty is below 0 anywhere. Penalties over bits never are. A penalty
+ * written over options whose code is not one bit an option ({@code RequiredRule}) can be where the
+ * code is broken, and only there. Let w be the weight of such a rule and -b the lowest that its
+ * penalty can be; let the weight of each code whose bits it has be more than the objective's range
+ * plus the sum of w b over all such rules. A pattern that breaks some codes gains at most w b by
+ * each rule that has bits of one of them, and pays each code broken: so it lies above every plan.
  */
 @NullMarked
 package dev.couplet.lower;

@@ -1,15 +1,24 @@
 package dev.couplet.lower;
 
+import static dev.couplet.model.Expr.sum;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.audit.LoweringAudit;
 import dev.couplet.audit.RandomModels;
 import dev.couplet.audit.RandomModels.Regime;
+import dev.couplet.form.Polynomial;
 import dev.couplet.form.Qubo;
 import dev.couplet.form.State;
+import dev.couplet.lower.Lowered.Weight;
+import dev.couplet.model.Choice;
+import dev.couplet.model.Literal;
 import dev.couplet.model.Model;
+import dev.couplet.model.Plan;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.SplittableRandom;
 import java.util.stream.IntStream;
 import net.jqwik.api.Example;
 import net.jqwik.api.ForAll;
@@ -29,6 +38,94 @@ class ChoiceEncodingProperties {
         LoweringAudit.exhaustive(lowered).orThrow();
       }
     }
+  }
+
+  /**
+   * All different, implications and exclusions over options: penalties over literals, which broken
+   * walls can take below 0. By any way to choose weights.
+   */
+  @Property(tries = 60)
+  void rulesAmongOptionsAreFaithfulInEveryCode(@ForAll long seed) {
+    SplittableRandom random = new SplittableRandom(seed);
+    Model model = Model.named("options");
+    List<Choice<Integer>> choices = new ArrayList<>();
+    int room = 3 + random.nextInt(8);
+    while (room > 1) {
+      int options = 2 + random.nextInt(Math.min(4, room) - 1);
+      room -= options;
+      List<Integer> values = IntStream.range(0, options).boxed().toList();
+      choices.add(model.choice("c" + choices.size(), values));
+    }
+    Plan.Draft draft = model.plan();
+    for (Choice<Integer> choice : choices) {
+      int option = random.nextInt(choice.options().size());
+      draft.set(choice, option);
+    }
+    Plan kept = draft.evaluate();
+    for (int rule = 0; rule < 3; rule++) {
+      addRule(model, "rule " + rule, choices, kept, random);
+    }
+    for (Choice<Integer> choice : choices) {
+      for (int option : choice.options()) {
+        String name = "gain of " + choice + " " + option;
+        model.minimize(name, choice.is(option).times(random.nextInt(-5, 6)));
+      }
+    }
+    for (ChoiceEncoding encoding : ALL) {
+      Lowering by = Lowering.standard().with(encoding);
+      LoweringAudit.exhaustive(by.lower(model)).orThrow();
+      Plan known = model.snapshot().plan(kept.literals());
+      LoweringAudit.exhaustive(by.with(Weights.incumbentBound(known)).lower(model)).orThrow();
+    }
+  }
+
+  private static void addRule(
+      Model model, String name, List<Choice<Integer>> choices, Plan kept, SplittableRandom random) {
+    List<Literal> some = new ArrayList<>();
+    for (Choice<Integer> choice : choices) {
+      some.add(choice.is(random.nextInt(choice.options().size())));
+      if (random.nextInt(3) == 0) {
+        some.add(choice.is(random.nextInt(choice.options().size())));
+      }
+    }
+    List<Literal> literals = some.stream().distinct().toList();
+    long held = literals.stream().filter(kept::holds).count();
+    Literal first = literals.get(0);
+    Literal last = literals.get(literals.size() - 1);
+    switch (random.nextInt(4)) {
+      case 0 -> model.require(name, sum(literals).atMost(Math.max(1, held)));
+      case 1 -> model.require(name, sum(literals).atLeast(Math.min(held, literals.size() - 1)));
+      case 2 -> {
+        if (!kept.holds(first) || kept.holds(last)) {
+          model.require(name, first.implies(last));
+        }
+      }
+      default -> model.require(name, sum(literals).exactly(held));
+    }
+  }
+
+  /** By hand: two options of walls exclude each other by the product of their literals. */
+  @Example
+  void exclusionOfTwoOptionsTakesNoAuxiliaryBit() {
+    Model model = Model.named("apart");
+    Choice<Integer> a = model.choice("a", List.of(0, 1, 2));
+    Choice<Integer> b = model.choice("b", List.of(0, 1, 2));
+    model.require("apart", a.is(1).plus(b.is(1)).atMost(1));
+    Lowering walls = Lowering.standard().with(ChoiceEncoding.domainWall());
+    Lowered lowered = walls.lower(model);
+    assertEquals(0, lowered.auxiliaryBits());
+    // (a0 - a1) (b0 - b1) with weight 1, and for both codes a wall too many, 1 + 1 * 2.
+    assertEquals(List.of(3.0, 3.0, 1.0), lowered.weights().stream().map(Weight::value).toList());
+    Polynomial.Builder expected = Polynomial.builder(4).add(1, 0, 2).add(-1, 0, 3);
+    expected.add(-1, 1, 2).add(1, 1, 3).add(3, 1).add(-3, 0, 1).add(3, 3).add(-3, 2, 3);
+    assertEquals(expected.build(), lowered.qubo().toPolynomial());
+    assertTrue(lowered.weights().get(0).reason().endsWith("; of that 2 by rules"));
+    // By 1 each pattern with one wall too many may win: a code of weight 1 or less is too light.
+    LoweringAudit.exhaustive(lowered).orThrow();
+    Lowered light = walls.weight("one option of 'a'", 1).lower(model);
+    assertFalse(LoweringAudit.exhaustive(light).passed());
+    assertTrue(
+        LoweringAudit.exhaustive(walls.weight("one option of 'a'", 1.5).lower(model)).passed());
   }
 
   /** Every pattern stands for one option at the penalty 0, or for none at 1 or more. */

@@ -150,7 +150,7 @@ class LoweringTest {
     refused(() -> Weights.fixed(-1), "-1");
     refused(() -> Weights.fixed(Double.POSITIVE_INFINITY), "Infinity");
     Lowering broken = Lowering.standard().with(facts -> new Weights.Chosen(Double.NaN, "none"));
-    refused(() -> broken.lower(model), "NaN", "one option of 'van'");
+    refused(() -> broken.lower(model), "NaN", "'r'");
     Lowered code = Lowering.standard().weight("one option of 'van'", 77).lower(model);
     assertEquals(77, code.weights().get(0).value());
   }
