@@ -95,6 +95,8 @@ final class ConflictForm {
     if (b.negated()) {
       sum.add(a.sign(), a.variable());
     }
-    sum.add(a.negated() && b.negated() ? 1 : 0);
+    if (a.negated() && b.negated()) {
+      sum.add(1);
+    }
   }
 }

@@ -12,9 +12,15 @@ import java.util.function.IntPredicate;
  * >= 1} is 1 - x - y + xy, {@code x <= y} is x - xy, {@code x = y} is x + y - 2xy.
  */
 final class TwoBitForm {
+  /** Two bits make no more products than these: none of them, either, both. */
+  private static final int MOST_TERMS = 4;
+
   private TwoBitForm() {}
 
   static Optional<Penalty> of(Limits limits, int size) {
+    if (limits.terms().terms() > MOST_TERMS) {
+      return Optional.empty();
+    }
     int[] variables = Terms.variables(limits.terms());
     if (variables.length == 0 || variables.length > 2) {
       return Optional.empty();

@@ -260,7 +260,11 @@ public final class Model {
     for (Condition.Part part : condition.parts()) {
       requireOwner(part.expr(), this);
       ScaledCondition scaled = ScaledCondition.of(ruleName, part, decisionOfLiteral.size());
-      Range range = Ranges.of(scaled.terms(), decisionOfLiteral::get);
+      Range range =
+          Ranges.of(
+              scaled.terms(),
+              literal -> Slot.of(decisionOf(literal)).groups() > 0,
+              decisionOfLiteral::get);
       parts.add(new Rule.Part(scaled, price.orElse(Rule.Price.NONE), range));
     }
     return new Rule(ruleName, price, parts);

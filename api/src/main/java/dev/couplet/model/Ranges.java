@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.IntFunction;
+import java.util.function.IntPredicate;
 
 /**
  * Bounds what a polynomial over literals can be worth when every choice is exactly one of its
@@ -25,6 +26,7 @@ final class Ranges {
     long combinations;
   }
 
+  private final IntPredicate grouped;
   private final IntFunction<Decision> decisionOf;
   private final Map<List<Integer>, Group> groups = new LinkedHashMap<>();
   private double lowest;
@@ -33,31 +35,46 @@ final class Ranges {
   private boolean whole = true;
   private long terms;
 
-  private Ranges(IntFunction<Decision> decisionOf) {
+  private Ranges(IntPredicate grouped, IntFunction<Decision> decisionOf) {
+    this.grouped = grouped;
     this.decisionOf = decisionOf;
   }
 
-  /** The range of a polynomial over literals; {@code decisionOf} maps each to its decision. */
-  static Range of(Polynomial polynomial, IntFunction<Decision> decisionOf) {
-    Ranges ranges = new Ranges(decisionOf);
+  /**
+   * The range of a polynomial over literals.
+   *
+   * @param grouped whether exactly one of a group that a literal belongs to holds
+   * @param decisionOf the decision that a literal belongs to
+   */
+  static Range of(Polynomial polynomial, IntPredicate grouped, IntFunction<Decision> decisionOf) {
+    Ranges ranges = new Ranges(grouped, decisionOf);
     polynomial.forEachTerm(ranges::take);
     ranges.groups.values().forEach(ranges::close);
-    return ranges.outward();
+    return outward(ranges.lowest, ranges.highest, ranges.whole, ranges.magnitude, ranges.terms);
+  }
+
+  /** The range of a polynomial over literals of which every pattern is a plan. */
+  static Range ofFree(Polynomial polynomial) {
+    return outward(
+        polynomial.lowest(),
+        polynomial.highest(),
+        polynomial.whole(),
+        polynomial.magnitude(),
+        polynomial.terms());
   }
 
   private void take(double coefficient, int[] literals) {
     magnitude += Math.abs(coefficient);
     whole &= coefficient == Math.rint(coefficient);
     terms++;
-    boolean ofBits = true;
+    boolean free = true;
     for (int literal : literals) {
-      Decision decision = decisionOf.apply(literal);
-      ofBits &= decision instanceof Bit || Slot.of(decision).groups() == 0;
+      free &= !grouped.test(literal);
     }
     if (literals.length == 0) {
       lowest += coefficient;
       highest += coefficient;
-    } else if (ofBits) {
+    } else if (free) {
       lowest += Math.min(0, coefficient);
       highest += Math.max(0, coefficient);
     } else if (possible(literals)) {
@@ -108,7 +125,8 @@ final class Ranges {
   /**
    * Whole numbers below 2^51 were added without rounding; other sums are widened by their error.
    */
-  private Range outward() {
+  private static Range outward(
+      double lowest, double highest, boolean whole, double magnitude, long terms) {
     if (whole && magnitude < 0x1p51) {
       return new Range(lowest, highest);
     }

@@ -223,6 +223,9 @@ public final class Rule {
      * misses of 0.1, at a cost of 10 each unit, cost 10.
      */
     public double cost(double violation) {
+      if (violation == 0 || price.perUnit() == 0) {
+        return 0;
+      }
       BigDecimal amount = new BigDecimal(violation).multiply(condition.unit());
       BigDecimal counted = price.squared() ? amount.multiply(amount) : amount;
       return counted.multiply(Text.decimal(price.perUnit())).doubleValue();

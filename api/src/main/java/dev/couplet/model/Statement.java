@@ -4,6 +4,7 @@ import dev.couplet.form.CheckReturnValue;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.List;
 import java.util.Set;
 import java.util.stream.IntStream;
@@ -59,6 +60,7 @@ public final class Statement {
   private final Model owner;
   private final List<Decision> decisions;
   private final Decision[] decisionOf;
+  private final BitSet grouped;
   private final List<Rule> rules;
   private final List<Objective> objectives;
   private final Sense sense;
@@ -73,6 +75,7 @@ public final class Statement {
     this.owner = owner;
     this.decisions = List.copyOf(decisions);
     this.decisionOf = decisionOf(decisions);
+    this.grouped = grouped(decisions);
     int literals = decisionOf.length;
     this.rules = rules.stream().map(rule -> rule.inLiterals(literals)).toList();
     this.objectives = objectives.stream().map(part -> part.inLiterals(literals)).toList();
@@ -98,6 +101,18 @@ public final class Statement {
       }
     }
     return owners.toArray(new Decision[0]);
+  }
+
+  /** The literals that belong to a group of which exactly one holds. */
+  private static BitSet grouped(List<Decision> decisions) {
+    BitSet grouped = new BitSet();
+    for (Decision decision : decisions) {
+      Slot slot = Slot.of(decision);
+      if (slot.groups() > 0) {
+        grouped.set(slot.first(), slot.first() + slot.literals());
+      }
+    }
+    return grouped;
   }
 
   /** The model's name. */
@@ -178,7 +193,9 @@ public final class Statement {
    * polynomials with whole coefficients, else a range that holds; linear in its terms.
    */
   public Range range(Polynomial polynomial) {
-    return Ranges.of(polynomial, this::decisionOf);
+    return grouped.isEmpty()
+        ? Ranges.ofFree(polynomial)
+        : Ranges.of(polynomial, grouped::get, this::decisionOf);
   }
 
   /** Begins a plan by hand. */
