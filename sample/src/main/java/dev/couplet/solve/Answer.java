@@ -1,10 +1,12 @@
 package dev.couplet.solve;
 
+import dev.couplet.exact.plans.Conflict;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement.Sense;
 import dev.couplet.sampling.End;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /**
  * What a solver returns: the best plan it found, how good it is, and how good any plan can be.
@@ -18,13 +20,21 @@ public final class Answer {
   private final double bound;
   private final Proof proof;
   private final End end;
+  private final Optional<Conflict> conflict;
   private final List<Stage> stages;
 
-  Answer(Plan plan, double bound, Proof proof, End end, List<Stage> stages) {
+  Answer(
+      Plan plan,
+      double bound,
+      Proof proof,
+      End end,
+      Optional<Conflict> conflict,
+      List<Stage> stages) {
     this.plan = plan;
     this.bound = bound;
     this.proof = proof;
     this.end = end;
+    this.conflict = conflict;
     this.stages = List.copyOf(stages);
   }
 
@@ -64,6 +74,14 @@ public final class Answer {
   /** Why the run ended. */
   public End end() {
     return end;
+  }
+
+  /**
+   * Required rules that cannot hold together, as few as could be found with the effort; nothing
+   * unless it is proved that no plan keeps all rules, and not always then.
+   */
+  public Optional<Conflict> conflict() {
+    return conflict;
   }
 
   /** What each stage did, in order. */

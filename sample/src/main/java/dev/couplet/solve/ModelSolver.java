@@ -1,6 +1,7 @@
 package dev.couplet.solve;
 
 import dev.couplet.exact.PlanEnumeration.Found;
+import dev.couplet.exact.plans.Conflict;
 import dev.couplet.exact.plans.PlanSearch;
 import dev.couplet.form.State;
 import dev.couplet.lower.Lowered;
@@ -139,11 +140,13 @@ final class ModelSolver {
     OptionalDouble target = course.effort().target();
     if (!plan.feasible()) {
       double beyondAll = sign * Double.POSITIVE_INFINITY;
-      return new Answer(plan, beyondAll, Proof.INFEASIBLE, end, course.stages());
+      Optional<Conflict> conflict = ConflictStage.run(statement, course);
+      return new Answer(plan, beyondAll, Proof.INFEASIBLE, end, conflict, course.stages());
     }
     double bound = Math.min(lowest, sign * plan.value());
     End why = target.isPresent() && ended() == End.TARGET ? End.TARGET : end;
-    return new Answer(plan, sign * bound + 0.0, Proof.OPTIMAL, why, course.stages());
+    return new Answer(
+        plan, sign * bound + 0.0, Proof.OPTIMAL, why, Optional.empty(), course.stages());
   }
 
   private Answer answer(End end) {
@@ -152,6 +155,6 @@ final class ModelSolver {
     boolean optimal = plan.feasible() && cost <= lowest;
     double bound = plan.feasible() ? Math.min(lowest, cost) : lowest;
     Proof proof = optimal ? Proof.OPTIMAL : Proof.NONE;
-    return new Answer(plan, sign * bound + 0.0, proof, end, course.stages());
+    return new Answer(plan, sign * bound + 0.0, proof, end, Optional.empty(), course.stages());
   }
 }

@@ -39,6 +39,7 @@ final class SearchStage {
             .orElse("no plan, ");
     String bound =
         found.complete() ? "proved" : String.format(Locale.ROOT, "bound %.12g", found.bound());
-    return value + bound + ", " + found.nodes() + " nodes";
+    String alike = found.alike().isEmpty() ? "" : ", alike: " + String.join("; ", found.alike());
+    return value + bound + ", " + found.nodes() + " nodes" + alike;
   }
 }

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.couplet.exact.plans.Conflict;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
 import dev.couplet.model.Bit;
@@ -66,11 +67,37 @@ class SolverTest {
     model.require("x1 or x2", x.get(0).plus(x.get(1)).atLeast(1));
     model.require("not x1", x.get(0).isFalse());
     model.require("not x2", x.get(1).isFalse());
+    model.require("x3 where x1", x.get(0).implies(x.get(2)));
     Answer answer = Solver.standard().solve(model, COUNTED);
     assertEquals(Proof.INFEASIBLE, answer.proof());
     assertFalse(answer.plan().feasible());
     assertEquals(Double.POSITIVE_INFINITY, answer.gap());
     assertEquals(Double.POSITIVE_INFINITY, answer.bound(), "no value at all is reachable");
+    Conflict conflict = answer.conflict().orElseThrow();
+    assertEquals(List.of("x1 or x2", "not x1", "not x2"), conflict.rules());
+    assertTrue(conflict.minimal());
+  }
+
+  @Test
+  void tellsThatVansAreAlike() {
+    Model model = Model.named("vans");
+    List<Integer> villages = IntStream.range(0, 14).boxed().toList();
+    Family<Integer, Choice<String>> vanOf =
+        model.choices("van for", villages, List.of("red", "blue", "large", "green"));
+    List<Expr> parts = new ArrayList<>();
+    for (String van : List.of("red", "blue", "large", "green")) {
+      Expr load = sum(villages, v -> vanOf.of(v).is(van).times(1 + v % 3));
+      model.require("load of " + van, load.atMost(van.equals("large") ? 12 : 8));
+      for (int v : villages) {
+        for (int w = 0; w < v; w++) {
+          parts.add(vanOf.of(v).is(van).times(vanOf.of(w).is(van)).times((v * w) % 5));
+        }
+      }
+    }
+    model.minimize("distance", sum(parts));
+    Answer answer = Solver.standard().solve(model, COUNTED);
+    String search = answer.stages().get(0).outcome();
+    assertTrue(search.endsWith("alike: red, blue, green"), search);
   }
 
   @Test

@@ -82,9 +82,6 @@ final class Best {
   }
 
   private void take(Plan better, long itsCost) {
-    if (!better.feasible()) {
-      throw new IllegalStateException("a search keeps rules that its plan does not: " + better);
-    }
     plan = Optional.of(better);
     cost = itsCost;
     int sign = statement.sense().sign();

@@ -2,6 +2,7 @@ package dev.couplet.exact.plans;
 
 import dev.couplet.sampling.Vigil;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -17,6 +18,7 @@ import java.util.OptionalDouble;
 final class Branching {
   private final Network network;
   private final Variables variables;
+  private final Interchange interchange;
   private final Propagation propagation;
   private final Sweeps sweeps;
   private final Rests rests;
@@ -33,8 +35,9 @@ final class Branching {
     int next;
   }
 
-  Branching(Network network, Best best, Vigil vigil) {
+  Branching(Network network, Interchange interchange, Best best, Vigil vigil) {
     this.network = network;
+    this.interchange = interchange;
     this.variables = network.variables;
     this.best = best;
     this.vigil = vigil;
@@ -178,7 +181,7 @@ final class Branching {
         }
       }
     }
-    node.values = values(partial, chosen);
+    node.values = values(depth, chosen);
     node.next = 0;
   }
 
@@ -201,12 +204,14 @@ final class Branching {
     return second - least;
   }
 
-  /** The values to try, cheapest first. */
-  private int[] values(Partial partial, int variable) {
+  /** The values to try, cheapest first; of options that are alike and not taken yet, one. */
+  private int[] values(int depth, int variable) {
+    Partial partial = path.get(depth).partial;
+    int[] taken = taken(depth);
     int[] values = new int[partial.choices[variable]];
     int count = 0;
     for (int v = variables.first(variable); v < variables.end(variable); v++) {
-      if (partial.left[v]) {
+      if (partial.left[v] && !interchange.likeAnother(v, values, count, taken)) {
         int at = count++;
         for (; at > 0 && partial.costs[values[at - 1]] > partial.costs[v]; at--) {
           values[at] = values[at - 1];
@@ -214,7 +219,16 @@ final class Branching {
         values[at] = v;
       }
     }
-    return values;
+    return Arrays.copyOf(values, count);
+  }
+
+  /** The values taken on the way to a depth. */
+  private int[] taken(int depth) {
+    int[] taken = new int[depth];
+    for (int d = 0; d < depth; d++) {
+      taken[d] = path.get(d).values[path.get(d).next - 1];
+    }
+    return taken;
   }
 
   /** The lowest bound among the values not tried at this depth and above. */

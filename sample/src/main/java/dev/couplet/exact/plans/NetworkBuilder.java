@@ -1,6 +1,7 @@
 package dev.couplet.exact.plans;
 
 import dev.couplet.exact.plans.Terms.Term;
+import dev.couplet.form.Polynomial;
 import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;
 import java.math.BigDecimal;
@@ -30,6 +31,7 @@ final class NetworkBuilder {
   }
 
   private final Statement statement;
+  private final Polynomial objective;
   private final List<Asked> asked;
   private final Variables plain;
   private final Terms terms;
@@ -40,8 +42,9 @@ final class NetworkBuilder {
   private long constant;
   private long grain;
 
-  private NetworkBuilder(Statement statement, Predicate<Rule> kept) {
+  private NetworkBuilder(Statement statement, Polynomial objective, Predicate<Rule> kept) {
     this.statement = statement;
+    this.objective = objective;
     this.asked = asked(statement, kept);
     this.plain = Variables.of(statement, 0);
     this.variables = plain;
@@ -62,17 +65,24 @@ final class NetworkBuilder {
 
   /** The network of a statement with those of its rules that are kept. */
   static Network of(Statement statement, Predicate<Rule> kept) {
-    return new NetworkBuilder(statement, kept).network();
+    Polynomial objective = statement.objective().times(statement.sense().sign());
+    return new NetworkBuilder(statement, objective, kept).network();
+  }
+
+  /** The network of some rules of a statement, without its objective. */
+  static Network ofRules(Statement statement, Predicate<Rule> kept) {
+    Polynomial nothing = Polynomial.builder(statement.literals()).build();
+    return new NetworkBuilder(statement, nothing, kept).network();
   }
 
   private Network network() {
-    List<Term> objective = terms.of(statement.objective().times(statement.sense().sign()), 2);
+    List<Term> costly = terms.of(objective, 2);
     List<List<Term>> sums = asked.stream().map(one -> terms.of(one.part().terms(), 1)).toList();
     List<List<Integer>> products = terms.products();
     variables = Variables.of(statement, products.size());
     costs = new long[variables.values()];
-    Scale scale = scale(objective);
-    objective.forEach(term -> addCost(term, scale));
+    Scale scale = scale(costly);
+    costly.forEach(term -> addCost(term, scale));
     for (int r = 0; r < asked.size(); r++) {
       addRow(asked.get(r), sums.get(r), scale);
     }
@@ -83,10 +93,10 @@ final class NetworkBuilder {
     return new Network(variables, scale, constant, costs, pairs, rows, grain);
   }
 
-  private Scale scale(List<Term> objective) {
+  private Scale scale(List<Term> costly) {
     List<BigDecimal> units = new ArrayList<>();
     BigDecimal magnitude = BigDecimal.ZERO;
-    for (Term term : objective) {
+    for (Term term : costly) {
       BigDecimal cost = Scale.decimal(term.coefficient());
       units.add(cost);
       magnitude = magnitude.add(cost.abs());

@@ -6,6 +6,7 @@ import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
 import dev.couplet.sampling.Vigil;
 import dev.couplet.sampling.Watch;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -16,6 +17,9 @@ import java.util.Optional;
  * costs of the rest give a bound by soft arc consistency and Lagrangian multipliers (see the
  * package), and values beyond the best plan known are left out. A search for a first plan comes
  * before the multipliers.
+ *
+ * <p>Options that all choices, rules and objectives treat alike, such as equal vans, are tried once
+ * for all until they are taken.
  *
  * <p>Costs are compared in exact whole numbers; decimals count as they are written. Only where an
  * objective has so many digits that it cannot be scaled, costs are rounded down in the 13th or so;
@@ -62,9 +66,16 @@ public final class PlanSearch {
    *     nothing is known, and on the other side if it is proved that there is none
    * @param complete whether it is proved that there is no better plan, or none at all
    * @param nodes how many values were taken
+   * @param alike options that are treated alike, of which one was tried for all; a class a text
    * @param end why the search ended; done if it came to its end or to the last node it may take
    */
-  public record Found(Optional<Plan> best, double bound, boolean complete, long nodes, End end) {}
+  public record Found(
+      Optional<Plan> best,
+      double bound,
+      boolean complete,
+      long nodes,
+      List<String> alike,
+      End end) {}
 
   /** Whether a statement is small enough for the memory that a search takes. */
   public boolean fits(Statement statement) {
@@ -78,17 +89,44 @@ public final class PlanSearch {
    * @throws IllegalArgumentException if the statement is too large, see {@link #fits}
    */
   public Found search(Statement statement, Optional<Plan> start, Effort effort, Watch watch) {
-    if (!fits(statement)) {
-      throw new IllegalArgumentException(
-          statement + " is too large for a search of its plans; ask fits first");
-    }
+    requireFit(statement);
     Vigil vigil = Vigil.begin(effort, watch);
     Network network = NetworkBuilder.of(statement, rule -> true);
     Best best = new Best(statement, network, effort.target(), vigil);
     start.ifPresent(best::start);
-    Branching branching = new Branching(network, best, vigil);
+    Interchange interchange = Likeness.of(statement, rule -> true, network.variables);
+    Branching branching = new Branching(network, interchange, best, vigil);
     long bound = bound(network, branching, best, vigil);
-    return found(statement, network, best, bound, branching.nodes(), vigil.reason());
+    best.plan().ifPresent(PlanSearch::requireFeasible);
+    boolean complete = bound == best.cost();
+    double inOwnSense = inOwnSense(statement, network, best, bound);
+    long taken = branching.nodes();
+    return new Found(best.plan(), inOwnSense, complete, taken, interchange.found(), vigil.reason());
+  }
+
+  private static void requireFeasible(Plan plan) {
+    if (!plan.feasible()) {
+      throw new IllegalStateException("a search keeps rules that its plan does not: " + plan);
+    }
+  }
+
+  /**
+   * Looks for a small set of required rules that no plan can keep together.
+   *
+   * @param effort its time ends the search
+   * @return the rules; nothing if it cannot be proved within nodes and time that there are such
+   * @throws IllegalArgumentException if the statement is too large, see {@link #fits}
+   */
+  public Optional<Conflict> conflict(Statement statement, Effort effort, Watch watch) {
+    requireFit(statement);
+    return new ConflictFilter(statement, nodes, Vigil.begin(effort, watch)).run();
+  }
+
+  private void requireFit(Statement statement) {
+    if (!fits(statement)) {
+      throw new IllegalArgumentException(
+          statement + " is too large for a search of its plans; ask fits first");
+    }
   }
 
   private long bound(Network network, Branching branching, Best best, Vigil vigil) {
@@ -109,16 +147,13 @@ public final class PlanSearch {
     return Math.max(bound, branching.walk(root, nodes));
   }
 
-  private static Found found(
-      Statement statement, Network network, Best best, long bound, long nodes, End end) {
+  private static double inOwnSense(Statement statement, Network network, Best best, long bound) {
     boolean complete = bound == best.cost();
-    double lowest = statement.sense().sign() * Double.POSITIVE_INFINITY;
     if (!complete || (best.plan().isPresent() && !network.scale.exact())) {
-      lowest = best.inOwnSense(bound);
-    } else if (best.plan().isPresent()) {
-      lowest = best.plan().get().value();
+      return best.inOwnSense(bound);
     }
-    return new Found(best.plan(), lowest, complete, nodes, end);
+    double none = statement.sense().sign() * Double.POSITIVE_INFINITY;
+    return best.plan().map(Plan::value).orElse(none);
   }
 
   @Override

@@ -7,6 +7,9 @@ import dev.couplet.audit.RandomModels;
 import dev.couplet.audit.RandomModels.Regime;
 import dev.couplet.exact.PlanEnumeration;
 import dev.couplet.exact.plans.PlanSearch.Found;
+import dev.couplet.model.Choice;
+import dev.couplet.model.Condition;
+import dev.couplet.model.Expr;
 import dev.couplet.model.Literal;
 import dev.couplet.model.Model;
 import dev.couplet.model.Plan;
@@ -19,6 +22,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.SplittableRandom;
+import java.util.function.Predicate;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.IntRange;
@@ -82,7 +86,7 @@ class PlanSearchProperties {
     Vigil vigil = Vigil.begin(EFFORT, Watch.none());
     Network network = NetworkBuilder.of(statement, rule -> true);
     Best best = new Best(statement, network, OptionalDouble.empty(), vigil);
-    Branching branching = new Branching(network, best, vigil);
+    Branching branching = new Branching(network, Interchange.none(network.variables), best, vigil);
     Partial root = new Partial(network);
     assertTrue(branching.begin(root, 3) && branching.multipliers().run(root, 5), "there is a plan");
     long lowest = branching.walk(root, Long.MAX_VALUE);
@@ -102,8 +106,67 @@ class PlanSearchProperties {
     assertTrue(expected.isPresent() || found.bound() == Double.POSITIVE_INFINITY);
   }
 
+  /** Left to themselves the rules have no plan, and with one fewer they have, if it says so. */
+  @Property(tries = 300)
+  void conflictsAreConflicts(@ForAll long seed) {
+    Statement statement = contradictory(new SplittableRandom(seed)).snapshot();
+    Optional<Conflict> conflict = PlanSearch.standard().conflict(statement, EFFORT, Watch.none());
+    assertEquals(byEveryPlan(statement).isEmpty(), conflict.isPresent());
+    if (conflict.isPresent()) {
+      List<String> rules = conflict.get().rules();
+      assertTrue(conflict.get().minimal());
+      assertTrue(byEveryPlan(contradictory(new SplittableRandom(seed), rules::contains)).isEmpty());
+      for (String rule : rules) {
+        Predicate<String> others = name -> rules.contains(name) && !name.equals(rule);
+        assertTrue(byEveryPlan(contradictory(new SplittableRandom(seed), others)).isPresent());
+      }
+    }
+  }
+
+  /** Options in one order or another: what is alike must not change what is found. */
+  @Property(tries = 500)
+  void findsTheSameWhereOptionsAreAlike(@ForAll long seed) {
+    SplittableRandom random = new SplittableRandom(seed);
+    Model model = Model.named("alike");
+    int options = 2 + random.nextInt(3);
+    List<Choice<Integer>> choices = new ArrayList<>();
+    for (int d = 0; d < 3 + random.nextInt(3); d++) {
+      choices.add(model.choice("choice " + d, Problems.upTo(options)));
+    }
+    int different = random.nextInt(3) == 0 ? random.nextInt(options) : -1;
+    int most = 1 + random.nextInt(3);
+    for (int option : Problems.upTo(options)) {
+      Expr load = Expr.sum(choices, choice -> choice.is(option));
+      model.require("load " + option, load.atMost(option == different ? most + 1 : most + 0.5));
+    }
+    List<Expr> parts = new ArrayList<>();
+    for (int a = 0; a < choices.size(); a++) {
+      for (int b = 0; b < a; b++) {
+        int cost = random.nextInt(-3, 4);
+        Choice<Integer> one = choices.get(a);
+        Choice<Integer> other = choices.get(b);
+        Problems.upTo(options).forEach(k -> parts.add(one.is(k).times(other.is(k)).times(cost)));
+      }
+    }
+    model.maximize("sum", Expr.sum(parts));
+    Optional<Plan> expected = byEveryPlan(model.snapshot());
+    Found found = searched(PlanSearch.standard(), model.snapshot(), Optional.empty());
+    assertTrue(found.complete());
+    assertEquals(expected.map(Plan::value), found.best().map(Plan::value));
+    boolean some = options > 2 || different < 0;
+    assertEquals(some, !found.alike().isEmpty(), found.alike() + " of " + options);
+  }
+
   private static Model contradictory(SplittableRandom random) {
-    Model model = Model.named("contradictory");
+    return contradictory(random, name -> true, "contradictory");
+  }
+
+  private static Statement contradictory(SplittableRandom random, Predicate<String> kept) {
+    return contradictory(random, kept, "fewer rules").snapshot();
+  }
+
+  private static Model contradictory(SplittableRandom random, Predicate<String> kept, String name) {
+    Model model = Model.named(name);
     List<Literal> literals = new ArrayList<>();
     for (int d = 0; d < 3 + random.nextInt(3); d++) {
       var choice = model.choice("choice " + d, List.of(0, 1, 2));
@@ -113,12 +176,14 @@ class PlanSearchProperties {
       Literal one = literals.get(random.nextInt(literals.size()));
       Literal other = literals.get(random.nextInt(literals.size()));
       Literal third = literals.get(random.nextInt(literals.size()));
+      Condition condition =
+          random.nextBoolean()
+              ? one.plus(other).atMost(1)
+              : one.times(2).plus(other).plus(third).between(1, 2);
       try {
-        model.require(
-            "rule " + r,
-            random.nextBoolean()
-                ? one.plus(other).atMost(1)
-                : one.times(2).plus(other).plus(third).between(1, 2));
+        if (kept.test("rule " + r)) {
+          model.require("rule " + r, condition);
+        }
       } catch (IllegalArgumentException noPlanKeepsIt) {
         continue;
       }
