@@ -81,6 +81,14 @@ final class ExhaustiveAudit {
   }
 
   LoweringAudit.Report report() {
+    notes.expect(
+        "approximate",
+        lowered.approximate().isEmpty(),
+        () ->
+            "the penalties of "
+                + lowered.approximate()
+                + " are approximate: feasible plans cost something there too; lower these rules"
+                + " exactly to have the form audited");
     findOptimum();
     compare();
     List<WeightSlack> slacks = slacks();

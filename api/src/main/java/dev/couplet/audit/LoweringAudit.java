@@ -15,6 +15,7 @@ import java.util.OptionalDouble;
  * checks, by the names that findings carry:
  *
  * <ul>
+ *   <li>{@code approximate}: no rule has an approximate penalty
  *   <li>{@code feasible plan}: there is one at all
  *   <li>{@code value}: the energy of a feasible plan is its value, as the rules and objectives say
  *       it; exactly, if the numbers allow that, else up to what rounding can add up to

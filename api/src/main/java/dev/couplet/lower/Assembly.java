@@ -32,6 +32,7 @@ final class Assembly {
   private final boolean whole;
   private final List<Source> sources = new ArrayList<>();
   private final List<Weight> weights = new ArrayList<>();
+  private final List<String> approximate = new ArrayList<>();
 
   /** How far the weighted penalties of rules go below 0 on patterns that break a code. */
   private final Map<Decision, Double> below = new HashMap<>();
@@ -63,7 +64,14 @@ final class Assembly {
     sources.clear();
     sources.addAll(quadratic);
     return new Lowered(
-        statement, qubo(), coding, bits, ledger(), List.copyOf(weights), structure());
+        statement,
+        qubo(),
+        coding,
+        bits,
+        ledger(),
+        List.copyOf(weights),
+        List.copyOf(approximate),
+        structure());
   }
 
   /** Codes come before rules, but are weighed after them. */
@@ -105,7 +113,7 @@ final class Assembly {
     if (rule.alwaysKept()) {
       weights.add(new Weight(rule.name(), "nothing", 0, "every plan keeps it"));
     } else if (rule.required()) {
-      List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits, settings.aim());
+      List<Penalty> penalties = RequiredRule.penalties(rule, coding, bits, settings);
       Penalty penalty = Penalty.sum(penalties, bits.size());
       double weight = addPenalty(rule.name(), Kind.PENALTY, penalty, 0);
       if (penalty.lowest() < 0) {
@@ -120,6 +128,13 @@ final class Assembly {
 
   /** Returns the weight; what it guards may let other penalties go so far below 0. */
   private double addPenalty(String name, Kind kind, Penalty penalty, double othersBelow) {
+    if (penalty.approximate()) {
+      String why = "approximate: feasible plans cost something too; nothing is proved";
+      approximate.add(name);
+      weights.add(new Weight(name, penalty.form(), 1, why));
+      addSource(name, kind, penalty.terms(), 1);
+      return 1;
+    }
     Range guarded = new Range(objective.lowest() + othersBelow, objective.highest());
     Weights.Chosen chosen = settings.choose(new Weights.Facts(name, statement, guarded, whole));
     String reason =

@@ -18,7 +18,8 @@ import java.util.stream.IntStream;
  * <p>Bits {@code 0 .. decisionBits() - 1} stand for the decisions of the statement, in their order;
  * the rest are auxiliary. On a feasible plan, with auxiliary bits at their best, the form's energy
  * is the plan's value, its sign changed if the model maximises. Every other pattern has an energy
- * above the best feasible one, if the weights suffice. Immutable and thread-safe.
+ * above the best feasible one, if the weights suffice. None of this holds if a rule is {@link
+ * #approximate()}. Immutable and thread-safe.
  */
 @CheckReturnValue
 public final class Lowered {
@@ -38,6 +39,7 @@ public final class Lowered {
   private final List<BitTable.Completion> completions;
   private final Ledger ledger;
   private final List<Weight> weights;
+  private final List<String> approximate;
   private final Structure structure;
 
   Lowered(
@@ -47,6 +49,7 @@ public final class Lowered {
       BitTable bits,
       Ledger ledger,
       List<Weight> weights,
+      List<String> approximate,
       Structure structure) {
     this.statement = statement;
     this.qubo = qubo;
@@ -54,6 +57,7 @@ public final class Lowered {
     this.completions = bits.completions();
     this.ledger = ledger;
     this.weights = weights;
+    this.approximate = approximate;
     this.structure = structure;
   }
 
@@ -95,6 +99,15 @@ public final class Lowered {
   /** The weight of each rule and code, in the order of the statement, codes first. */
   public List<Weight> weights() {
     return weights;
+  }
+
+  /**
+   * The names of the rules whose penalty is approximate. If there are any, energies of feasible
+   * plans are not their values, and no bound or minimum of the form says anything about the model;
+   * weights of other rules are those that would suffice without them.
+   */
+  public List<String> approximate() {
+    return approximate;
   }
 
   /** What samplers may use: the exactly-one sets of the choices. */

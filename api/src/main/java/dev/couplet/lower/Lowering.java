@@ -10,6 +10,7 @@ import java.util.Collections;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 
 /**
@@ -33,6 +34,8 @@ import java.util.Set;
  *     c |c - 2 value|</td></tr>
  *   <tr><td>linear inequality</td><td>floor(log2 R) + 1</td><td>(n + bits)(n + bits - 1)/2</td>
  *     <td>as for the equality with the slack among its terms</td></tr>
+ *   <tr><td>linear inequality, approximate on request</td><td>0</td><td>n(n-1)/2</td>
+ *     <td>set by hand</td></tr>
  *   <tr><td>preferred rule on more literals</td><td>those of slack, excess and shortage</td>
  *     <td>as above</td><td>as above</td></tr>
  *   <tr><td>negative product of d &gt; 2</td><td>1</td><td>d</td><td>d - 1</td></tr>
@@ -48,18 +51,26 @@ import java.util.Set;
 @CheckReturnValue
 public final class Lowering {
   private static final Lowering STANDARD =
-      new Lowering(Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot(), Aim.AUXILIARIES);
+      new Lowering(
+          Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot(), Aim.AUXILIARIES, Map.of());
 
   private final Weights weights;
   private final Map<String, Double> byName;
   private final ChoiceEncoding choices;
   private final Aim aim;
+  private final Map<String, UnbalancedForm> unbalanced;
 
-  private Lowering(Weights weights, Map<String, Double> byName, ChoiceEncoding choices, Aim aim) {
+  private Lowering(
+      Weights weights,
+      Map<String, Double> byName,
+      ChoiceEncoding choices,
+      Aim aim,
+      Map<String, UnbalancedForm> unbalanced) {
     this.weights = weights;
     this.byName = byName;
     this.choices = choices;
     this.aim = aim;
+    this.unbalanced = unbalanced;
   }
 
   /** The defaults: choices with one bit an option, weights by the range bound. */
@@ -69,12 +80,12 @@ public final class Lowering {
 
   /** These settings with another way to choose weights. */
   public Lowering with(Weights newWeights) {
-    return new Lowering(newWeights, byName, choices, aim);
+    return new Lowering(newWeights, byName, choices, aim, unbalanced);
   }
 
   /** These settings with another code for choices. */
   public Lowering with(ChoiceEncoding newChoices) {
-    return new Lowering(weights, byName, newChoices, aim);
+    return new Lowering(weights, byName, newChoices, aim, unbalanced);
   }
 
   /**
@@ -82,7 +93,7 @@ public final class Lowering {
    * and of the ways that take as many so that the largest coefficient is small. The default.
    */
   public Lowering fewestAuxiliaries() {
-    return new Lowering(weights, byName, choices, Aim.AUXILIARIES);
+    return new Lowering(weights, byName, choices, Aim.AUXILIARIES, unbalanced);
   }
 
   /**
@@ -91,7 +102,7 @@ public final class Lowering {
    * coefficients with few digits.
    */
   public Lowering smallestCoefficients() {
-    return new Lowering(weights, byName, choices, Aim.COEFFICIENTS);
+    return new Lowering(weights, byName, choices, Aim.COEFFICIENTS, unbalanced);
   }
 
   /**
@@ -108,7 +119,41 @@ public final class Lowering {
     }
     Map<String, Double> more = new LinkedHashMap<>(byName);
     more.put(rule, value);
-    return new Lowering(weights, Collections.unmodifiableMap(more), choices, aim);
+    return new Lowering(weights, Collections.unmodifiableMap(more), choices, aim, unbalanced);
+  }
+
+  /**
+   * These settings with an approximate penalty for one required inequality, instead of a square
+   * with a slack: {@code square h^2 - linear h} with h the whole number that is left to the limit
+   * (after common factors are taken out). No auxiliary bits; but not exact: feasible plans cost
+   * something too, and the lowest energy may belong to a plan that is not the best or breaks the
+   * rule. The two numbers are to be tuned on small examples; they replace the rule's weight.
+   *
+   * <p>A rule for which an exact form without a slack exists, or that says several things, keeps
+   * its exact form; {@link Lowered#approximate()} names those that became approximate. Source:
+   * Montanez-Barrera et al., "Unbalanced penalization: a new approach to encode inequality
+   * constraints of combinatorial problems for quantum optimization algorithms" (2022).
+   *
+   * @throws IllegalArgumentException unless both numbers are positive and finite
+   */
+  public Lowering approximate(String rule, double linear, double square) {
+    if (!(linear > 0 && square > 0) || !Double.isFinite(linear) || !Double.isFinite(square)) {
+      throw new IllegalArgumentException(
+          "the approximate penalty of rule '"
+              + rule
+              + "' is "
+              + square
+              + " h^2 - "
+              + linear
+              + " h, both numbers must be positive and finite");
+    }
+    Map<String, UnbalancedForm> more = new LinkedHashMap<>(unbalanced);
+    more.put(rule, new UnbalancedForm(linear, square));
+    return new Lowering(weights, byName, choices, aim, Collections.unmodifiableMap(more));
+  }
+
+  Optional<UnbalancedForm> unbalanced(String rule) {
+    return Optional.ofNullable(unbalanced.get(rule));
   }
 
   /**
@@ -124,28 +169,38 @@ public final class Lowering {
 
   /** Lowers a statement; as for a model. */
   public Lowered lower(Statement statement) {
-    if (!byName.isEmpty()) {
-      requireKnown(statement);
+    requireKnown(statement, byName.keySet(), "a weight");
+    requireKnown(statement, unbalanced.keySet(), "an approximate penalty");
+    for (String rule : unbalanced.keySet()) {
+      if (byName.containsKey(rule)) {
+        throw new IllegalArgumentException(
+            "rule '" + rule + "' has an approximate penalty and a weight: set one of them");
+      }
     }
     return new Assembly(statement, this).lowered();
   }
 
-  private void requireKnown(Statement statement) {
+  private static void requireKnown(Statement statement, Set<String> named, String what) {
+    if (named.isEmpty()) {
+      return;
+    }
     Set<String> known = new HashSet<>();
     statement.decisions().stream().map(Decision::code).forEach(known::add);
     statement.rules().stream().map(Rule::name).forEach(known::add);
     for (Rule rule : statement.rules()) {
-      if (!rule.required() && byName.containsKey(rule.name())) {
+      if (!rule.required() && named.contains(rule.name())) {
         throw new IllegalArgumentException(
-            "a weight is set for rule '"
+            what
+                + " is set for rule '"
                 + rule.name()
                 + "', which is preferred: its cost a unit is its weight; change that");
       }
     }
-    for (String rule : byName.keySet()) {
+    for (String rule : named) {
       if (!known.contains(rule)) {
         throw new IllegalArgumentException(
-            "a weight is set for rule '"
+            what
+                + " is set for rule '"
                 + rule
                 + "', but model '"
                 + statement.name()

@@ -14,8 +14,13 @@ import java.util.stream.Collectors;
  * @param lowest a bound from below over all bit patterns: 0, or less where the penalty goes below 0
  *     on patterns that break a code of which it has bits
  * @param form how it was made, in words
+ * @param approximate whether it is no penalty in that sense but an {@link UnbalancedForm}
  */
-record Penalty(Polynomial terms, double lowest, String form) {
+record Penalty(Polynomial terms, double lowest, String form, boolean approximate) {
+  Penalty(Polynomial terms, double lowest, String form) {
+    this(terms, lowest, form, false);
+  }
+
   /** A penalty that is nowhere below 0. */
   Penalty(Polynomial terms, String form) {
     this(terms, 0, form);

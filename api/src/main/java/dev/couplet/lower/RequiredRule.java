@@ -19,20 +19,28 @@ final class RequiredRule {
   private RequiredRule() {}
 
   /** The penalties of the parts that some plan breaks, in their order. */
-  static List<Penalty> penalties(Rule rule, Coding coding, BitTable bits, Aim aim) {
+  static List<Penalty> penalties(Rule rule, Coding coding, BitTable bits, Lowering settings) {
+    Optional<UnbalancedForm> approximate =
+        rule.parts().size() == 1 ? settings.unbalanced(rule.name()) : Optional.empty();
     return rule.parts().stream()
         .filter(part -> !part.alwaysKept())
-        .map(part -> penalty(part, rule.name(), coding, bits, aim))
+        .map(part -> penalty(part, rule.name(), coding, bits, settings.aim(), approximate))
         .toList();
   }
 
   private static Penalty penalty(
-      Rule.Part part, String rule, Coding coding, BitTable bits, Aim aim) {
+      Rule.Part part,
+      String rule,
+      Coding coding,
+      BitTable bits,
+      Aim aim,
+      Optional<UnbalancedForm> approximate) {
     Limits limits = Limits.tightened(part, coding);
     Optional<Penalty> exact =
         exact(limits, bits.size())
             .or(() -> overLiterals(part, coding, bits.size()))
-            .or(() -> ClauseForm.of(limits, rule, bits, aim));
+            .or(() -> ClauseForm.of(limits, rule, bits, aim))
+            .or(() -> approximate.flatMap(form -> form.of(limits, bits.size())));
     return exact.orElseGet(() -> SquareForm.of(limits, rule, bits));
   }
 

@@ -268,6 +268,7 @@ class LoweringTest {
               new BitTable(coding),
               faithful.ledger(),
               faithful.weights(),
+              faithful.approximate(),
               faithful.structure());
       LoweringAudit.Report report = LoweringAudit.exhaustive(sabotaged);
       List<String> checks = report.findings().all().stream().map(Finding::check).toList();

@@ -102,14 +102,18 @@ final class ModelSolver {
     Lowered lowered = lowering.lower(statement);
     course.finished(
         "lowering", lowered.qubo().size() + " bits, " + lowered.qubo().pairs() + " pairs");
-    lowest = Math.max(lowest, BoundStage.run(lowered, course));
+    boolean exact = lowered.approximate().isEmpty();
+    double bound = exact ? BoundStage.run(lowered, course) : BoundStage.byRange(statement);
+    lowest = Math.max(lowest, bound);
     List<State> starts = best.map(lowered::complete).map(List::of).orElse(List.of());
-    OptionalDouble target = inEnergy(lowered, course.effort().target());
+    OptionalDouble target =
+        exact ? inEnergy(lowered, course.effort().target()) : OptionalDouble.empty();
+    double stopAt = exact ? lowest : Double.NEGATIVE_INFINITY;
     int share = searchedAfter ? DRAWS_SHARE : ALL;
     Draws draws =
-        DrawStage.run(lowered.qubo(), starts, lowered.structure(), lowest, target, share, course);
+        DrawStage.run(lowered.qubo(), starts, lowered.structure(), stopAt, target, share, course);
     keep(lowered.read(draws).best());
-    return DrawStage.end(draws, target);
+    return !exact && ended() == End.TARGET ? End.TARGET : DrawStage.end(draws, target);
   }
 
   private static OptionalDouble inEnergy(Lowered lowered, OptionalDouble value) {

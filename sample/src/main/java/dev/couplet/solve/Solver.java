@@ -21,7 +21,8 @@ import java.util.Optional;
  * nothing within its share of the effort, the model is lowered, bounded, and drawn from, and the
  * search goes on from the best plan with the time that is left; that plan is no proof of anything
  * unless {@link Answer#proof} says so. A target of the effort is a value in the model's own sense.
- * Every plan returned was checked against the model itself.
+ * Every plan returned was checked against the model itself. Draws from a form with approximate
+ * penalties are bounded by nothing that the form says, and go on past a target.
  *
  * <p>Also a {@link Sampler} of forms, with a bound in its draws; there a target is an energy.
  * Immutable and thread-safe.

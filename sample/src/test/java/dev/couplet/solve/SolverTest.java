@@ -7,8 +7,10 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.couplet.exact.plans.Conflict;
+import dev.couplet.exact.plans.PlanSearch;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
+import dev.couplet.lower.Lowering;
 import dev.couplet.model.Bit;
 import dev.couplet.model.Choice;
 import dev.couplet.model.Expr;
@@ -121,6 +123,28 @@ class SolverTest {
     assertEquals(End.DONE, answer.end(), "reaching the bound is no target of the caller's");
     assertEquals(
         answer.plan(), Solver.standard().solve(model, COUNTED.threads(2)).plan(), "two threads");
+  }
+
+  /** Plans cost something in an approximate penalty: nothing that is said may rest on the form. */
+  @Test
+  void approximatePenaltiesProveNothing() {
+    Model model = Model.named("approximate");
+    List<Bit> x = bits(model, 6000);
+    model.minimize("taken", sum(x));
+    Lowering rough = Lowering.standard();
+    for (int i = 0; i < x.size(); i += 3) {
+      Expr load = sum(x.get(i).times(3), x.get(i + 1).times(2), x.get(i + 2).times(2));
+      model.require("load " + i, load.atMost(4));
+      rough = rough.approximate("load " + i, 12, 5);
+    }
+    assertEquals(2000, rough.lower(model).approximate().size());
+    assertFalse(PlanSearch.standard().fits(model.snapshot()), "searched, it would be proved");
+    Effort effort = Effort.draws(2).sweeps(50).seed(7).target(0);
+    Answer answer = Solver.standard().with(rough).solve(model, effort);
+    assertEquals(0, answer.bound(), "taking nothing is feasible and costs 0");
+    assertTrue(answer.value() > 0, "the form asks for loads of three, at energies below 0");
+    assertEquals(Proof.NONE, answer.proof());
+    assertEquals(End.DONE, answer.end());
   }
 
   @Test
