@@ -186,6 +186,9 @@ final class Truth implements Flips {
 
   /** The number of patterns of literals that are values of a decision. */
   static long wanted(Statement statement, Decision decision) {
+    if (statement.isFixed(decision)) {
+      return 1;
+    }
     List<List<Integer>> groups = statement.exactlyOne(decision);
     long values = 1;
     for (List<Integer> group : groups) {

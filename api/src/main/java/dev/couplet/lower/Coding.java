@@ -40,6 +40,7 @@ final class Coding {
     this.statement = statement;
     this.bitOf = new int[statement.literals()];
     this.start = new int[statement.literals() + 1];
+    Arrays.fill(bitOf, -1);
     this.over = new Polynomial[statement.literals()];
     Map<Integer, Code> codes = new HashMap<>();
     for (Decision decision : statement.decisions()) {
@@ -64,11 +65,9 @@ final class Coding {
     int first = statement.firstLiteral(decision);
     start[first] = meanings.size();
     List<List<Integer>> groups = statement.exactlyOne(decision);
-    if (groups.isEmpty()) {
-      for (int k = 0; k < statement.literals(decision); k++) {
-        bitOf[first + k] = meanings.size();
-        meanings.add(statement.describe(first + k));
-      }
+    for (int literal : statement.free(decision)) {
+      bitOf[literal] = meanings.size();
+      meanings.add(statement.describe(literal));
     }
     for (List<Integer> group : groups) {
       ChoiceEncoding encoding = settings.encoding(decision);

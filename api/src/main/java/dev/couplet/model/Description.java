@@ -1,6 +1,7 @@
 package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.form.State;
 import dev.couplet.model.Statement.Objective;
 import dev.couplet.model.Statement.Sense;
 import java.util.List;
@@ -25,7 +26,8 @@ final class Description {
     text.append("model ").append(statement.name()).append('\n');
     for (Decision decision : statement.decisions()) {
       text.append("  decide ").append(decision.name()).append(": ");
-      text.append(values(decision)).append('\n');
+      text.append(statement.isFixed(decision) ? "fixed to " + fixed(decision) : values(decision))
+          .append('\n');
     }
     for (Rule rule : statement.rules()) {
       text.append(rule.required() ? "  require " : "  prefer ").append(rule.name()).append(": ");
@@ -38,6 +40,11 @@ final class Description {
       text.append(statement.sense() == Sense.MINIMIZE ? "  minimize " : "  maximize ");
       text.append(objective.name()).append(": ").append(terms(objective.terms())).append('\n');
     }
+  }
+
+  private Object fixed(Decision decision) {
+    State literals = statement.withFixed(State.zeros(statement.literals()));
+    return new Values(literals).shown(decision);
   }
 
   private static String values(Decision decision) {

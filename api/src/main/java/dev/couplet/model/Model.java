@@ -8,8 +8,10 @@ import dev.couplet.model.Statement.Sense;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
@@ -31,6 +33,7 @@ public final class Model {
   private final List<Objective> objectives = new ArrayList<>();
   private final Set<String> decisionNames = new HashSet<>();
   private final Set<String> statementNames = new HashSet<>();
+  private final Map<Decision, boolean[]> fixed = new LinkedHashMap<>();
   private @Nullable Sense sense;
 
   private Model(String name) {
@@ -201,6 +204,58 @@ public final class Model {
   }
 
   /**
+   * Fixes a choice: every plan takes this option, and rules and objectives speak of the other
+   * decisions alone. A later call replaces an earlier one. Whether the rules can still be kept
+   * shows when the model is lowered, solved or a plan of it evaluated: a rule that no plan keeps
+   * any more is named there.
+   *
+   * @throws IllegalArgumentException if it is of another model, or has no such option
+   */
+  public <T> void fix(Choice<T> choice, T option) {
+    fixTo(choice, Values.pattern(choice, option));
+  }
+
+  /** Fixes a bit; as for a choice. */
+  public void fix(Bit bit, boolean value) {
+    fixTo(bit, value);
+  }
+
+  /** Fixes a spin to 1 or -1; as for a choice. */
+  public void fix(Spin spin, int value) {
+    fixTo(spin, Values.pattern(spin, value));
+  }
+
+  /** Fixes a count; as for a choice. */
+  public void fix(Count count, long value) {
+    fixTo(count, Values.pattern(count, value));
+  }
+
+  /** Fixes an order: an item for each place; as for a choice. */
+  public <T> void fix(Order<T> order, List<? extends T> items) {
+    fixTo(order, Values.pattern(order, items));
+  }
+
+  /** Fixes a subset: the items that are taken; as for a choice. */
+  public <T> void fix(Subset<T> subset, Collection<? extends T> taken) {
+    fixTo(subset, Values.pattern(subset, taken));
+  }
+
+  private void fixTo(Decision decision, boolean... pattern) {
+    Model owner = Slot.of(decision).owner();
+    if (owner != this) {
+      throw new IllegalArgumentException(
+          "decision '"
+              + decision.name()
+              + "' belongs to model '"
+              + owner.name()
+              + "'; model '"
+              + name
+              + "' fixes its own");
+    }
+    fixed.put(decision, pattern);
+  }
+
+  /**
    * Requires a condition: plans that break it are infeasible.
    *
    * @return the rule, with whole coefficients
@@ -351,7 +406,7 @@ public final class Model {
   @CheckReturnValue
   public Statement snapshot() {
     Sense known = sense == null ? Sense.MINIMIZE : sense;
-    return new Statement(this, decisions, rules, objectives, known);
+    return new Statement(this, decisions, rules, objectives, known, fixed);
   }
 
   /** The model in words, for proof-reading: every decision, rule and objective on a line. */

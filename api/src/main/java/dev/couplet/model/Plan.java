@@ -42,7 +42,7 @@ public final class Plan implements Comparable<Plan> {
   }
 
   static Plan of(Statement statement, State given, Set<Decision> broken) {
-    State literals = new Values(given).normal(statement);
+    State literals = statement.withFixed(new Values(given).normal(statement));
     List<Unmet> unmet = new ArrayList<>();
     double cost = 0;
     for (Rule rule : statement.rules()) {
@@ -239,9 +239,7 @@ public final class Plan implements Comparable<Plan> {
      * @throws IllegalArgumentException if it is of another model, or has no such option
      */
     public <T> Draft set(Choice<T> choice, T option) {
-      boolean[] pattern = new boolean[choice.options().size()];
-      pattern[choice.positionOf(option)] = true;
-      return write(choice, pattern);
+      return write(choice, Values.pattern(choice, option));
     }
 
     /**
@@ -255,11 +253,7 @@ public final class Plan implements Comparable<Plan> {
 
     /** Sets a spin to +1 or -1; refusals as for a choice. */
     public Draft set(Spin spin, int value) {
-      if (value != 1 && value != -1) {
-        throw new IllegalArgumentException(
-            "spin '" + spin.name() + "' cannot be " + value + ", it is 1 or -1");
-      }
-      return write(spin, value < 0);
+      return write(spin, Values.pattern(spin, value));
     }
 
     /**
@@ -268,8 +262,7 @@ public final class Plan implements Comparable<Plan> {
      * @throws IllegalArgumentException if it is of another model, or the number out of its range
      */
     public Draft set(Count count, long value) {
-      long above = count.requireWithin(value) - count.lowest();
-      return write(count, Digits.pattern(above, count.digits()));
+      return write(count, Values.pattern(count, value));
     }
 
     /**
@@ -279,21 +272,7 @@ public final class Plan implements Comparable<Plan> {
      *     one of the items is not among its own
      */
     public <T> Draft set(Order<T> order, List<? extends T> value) {
-      if (value.size() != order.places()) {
-        throw new IllegalArgumentException(
-            "order '"
-                + order.name()
-                + "' has "
-                + order.places()
-                + " places, "
-                + value.size()
-                + " items are given");
-      }
-      boolean[] pattern = new boolean[order.places() * order.items().size()];
-      for (int place = 0; place < value.size(); place++) {
-        pattern[place * order.items().size() + order.positionOf(value.get(place))] = true;
-      }
-      return write(order, pattern);
+      return write(order, Values.pattern(order, value));
     }
 
     /**
@@ -302,15 +281,19 @@ public final class Plan implements Comparable<Plan> {
      * @throws IllegalArgumentException if it is of another model, or has no such item
      */
     public <T> Draft set(Subset<T> subset, Collection<? extends T> taken) {
-      boolean[] pattern = new boolean[subset.items().size()];
-      for (T item : taken) {
-        pattern[subset.positionOf(item)] = true;
-      }
-      return write(subset, pattern);
+      return write(subset, Values.pattern(subset, taken));
     }
 
     private Draft write(Decision decision, boolean... pattern) {
       int first = statement.firstLiteral(decision);
+      if (statement.fixing().contradicts(decision, pattern)) {
+        throw new IllegalArgumentException(
+            "decision '"
+                + decision.name()
+                + "' is fixed to another value in model '"
+                + statement.name()
+                + "'; leave it out of the plan");
+      }
       System.arraycopy(pattern, 0, literals, first, pattern.length);
       decided.add(decision);
       return this;
@@ -323,7 +306,7 @@ public final class Plan implements Comparable<Plan> {
      */
     public Plan evaluate() {
       for (Decision decision : statement.decisions()) {
-        if (!decided.contains(decision)) {
+        if (!decided.contains(decision) && !statement.isFixed(decision)) {
           throw new IllegalStateException(
               "decision '" + decision.name() + "' is not set; set every decision of the plan");
         }

@@ -1,6 +1,7 @@
 package dev.couplet.model;
 
 import dev.couplet.form.Polynomial;
+import dev.couplet.form.State;
 import dev.couplet.model.Statement.Sense;
 import java.io.IOException;
 import java.io.UncheckedIOException;
@@ -35,6 +36,9 @@ final class PseudoBooleanWriter {
     this.objective = new PseudoBooleanObjective(statement);
     for (Decision decision : statement.decisions()) {
       statement.exactlyOne(decision).forEach(group -> addCode(decision, group));
+      if (statement.isFixed(decision)) {
+        addFixed(decision);
+      }
     }
     for (Rule rule : statement.rules()) {
       addRule(rule);
@@ -46,6 +50,16 @@ final class PseudoBooleanWriter {
     Polynomial.Builder sum = Polynomial.builder(statement.literals());
     group.forEach(literal -> sum.add(1, literal));
     lines.add(new Line(decision.code(), sum.build(), List.of(), 1, 1, true));
+  }
+
+  private void addFixed(Decision decision) {
+    State fixed = statement.withFixed(State.zeros(statement.literals()));
+    int first = statement.firstLiteral(decision);
+    for (int literal = first; literal < first + statement.literals(decision); literal++) {
+      Polynomial fact = Polynomial.builder(statement.literals()).add(1, literal).build();
+      String name = "'" + decision.name() + "' is fixed";
+      lines.add(new Line(name, fact, List.of(), 1, fixed.bit(literal), true));
+    }
   }
 
   private void addRule(Rule rule) {

@@ -8,6 +8,7 @@ import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.IntFunction;
 
 /**
  * A named condition that a model requires or prefers, in whole numbers.
@@ -35,6 +36,20 @@ public final class Rule {
   /** The same rule in a model that has more literals by now. */
   Rule inLiterals(int literals) {
     return new Rule(name, price, parts.stream().map(part -> part.inLiterals(literals)).toList());
+  }
+
+  /** What is left of the rule where decisions are fixed. */
+  Rule fixed(Fixing fixing, IntFunction<Decision> decisionOf) {
+    List<Part> left = parts.stream().map(part -> part.fixed(fixing, decisionOf)).toList();
+    for (Part part : left) {
+      boolean apart = part.highest() < part.range.lowest() || part.lowest() > part.range.highest();
+      boolean between = part.step() == 1 && part.terms().terms() > 0 && !part.divisible();
+      if (required() && (apart || between)) {
+        throw new IllegalArgumentException(
+            "rule '" + name + "' can be kept by no plan with the decisions that are fixed");
+      }
+    }
+    return new Rule(name, price, left);
   }
 
   /** The name, unique in the model. */
@@ -129,6 +144,11 @@ public final class Rule {
       this.condition = condition;
       this.price = price;
       this.range = range;
+    }
+
+    private Part fixed(Fixing fixing, IntFunction<Decision> decisionOf) {
+      ScaledCondition left = condition.fixed(fixing);
+      return new Part(left, price, Ranges.of(left.terms(), decisionOf));
     }
 
     /** The same in a model that has more literals by now. */

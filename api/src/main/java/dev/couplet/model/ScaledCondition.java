@@ -147,6 +147,14 @@ record ScaledCondition(
     return new ScaledCondition(terms.inVariables(literals), lowest, highest, step, unit);
   }
 
+  /** What is left where literals are fixed: what they add moves into the limits. */
+  ScaledCondition fixed(Fixing fixing) {
+    Polynomial left = fixing.in(terms);
+    double constant = left.constant();
+    Polynomial free = Polynomial.builder(left.size()).add(left, 1).add(-constant).build();
+    return new ScaledCondition(free, lowest - constant, highest - constant, step, unit);
+  }
+
   private static BigInteger whole(double number) {
     return BigInteger.valueOf((long) number);
   }

@@ -6,6 +6,7 @@ import dev.couplet.form.State;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.stream.IntStream;
 
@@ -52,8 +53,8 @@ public final class Statement {
    * @param terms a polynomial over the model's literals, in the model's own sense
    */
   public record Objective(String name, Polynomial terms) {
-    Objective inLiterals(int literals) {
-      return new Objective(name, terms.inVariables(literals));
+    Objective inLiterals(int literals, Fixing fixing) {
+      return new Objective(name, fixing.in(terms.inVariables(literals)));
     }
   }
 
@@ -65,22 +66,30 @@ public final class Statement {
   private final List<Objective> objectives;
   private final Sense sense;
   private final Polynomial objective;
+  private final Fixing fixing;
 
   Statement(
       Model owner,
       List<Decision> decisions,
       List<Rule> rules,
       List<Objective> objectives,
-      Sense sense) {
+      Sense sense,
+      Map<Decision, boolean[]> fixed) {
     this.owner = owner;
     this.decisions = List.copyOf(decisions);
     this.decisionOf = decisionOf(decisions);
     this.grouped = grouped(decisions);
     int literals = decisionOf.length;
-    this.rules = rules.stream().map(rule -> rule.inLiterals(literals)).toList();
-    this.objectives = objectives.stream().map(part -> part.inLiterals(literals)).toList();
+    this.fixing = new Fixing(fixed, literals);
+    this.rules = rules.stream().map(rule -> inLiterals(rule, literals)).toList();
+    this.objectives = objectives.stream().map(part -> part.inLiterals(literals, fixing)).toList();
     this.sense = sense;
     this.objective = sum(this.objectives, literals);
+  }
+
+  private Rule inLiterals(Rule rule, int literals) {
+    Rule wide = rule.inLiterals(literals);
+    return fixing.isEmpty() ? wide : wide.fixed(fixing, literal -> decisionOf[literal]);
   }
 
   private static Polynomial sum(List<Objective> objectives, int literals) {
@@ -164,10 +173,14 @@ public final class Statement {
 
   /**
    * The groups of literals of a decision of which a plan makes exactly one hold, such as the
-   * options of a choice; none where every pattern of its literals is a value.
+   * options of a choice; none where every pattern of its literals is a value, or the decision is
+   * fixed.
    */
   public List<List<Integer>> exactlyOne(Decision decision) {
     require(decision);
+    if (fixing.has(decision)) {
+      return List.of();
+    }
     Slot slot = Slot.of(decision);
     List<List<Integer>> groups = new ArrayList<>(slot.groups());
     for (int g = 0; g < slot.groups(); g++) {
@@ -175,6 +188,38 @@ public final class Statement {
       groups.add(IntStream.range(from, from + slot.groupSize()).boxed().toList());
     }
     return groups;
+  }
+
+  /** The literals of a decision of which every pattern is a value; none where it is fixed. */
+  public List<Integer> free(Decision decision) {
+    require(decision);
+    Slot slot = Slot.of(decision);
+    boolean any = slot.groups() == 0 && !fixing.has(decision);
+    return IntStream.range(slot.first(), slot.first() + (any ? slot.literals() : 0))
+        .boxed()
+        .toList();
+  }
+
+  /**
+   * Whether a decision of this model is fixed: every plan has its value, rules speak of the rest.
+   */
+  public boolean isFixed(Decision decision) {
+    require(decision);
+    return fixing.has(decision);
+  }
+
+  /** The same literals, those of fixed decisions as they are fixed. */
+  State withFixed(State literals) {
+    if (fixing.isEmpty()) {
+      return literals;
+    }
+    boolean[] all = literals.toBooleans();
+    fixing.write(all);
+    return State.of(all);
+  }
+
+  Fixing fixing() {
+    return fixing;
   }
 
   /** The decision that a literal belongs to. */
@@ -205,7 +250,8 @@ public final class Statement {
 
   /**
    * The plan that the literals' values stand for. Choices with no option or several are undecided
-   * in it. Linear in the size of rules and objective.
+   * in it; fixed decisions have the value that they are fixed to, whatever the state says. Linear
+   * in the size of rules and objective.
    *
    * @throws IllegalArgumentException if the state is not of size {@link #literals()}
    */

@@ -2,6 +2,7 @@ package dev.couplet.model;
 
 import dev.couplet.form.State;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -55,6 +56,51 @@ final class Values {
       }
     }
     return taken;
+  }
+
+  static <T> boolean[] pattern(Choice<T> choice, T option) {
+    boolean[] pattern = new boolean[choice.options().size()];
+    pattern[choice.positionOf(option)] = true;
+    return pattern;
+  }
+
+  static boolean[] pattern(Spin spin, int value) {
+    if (value != 1 && value != -1) {
+      throw new IllegalArgumentException(
+          "spin '" + spin.name() + "' cannot be " + value + ", it is 1 or -1");
+    }
+    return new boolean[] {value < 0};
+  }
+
+  static boolean[] pattern(Count count, long value) {
+    long above = count.requireWithin(value) - count.lowest();
+    return Digits.pattern(above, count.digits());
+  }
+
+  static <T> boolean[] pattern(Order<T> order, List<? extends T> value) {
+    if (value.size() != order.places()) {
+      throw new IllegalArgumentException(
+          "order '"
+              + order.name()
+              + "' has "
+              + order.places()
+              + " places, "
+              + value.size()
+              + " items are given");
+    }
+    boolean[] pattern = new boolean[order.places() * order.items().size()];
+    for (int place = 0; place < value.size(); place++) {
+      pattern[place * order.items().size() + order.positionOf(value.get(place))] = true;
+    }
+    return pattern;
+  }
+
+  static <T> boolean[] pattern(Subset<T> subset, Collection<? extends T> taken) {
+    boolean[] pattern = new boolean[subset.items().size()];
+    for (T item : taken) {
+      pattern[subset.positionOf(item)] = true;
+    }
+    return pattern;
   }
 
   /** Any of them, for a text. */

@@ -56,9 +56,7 @@ public final class PlanEnumeration {
     for (Decision decision : statement.decisions()) {
       List<List<Integer>> groups = statement.exactlyOne(decision);
       groups.forEach(group -> radixes.add(group.size()));
-      for (int k = 0; k < statement.literals(decision) && groups.isEmpty(); k++) {
-        radixes.add(2);
-      }
+      statement.free(decision).forEach(literal -> radixes.add(2));
     }
     return radixes;
   }
@@ -104,9 +102,8 @@ public final class PlanEnumeration {
           score.turnOn(group.get(0));
           moving.add(new int[] {group.get(0), group.size(), 1});
         }
-        int literals = groups.isEmpty() ? statement.literals(decision) : 0;
-        for (int k = 0; k < literals; k++) {
-          moving.add(new int[] {statement.firstLiteral(decision) + k, 2, 0});
+        for (int literal : statement.free(decision)) {
+          moving.add(new int[] {literal, 2, 0});
         }
       }
       moving.removeIf(one -> one[1] == 1);
