@@ -18,6 +18,8 @@ import java.util.List;
 final class Variables {
   private final int[] first;
   private final int[] variableOf;
+  private static final int FIXED = -1;
+
   private final int[] valueOf;
   private final boolean[] alone;
   private final int literals;
@@ -39,6 +41,7 @@ final class Variables {
   static Variables of(Statement statement, int auxiliary) {
     int literals = statement.literals();
     int[] valueOf = new int[literals];
+    Arrays.fill(valueOf, FIXED);
     boolean[] alone = new boolean[literals];
     List<Integer> first = new ArrayList<>();
     int next = 0;
@@ -50,9 +53,7 @@ final class Variables {
           valueOf[literal] = next++;
         }
       }
-      int single = groups.isEmpty() ? statement.literals(decision) : 0;
-      for (int k = 0; k < single; k++) {
-        int literal = statement.firstLiteral(decision) + k;
+      for (int literal : statement.free(decision)) {
         first.add(next);
         valueOf[literal] = next + 1;
         alone[literal] = true;
@@ -107,7 +108,7 @@ final class Variables {
     boolean[] holds = new boolean[literals];
     for (int literal = 0; literal < literals; literal++) {
       int value = valueOf[literal];
-      holds[literal] = chosen[variableOf[value]] == value;
+      holds[literal] = value != FIXED && chosen[variableOf[value]] == value;
     }
     return State.of(holds);
   }
@@ -117,6 +118,9 @@ final class Variables {
     int[] taken = new int[literals];
     int count = 0;
     for (int literal = 0; literal < literals; literal++) {
+      if (valueOf[literal] == FIXED) {
+        continue;
+      }
       if (holding.get(literal)) {
         taken[count++] = valueOf[literal];
       } else if (alone[literal]) {
