@@ -8,7 +8,7 @@ import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.IntFunction;
+import java.util.function.Function;
 
 /**
  * A named condition that a model requires or prefers, in whole numbers.
@@ -39,8 +39,8 @@ public final class Rule {
   }
 
   /** What is left of the rule where decisions are fixed. */
-  Rule fixed(Fixing fixing, IntFunction<Decision> decisionOf) {
-    List<Part> left = parts.stream().map(part -> part.fixed(fixing, decisionOf)).toList();
+  Rule fixed(Fixing fixing, Function<Polynomial, Range> rangeOf) {
+    List<Part> left = parts.stream().map(part -> part.fixed(fixing, rangeOf)).toList();
     for (Part part : left) {
       boolean apart = part.highest() < part.range.lowest() || part.lowest() > part.range.highest();
       boolean between = part.step() == 1 && part.terms().terms() > 0 && !part.divisible();
@@ -146,9 +146,9 @@ public final class Rule {
       this.range = range;
     }
 
-    private Part fixed(Fixing fixing, IntFunction<Decision> decisionOf) {
+    private Part fixed(Fixing fixing, Function<Polynomial, Range> rangeOf) {
       ScaledCondition left = condition.fixed(fixing);
-      return new Part(left, price, Ranges.of(left.terms(), decisionOf));
+      return new Part(left, price, rangeOf.apply(left.terms()));
     }
 
     /** The same in a model that has more literals by now. */

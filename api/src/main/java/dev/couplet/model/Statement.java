@@ -89,7 +89,7 @@ public final class Statement {
 
   private Rule inLiterals(Rule rule, int literals) {
     Rule wide = rule.inLiterals(literals);
-    return fixing.isEmpty() ? wide : wide.fixed(fixing, literal -> decisionOf[literal]);
+    return fixing.isEmpty() ? wide : wide.fixed(fixing, this::range);
   }
 
   private static Polynomial sum(List<Objective> objectives, int literals) {
