@@ -55,7 +55,7 @@ final class Likeness {
     statement.rules().stream().filter(kept).forEach(this::add);
     for (int d = 0; d < statement.decisions().size(); d++) {
       Decision decision = statement.decisions().get(d);
-      if (decision instanceof Choice<?> choice) {
+      if (decision instanceof Choice<?> choice && !statement.isFixed(choice)) {
         for (int k = 0; k < choice.options().size(); k++) {
           Object option = choice.options().get(k);
           literals
