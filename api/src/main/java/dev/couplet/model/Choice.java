@@ -1,8 +1,11 @@
 package dev.couplet.model;
 
 import dev.couplet.form.CheckReturnValue;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
+import java.util.function.ToDoubleBiFunction;
+import java.util.function.ToDoubleFunction;
 
 /**
  * A decision for exactly one of several options.
@@ -50,6 +53,37 @@ public final class Choice<T> implements Decision {
    */
   public Literal is(T option) {
     return new Fact(this, slot, positionOf(option));
+  }
+
+  /**
+   * The number that a table has for the option that the choice is.
+   *
+   * @throws IllegalArgumentException naming the option, if its number is not finite
+   */
+  public Expr lookUp(ToDoubleFunction<? super T> table) {
+    return Expr.sum(
+        options(), option -> is(option).times(entry(table.applyAsDouble(option), option)));
+  }
+
+  /**
+   * The number that a table has for the options that this and another choice are, say a distance.
+   *
+   * @throws IllegalArgumentException naming the options, if their number is not finite, or if the
+   *     other choice is of another model
+   */
+  public <U> Expr lookUp(Choice<U> other, ToDoubleBiFunction<? super T, ? super U> table) {
+    List<Expr> entries = new ArrayList<>();
+    for (T row : options()) {
+      for (U column : other.options()) {
+        double number = entry(table.applyAsDouble(row, column), row + ", " + column);
+        entries.add(is(row).times(other.is(column)).times(number));
+      }
+    }
+    return Expr.sum(entries);
+  }
+
+  private double entry(double number, Object options) {
+    return Check.finite("what the table of choice '" + name + "' has for " + options, number);
   }
 
   int positionOf(T option) {

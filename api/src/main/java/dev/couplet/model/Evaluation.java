@@ -20,7 +20,9 @@ final class Evaluation {
     while (!pending.isEmpty()) {
       Pending next = pending.pop();
       double factor = next.factor();
-      if (next.expr() instanceof Literal literal) {
+      if (next.expr() instanceof Compound compound) {
+        sum += compound.holds(holds) ? factor : 0;
+      } else if (next.expr() instanceof Literal literal) {
         sum += holds.test(literal) ? factor : 0;
       } else if (next.expr() instanceof Spin spin) {
         pending.push(new Pending(spin.inLiterals(), factor));

@@ -7,6 +7,7 @@ import java.util.Deque;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Multiplies an expression out: coefficients and, for each, the literals of its product. Terms with
@@ -20,6 +21,7 @@ import java.util.Map;
 final class Expansion<N> {
   private static final int[] NONE = {};
   private static final int MERGED_ABOVE = 2;
+  private static final int MOST_TERMS = 1 << 20;
 
   /** What is still to be walked: an expression, of a sum the parts from a position on. */
   private record Pending<N>(Expr expr, N factor, int from) {}
@@ -67,7 +69,9 @@ final class Expansion<N> {
     while (!pending.isEmpty()) {
       Pending<N> next = pending.pop();
       N factor = next.factor();
-      if (next.expr() instanceof Literal literal) {
+      if (next.expr() instanceof Compound compound) {
+        addCompound(compound, factor);
+      } else if (next.expr() instanceof Literal literal) {
         addLiteral(literal, factor);
       } else if (next.expr() instanceof Spin spin) {
         pending.push(new Pending<>(spin.inLiterals(), factor, 0));
@@ -79,7 +83,7 @@ final class Expansion<N> {
         N inner = arithmetic.times(factor, arithmetic.of(scaled.factor));
         pending.push(new Pending<>(scaled.part, inner, 0));
       } else if (next.expr() instanceof Node.Product product) {
-        addProduct(product.factors(), factor);
+        addProduct(product.factors(), factor, null);
       } else if (next.expr() instanceof Node.Sum sum && next.from() < sum.parts.size()) {
         pending.push(new Pending<>(sum, factor, next.from() + 1));
         pending.push(new Pending<>(sum.parts.get(next.from()), factor, 0));
@@ -96,14 +100,55 @@ final class Expansion<N> {
     }
   }
 
-  /** Numbers and plain literals make one term; only what else there is gets multiplied out. */
-  private void addProduct(List<Expr> factors, N factor) {
+  private void addCompound(Compound compound, N factor) {
+    switch (compound.kind()) {
+      case ALL -> addProduct(compound.parts(), factor, compound);
+      case ANY -> {
+        sink.add(factor, NONE);
+        N negative = arithmetic.times(factor, arithmetic.of(-1));
+        addProduct(compound.negatedParts(), negative, compound);
+      }
+      case ODD -> addOdd(compound, factor);
+    }
+  }
+
+  /** Part by part, a and b become {@code a + b - 2 a b}. */
+  private void addOdd(Compound compound, N factor) {
+    Terms<N> odd = new Terms<>(arithmetic);
+    for (Literal part : compound.parts()) {
+      Terms<N> next = new Terms<>(arithmetic);
+      walk(part, arithmetic, next);
+      requireFew(odd, next, compound);
+      Terms<N> both = odd.times(next);
+      next.forEach(odd);
+      both.forEach((n, product) -> odd.add(arithmetic.times(n, arithmetic.of(-2)), product));
+    }
+    odd.merged().forEach((n, product) -> sink.add(arithmetic.times(factor, n), product));
+  }
+
+  private static <N> void requireFew(Terms<N> left, Terms<N> right, @Nullable Compound compound) {
+    if (compound != null && (long) left.products.size() * right.products.size() > MOST_TERMS) {
+      throw new IllegalArgumentException(
+          "the literal "
+              + compound
+              + " has more than "
+              + MOST_TERMS
+              + " terms when it is multiplied out; state it as a condition (isTrue, implies), or"
+              + " give it a bit of its own by require(name, bit.equalTo(literal))");
+    }
+  }
+
+  /**
+   * Numbers and plain literals make one term; only what else there is gets multiplied out. The
+   * factors of a literal that is made of others may not come to too many terms.
+   */
+  private void addProduct(List<? extends Expr> factors, N factor, @Nullable Compound compound) {
     int[] plain = new int[factors.size()];
     int count = 0;
     N coefficient = factor;
     List<Expr> others = new ArrayList<>();
     for (Expr part : factors) {
-      if (part instanceof Literal literal && !literal.negated()) {
+      if (part instanceof Literal literal && literal.index() >= 0 && !literal.negated()) {
         plain[count++] = literal.index();
       } else if (part instanceof Node.Constant constant) {
         coefficient = arithmetic.times(coefficient, arithmetic.of(constant.value));
@@ -121,11 +166,10 @@ final class Expansion<N> {
     for (Expr part : others) {
       Terms<N> next = new Terms<>(arithmetic);
       walk(part, arithmetic, next);
+      requireFew(result, next, compound);
       result = result.times(next);
     }
-    for (int t = 0; t < result.products.size(); t++) {
-      sink.add(result.coefficients.get(t), result.products.get(t));
-    }
+    result.forEach(sink);
   }
 
   /** Terms on their way to a product. */
@@ -142,6 +186,12 @@ final class Expansion<N> {
     public void add(N coefficient, int[] product) {
       coefficients.add(coefficient);
       products.add(product);
+    }
+
+    void forEach(Sink<N> target) {
+      for (int t = 0; t < products.size(); t++) {
+        target.add(coefficients.get(t), products.get(t));
+      }
     }
 
     Terms<N> times(Terms<N> other) {

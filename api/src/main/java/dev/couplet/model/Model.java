@@ -263,15 +263,19 @@ public final class Model {
    *     its decimals do not fit into exact whole numbers, or it speaks of another model
    */
   public Rule require(String ruleName, Condition condition) {
-    Rule rule = rule(ruleName, condition, Optional.empty());
-    for (int p = 0; p < rule.parts().size(); p++) {
-      requirePossible(ruleName, condition.parts().get(p), rule.parts().get(p));
-    }
-    return add(rule);
+    return add(rule(ruleName, condition, Optional.empty()));
   }
 
   private static void requirePossible(String rule, Condition.Part condition, Rule.Part part) {
-    if (part.step() == 1 && part.terms().terms() > 0 && !part.divisible()) {
+    if (part.terms().terms() == 0 && !part.alwaysKept()) {
+      throw new IllegalArgumentException(
+          "rule '"
+              + rule
+              + "' can be kept by no plan: "
+              + condition
+              + " speaks of no decision and never holds");
+    }
+    if (part.terms().terms() > 0 && !part.divisible()) {
       throw new IllegalArgumentException(
           "rule '"
               + rule
@@ -301,12 +305,28 @@ public final class Model {
    * @throws IllegalArgumentException as for {@link #require}, or if the cost is negative
    */
   public Rule prefer(String ruleName, Condition condition, double costPerUnit) {
+    return prefer(ruleName, condition, costPerUnit, false);
+  }
+
+  /**
+   * Prefers a condition at a cost that grows with the square of the amount by which a plan misses
+   * it: missed by 3 units, it costs nine times {@code costOfFirstUnit}. Of a condition of several
+   * parts each is squared by itself.
+   *
+   * @return the rule, with whole coefficients
+   * @throws IllegalArgumentException as for {@link #prefer}
+   */
+  public Rule preferSquared(String ruleName, Condition condition, double costOfFirstUnit) {
+    return prefer(ruleName, condition, costOfFirstUnit, true);
+  }
+
+  private Rule prefer(String ruleName, Condition condition, double costPerUnit, boolean squared) {
     Check.finite("the cost of rule '" + ruleName + "'", costPerUnit);
     if (costPerUnit < 0) {
       throw new IllegalArgumentException(
           "the cost of rule '" + ruleName + "' is " + costPerUnit + ", it must be 0 or more");
     }
-    return add(rule(ruleName, condition, Optional.of(new Rule.Price(costPerUnit, false))));
+    return add(rule(ruleName, condition, Optional.of(new Rule.Price(costPerUnit, squared))));
   }
 
   private Rule rule(String ruleName, Condition condition, Optional<Rule.Price> price) {
@@ -314,15 +334,28 @@ public final class Model {
     List<Rule.Part> parts = new ArrayList<>();
     for (Condition.Part part : condition.parts()) {
       requireOwner(part.expr(), this);
-      ScaledCondition scaled = ScaledCondition.of(ruleName, part, decisionOfLiteral.size());
-      Range range =
-          Ranges.of(
-              scaled.terms(),
-              literal -> Slot.of(decisionOf(literal)).groups() > 0,
-              decisionOfLiteral::get);
-      parts.add(new Rule.Part(scaled, price.orElse(Rule.Price.NONE), range));
+      part.guards().forEach(guard -> requireOwner(guard, this));
+      for (ScaledCondition scaled : withoutGuards(ruleName, part)) {
+        Range range = rangeOf(scaled.terms());
+        Rule.Part made = new Rule.Part(scaled, price.orElse(Rule.Price.NONE), range);
+        if (price.isEmpty() && part.guards().isEmpty()) {
+          requirePossible(ruleName, part, made);
+        }
+        parts.add(made);
+      }
     }
     return new Rule(ruleName, price, parts);
+  }
+
+  private Range rangeOf(Polynomial terms) {
+    return Ranges.of(
+        terms, literal -> Slot.of(decisionOf(literal)).groups() > 0, decisionOfLiteral::get);
+  }
+
+  private List<ScaledCondition> withoutGuards(String ruleName, Condition.Part part) {
+    Condition.Part plain = part.guards().isEmpty() ? part : part.withoutSteps();
+    ScaledCondition scaled = ScaledCondition.of(ruleName, plain, decisionOfLiteral.size());
+    return Relaxed.of(ruleName, scaled, part.guards(), this::rangeOf);
   }
 
   private Rule add(Rule rule) {

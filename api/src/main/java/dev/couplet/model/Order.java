@@ -154,7 +154,7 @@ public final class Order<T> implements Decision {
     List<Condition.Part> parts = new ArrayList<>();
     double lowest = places == items.size() ? 1 : Double.NEGATIVE_INFINITY;
     for (T item : items()) {
-      parts.add(new Condition.Part(contains(item), lowest, 1, 0));
+      parts.add(new Condition.Part(contains(item), lowest, 1));
     }
     return new Condition(parts);
   }

@@ -151,6 +151,9 @@ public final class Plan implements Comparable<Plan> {
 
   /** Whether a literal holds. */
   public boolean holds(Literal literal) {
+    if (literal instanceof Compound compound) {
+      return compound.holds(this::holds);
+    }
     statement.require(literal.owner().decisionOf(literal.index()));
     return literals.get(literal.index()) != literal.negated();
   }

@@ -201,9 +201,14 @@ public final class Rule {
       return factor[0].doubleValue();
     }
 
-    /** Whether some multiple of the coefficients' common factor lies between the limits. */
+    /** Whether some multiple of the coefficients' common factor keeps the limits. */
     boolean divisible() {
       double divisor = divisor();
+      if (step() > 1) {
+        BigInteger common =
+            BigInteger.valueOf((long) divisor).gcd(BigInteger.valueOf((long) step()));
+        return lowest() % common.doubleValue() == 0;
+      }
       return Math.ceil(lowest() / divisor) <= Math.floor(highest() / divisor);
     }
 

@@ -106,7 +106,7 @@ record ScaledCondition(
   }
 
   /** Below 2^51 every sum of the coefficients is exact, also while equal products add up. */
-  private static void requireExact(String rule, BigDecimal magnitude) {
+  static void requireExact(String rule, BigDecimal magnitude) {
     if (magnitude.compareTo(LIMIT) >= 0) {
       throw new IllegalArgumentException(
           "the whole coefficients of rule '"
@@ -122,7 +122,7 @@ record ScaledCondition(
   }
 
   /** Without the largest factor common to all coefficients and limits. */
-  private ScaledCondition reduced() {
+  ScaledCondition reduced() {
     BigInteger[] factor = {BigInteger.ZERO};
     terms.forEachTerm((coefficient, literals) -> factor[0] = factor[0].gcd(whole(coefficient)));
     for (double limit : new double[] {lowest, highest, step}) {

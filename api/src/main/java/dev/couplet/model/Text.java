@@ -75,7 +75,11 @@ final class Text {
       if (next instanceof String symbol) {
         text.append(symbol);
       } else if (next instanceof Node.Sum sum) {
-        pushAll(pending, sum.parts);
+        pushAll(pending, sum.parts, " + ");
+      } else if (next instanceof Compound compound) {
+        pending.push(")");
+        pushAll(pending, compound.parts(), " " + compound.kind().word + " ");
+        pending.push("(");
       } else if (next instanceof Node.Product product) {
         push(pending, "(", product.left, ")(", product.right, ")");
       } else if (next instanceof Node.Scaled scaled) {
@@ -95,14 +99,14 @@ final class Text {
     }
   }
 
-  private static void pushAll(Deque<Object> pending, List<Expr> parts) {
+  private static void pushAll(Deque<Object> pending, List<? extends Expr> parts, String between) {
     if (parts.isEmpty()) {
       pending.push("0");
     }
     for (int i = parts.size() - 1; i >= 0; i--) {
       pending.push(parts.get(i));
       if (i > 0) {
-        pending.push(" + ");
+        pending.push(between);
       }
     }
   }
