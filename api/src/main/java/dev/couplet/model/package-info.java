@@ -11,8 +11,8 @@
  * as a named {@link dev.couplet.model.Rule}. A {@link dev.couplet.model.Plan} holds a value for
  * every decision, and is checked against the model itself.
  *
- * <p>Literals combine to literals by and, or, xor and not ({@code Compound}); {@code Logic} finds the
- * lightest sums that say what they say, {@code Relaxed} limits that matter only where a literal
+ * <p>Literals combine to literals by and, or, xor and not ({@code Compound}); {@code Logic} finds
+ * the lightest sums that say what they say, {@code Relaxed} limits that matter only where a literal
  * holds.
  *
  * <p>Rules are kept with integer coefficients (decimals are scaled exactly), so that whether a rule
