@@ -1,5 +1,6 @@
 package dev.couplet.bench.cli;
 
+import dev.couplet.bench.instances.Cities;
 import dev.couplet.bench.instances.Instance;
 import dev.couplet.bench.instances.InstanceReader;
 import dev.couplet.bench.instances.Seeded;
@@ -13,6 +14,7 @@ import picocli.CommandLine.Parameters;
 /** Where an instance comes from: the same parameter and options for every verb that reads one. */
 final class Inputs {
   private static final String SEEDED = "seeded:";
+  private static final String CITIES = "cities:";
 
   @Parameters(
       paramLabel = "FILE",
@@ -23,7 +25,8 @@ final class Inputs {
             + " symmetric tour, a QAPLIB quadratic assignment, an OR-Library generalised"
             + " assignment or multi-dimensional knapsack, a job shop. Files compressed with gzip"
             + " are read through. Also seeded:NAME, a published seeded instance such as"
-            + " seeded:p3000.1, or seeded:N:DENSITY:SEED."
+            + " seeded:p3000.1, or seeded:N:DENSITY:SEED; and cities:N:SEED, a tour of invented"
+            + " cities."
       })
   private String file = "";
 
@@ -45,6 +48,9 @@ final class Inputs {
   Instance read() throws IOException {
     if (file.startsWith(SEEDED)) {
       return Seeded.parse(file.substring(SEEDED.length())).generate();
+    }
+    if (file.startsWith(CITIES)) {
+      return Cities.parse(file.substring(CITIES.length())).generate();
     }
     InstanceReader reader = InstanceReader.standard();
     if (kind != null) {

@@ -1,6 +1,7 @@
 package dev.couplet.bench.models;
 
 import dev.couplet.model.Bit;
+import dev.couplet.model.Count;
 import dev.couplet.model.Expr;
 import dev.couplet.model.Model;
 import dev.couplet.model.Plan;
@@ -28,9 +29,9 @@ public final class JobShop {
   private static final int LONGEST = 1 << 29;
 
   /** An operation, its place in the order of all, and the number that says when it begins. */
-  private record Task(Operation operation, int place, WholeNumber start) {
+  private record Task(Operation operation, int place, Count start) {
     Expr until(Task other) {
-      return other.start.expr().minus(start.expr());
+      return other.start.minus(start);
     }
   }
 
@@ -39,9 +40,9 @@ public final class JobShop {
   private final Statement statement;
   private final List<Task> tasks;
   private final List<Pair> pairs;
-  private final WholeNumber makespan;
+  private final Count makespan;
 
-  private JobShop(Statement statement, List<Task> tasks, List<Pair> pairs, WholeNumber makespan) {
+  private JobShop(Statement statement, List<Task> tasks, List<Pair> pairs, Count makespan) {
     this.statement = statement;
     this.tasks = tasks;
     this.pairs = pairs;
@@ -61,11 +62,11 @@ public final class JobShop {
     int longest = jobs.stream().mapToInt(JobShop::time).max().orElse(0);
     List<Task> tasks = new ArrayList<>();
     jobs.forEach(job -> addTasks(model, job, horizon, tasks));
-    WholeNumber makespan = new WholeNumber(model, "makespan", longest, horizon);
+    Count makespan = model.count("makespan", longest, horizon);
     requireOrder(model, tasks, makespan);
     List<Pair> pairs = new ArrayList<>();
     onMachines(tasks).forEach(onOne -> addPairs(model, onOne, pairs));
-    model.minimize("makespan", makespan.expr());
+    model.minimize("makespan", makespan);
     return new JobShop(model.snapshot(), List.copyOf(tasks), List.copyOf(pairs), makespan);
   }
 
@@ -90,14 +91,14 @@ public final class JobShop {
     int before = 0;
     int left = time(job);
     for (Operation operation : job) {
-      WholeNumber start = new WholeNumber(model, "start of " + operation, before, horizon - left);
+      Count start = model.count("start of " + operation, before, horizon - left);
       tasks.add(new Task(operation, tasks.size(), start));
       before += operation.time();
       left -= operation.time();
     }
   }
 
-  private static void requireOrder(Model model, List<Task> tasks, WholeNumber makespan) {
+  private static void requireOrder(Model model, List<Task> tasks, Count makespan) {
     for (int k = 0; k < tasks.size(); k++) {
       Task task = tasks.get(k);
       int job = task.operation().job();
@@ -106,9 +107,7 @@ public final class JobShop {
         Task next = tasks.get(k + 1);
         model.require(next.operation() + " after the one before", task.until(next).atLeast(time));
       } else {
-        model.require(
-            "job " + job + " ends in time",
-            makespan.expr().minus(task.start().expr()).atLeast(time));
+        model.require("job " + job + " ends in time", makespan.minus(task.start()).atLeast(time));
       }
     }
   }
@@ -140,11 +139,11 @@ public final class JobShop {
   /** Unless the literal holds: then the distance may be as small as the windows let it be. */
   private static void requireBefore(Model model, Task first, Task second, Expr unless) {
     int time = first.operation().time();
-    int smallest = second.start().lowest() - first.start().highest();
-    int slackened = Math.max(0, time - smallest);
+    long smallest = second.start().lowest() - first.start().highest();
+    long slackened = Math.max(0, time - smallest);
     model.require(
         first.operation() + " done before " + second.operation() + ", if it comes first",
-        first.until(second).plus(unless.times(slackened)).atLeast(time));
+        first.until(second).plus(unless.times((double) slackened)).atLeast(time));
   }
 
   /** The statement. */
@@ -162,17 +161,16 @@ public final class JobShop {
   public Plan plan(List<Integer> starts) {
     Places.requireLength("starts", starts.size(), tasks.size());
     Plan.Draft draft = statement.plan();
-    int end = makespan.lowest();
+    long end = makespan.lowest();
     for (Task task : tasks) {
       int start = starts.get(task.place());
-      task.start().set(draft, start);
+      draft.set(task.start(), start);
       end = Math.max(end, start + task.operation().time());
     }
     for (Pair pair : pairs) {
       int oneEnds = starts.get(pair.one().place()) + pair.one().operation().time();
       draft.set(pair.oneFirst(), oneEnds <= starts.get(pair.other().place()));
     }
-    makespan.set(draft, end);
-    return draft.evaluate();
+    return draft.set(makespan, end).evaluate();
   }
 }

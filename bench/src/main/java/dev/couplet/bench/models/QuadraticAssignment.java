@@ -2,18 +2,18 @@ package dev.couplet.bench.models;
 
 import static dev.couplet.model.Expr.sum;
 
-import dev.couplet.model.Choice;
 import dev.couplet.model.Expr;
-import dev.couplet.model.Family;
 import dev.couplet.model.Model;
+import dev.couplet.model.Order;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
  * Quadratic assignment: a permutation p with the least sum of {@code a(i, j) b(p(i), p(j))} over
- * all ordered pairs. A choice of p(i) for each i, and each place is taken exactly once. Lowered it
+ * all ordered pairs. An order of the things, the places being where they stand in it. Lowered it
  * has n^2 bits and O(n^4) pairs. Immutable.
  *
  * <p>Source: Koopmans and Beckmann, "Assignment problems and the location of economic activities"
@@ -22,11 +22,11 @@ import java.util.List;
  */
 public final class QuadraticAssignment {
   private final Statement statement;
-  private final Family<Integer, Choice<Integer>> placeOf;
+  private final Order<Integer> things;
 
-  private QuadraticAssignment(Statement statement, Family<Integer, Choice<Integer>> placeOf) {
+  private QuadraticAssignment(Statement statement, Order<Integer> things) {
     this.statement = statement;
-    this.placeOf = placeOf;
+    this.things = things;
   }
 
   /**
@@ -41,15 +41,15 @@ public final class QuadraticAssignment {
     b.require("the second matrix", n, n);
     Places.requireFew("quadratic assignment " + name, nonzero(a) * nonzero(b));
     Model model = Model.named(name);
-    List<Integer> places = Places.upTo(n);
-    Family<Integer, Choice<Integer>> placeOf = model.choices("place of", places, places);
-    for (int place : places) {
-      model.require(
-          "place " + place + " is taken once",
-          sum(places, i -> placeOf.of(i).is(place)).exactly(1));
+    Order<Integer> things = model.order("things by place", Places.upTo(n));
+    List<Expr> costs = new ArrayList<>();
+    for (int i = 1; i <= n; i++) {
+      for (int j = 1; j <= n; j++) {
+        addCosts(a.at(i - 1, j - 1), i, j, b, things, costs);
+      }
     }
-    model.minimize("cost", cost(a, b, placeOf));
-    return new QuadraticAssignment(model.snapshot(), placeOf);
+    model.minimize("cost", sum(costs));
+    return new QuadraticAssignment(model.snapshot(), things);
   }
 
   private static double nonzero(NumberTable table) {
@@ -62,43 +62,42 @@ public final class QuadraticAssignment {
     return count;
   }
 
-  private static Expr cost(NumberTable a, NumberTable b, Family<Integer, Choice<Integer>> placeOf) {
-    List<Expr> products = new ArrayList<>();
-    for (int i = 1; i <= a.rows(); i++) {
-      for (int j = 1; j <= a.rows(); j++) {
-        double flow = a.at(i - 1, j - 1);
-        if (flow != 0) {
-          addProducts(flow, b, placeOf.of(i), placeOf.of(j), products);
-        }
-      }
-    }
-    return sum(products);
-  }
-
   /** Two things stand at two places; one thing at one. */
-  private static void addProducts(
-      double flow, NumberTable b, Choice<Integer> one, Choice<Integer> other, List<Expr> products) {
-    for (int k : one.options()) {
-      for (int l : one.options()) {
-        double cost = flow * b.at(k - 1, l - 1);
-        if (cost != 0 && (one == other) == (k == l)) {
-          products.add(
-              one == other ? one.is(k).times(cost) : one.is(k).times(other.is(l)).times(cost));
+  private static void addCosts(
+      double flow, int i, int j, NumberTable b, Order<Integer> things, List<Expr> costs) {
+    for (int k = 0; k < b.rows(); k++) {
+      for (int l = 0; l < b.rows(); l++) {
+        double cost = flow * b.at(k, l);
+        if (cost != 0 && (i == j) == (k == l)) {
+          Expr both = i == j ? things.at(i, k) : things.at(i, k).times(things.at(j, l));
+          costs.add(both.times(cost));
         }
       }
     }
   }
 
-  /** The statement; its things and places are counted from 1. */
+  /** The statement; its things are counted from 1, its places from 0. */
   public Statement statement() {
     return statement;
   }
 
-  /** The plan of a permutation: p(1), p(2), ..., counted from 1. */
-  public Plan plan(int... permutation) {
-    Places.requireLength("places", permutation.length, placeOf.keys().size());
-    Plan.Draft draft = statement.plan();
-    placeOf.keys().forEach(i -> draft.set(placeOf.of(i), permutation[i - 1]));
-    return draft.evaluate();
+  /**
+   * The plan of a permutation: p(1), p(2), ..., counted from 1.
+   *
+   * @throws IllegalArgumentException if it is none
+   */
+  public Plan plan(List<Integer> permutation) {
+    int n = things.places();
+    Places.requireLength("places", permutation.size(), n);
+    Integer[] at = new Integer[n];
+    for (int i = 1; i <= n; i++) {
+      int place = permutation.get(i - 1);
+      if (place < 1 || place > n || at[place - 1] != null) {
+        throw new IllegalArgumentException(
+            "p(" + i + ") is " + place + ", places 1 to " + n + " are taken once each");
+      }
+      at[place - 1] = i;
+    }
+    return statement.plan().set(things, Arrays.asList(at)).evaluate();
   }
 }

@@ -2,19 +2,19 @@ package dev.couplet.bench.models;
 
 import static dev.couplet.model.Expr.sum;
 
-import dev.couplet.model.Choice;
 import dev.couplet.model.Expr;
-import dev.couplet.model.Family;
 import dev.couplet.model.Model;
+import dev.couplet.model.Order;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 
 /**
- * The shortest closed tour through all cities: city 1 stands first, each later place has a choice
- * among the others, and each of these stands at exactly one place. The value is the length, to be
- * minimised. Lowered it has (n - 1)^2 bits and O(n^3) pairs. Immutable.
+ * The shortest closed tour through all cities: city 1 stands first, and the others have an order.
+ * The value is the length, to be minimised. Lowered it has (n - 1)^2 bits and O(n^3) pairs.
+ * Immutable.
  *
  * <p>Source: Lucas, "Ising formulations of many NP problems" (2014), section 7.2, with the first
  * place fixed, as he remarks one can; the formulation goes back to Hopfield and Tank, "Neural
@@ -22,11 +22,11 @@ import java.util.List;
  */
 public final class Tour {
   private final Statement statement;
-  private final Family<Integer, Choice<Integer>> cityAt;
+  private final Order<Integer> afterFirst;
 
-  private Tour(Statement statement, Family<Integer, Choice<Integer>> cityAt) {
+  private Tour(Statement statement, Order<Integer> afterFirst) {
     this.statement = statement;
-    this.cityAt = cityAt;
+    this.afterFirst = afterFirst;
   }
 
   /**
@@ -43,39 +43,18 @@ public final class Tour {
     distances.require("the table of distances", n, n);
     Places.requireFew("tour " + name, (double) n * n * n);
     Model model = Model.named(name);
-    List<Integer> others = Places.upTo(n).subList(1, n);
-    Family<Integer, Choice<Integer>> cityAt = model.choices("city at place", others, others);
-    for (int city : others) {
-      model.require(
-          "city " + city + " stands at one place",
-          sum(others, place -> cityAt.of(place).is(city)).exactly(1));
+    Order<Integer> afterFirst = model.order("tour", Places.upTo(n).subList(1, n));
+    List<Expr> length = new ArrayList<>();
+    length.add(afterFirst.stepCost((from, to) -> distances.at(from - 1, to - 1)));
+    for (int city : afterFirst.items()) {
+      length.add(afterFirst.first(city).times(distances.at(0, city - 1)));
+      length.add(afterFirst.last(city).times(distances.at(city - 1, 0)));
     }
-    model.minimize("length", length(distances, cityAt, others));
-    return new Tour(model.snapshot(), cityAt);
+    model.minimize("length", sum(length));
+    return new Tour(model.snapshot(), afterFirst);
   }
 
-  private static Expr length(
-      NumberTable distances, Family<Integer, Choice<Integer>> cityAt, List<Integer> others) {
-    int n = distances.rows();
-    List<Expr> steps = new ArrayList<>();
-    for (int city : others) {
-      steps.add(cityAt.of(2).is(city).times(distances.at(0, city - 1)));
-      steps.add(cityAt.of(n).is(city).times(distances.at(city - 1, 0)));
-    }
-    for (int place : others.subList(0, n - 2)) {
-      for (int from : others) {
-        for (int to : others) {
-          if (from != to) {
-            Expr both = cityAt.of(place).is(from).times(cityAt.of(place + 1).is(to));
-            steps.add(both.times(distances.at(from - 1, to - 1)));
-          }
-        }
-      }
-    }
-    return sum(steps);
-  }
-
-  /** The statement; its cities and places are counted from 1. */
+  /** The statement; its cities are counted from 1. */
   public Statement statement() {
     return statement;
   }
@@ -84,22 +63,14 @@ public final class Tour {
    * The plan of a tour.
    *
    * @param cities counted from 1, in the order of the tour, beginning anywhere
-   * @throws IllegalArgumentException if city 1 is not among them, or there are too few or many
+   * @throws IllegalArgumentException if the cities are not those of the model, each once
    */
-  public Plan plan(int... cities) {
-    int n = cityAt.keys().size() + 1;
-    Places.requireLength("cities", cities.length, n);
-    int first = 0;
-    while (first < n && cities[first] != 1) {
-      first++;
-    }
-    if (first == n) {
+  public Plan plan(List<Integer> cities) {
+    if (!cities.contains(1)) {
       throw new IllegalArgumentException("city 1 is not on the tour");
     }
-    Plan.Draft draft = statement.plan();
-    for (int place = 2; place <= n; place++) {
-      draft.set(cityAt.of(place), cities[(first + place - 1) % n]);
-    }
-    return draft.evaluate();
+    List<Integer> turned = new ArrayList<>(cities);
+    Collections.rotate(turned, -cities.indexOf(1));
+    return statement.plan().set(afterFirst, turned.subList(1, turned.size())).evaluate();
   }
 }

@@ -75,4 +75,9 @@ final class Formulation {
   static int digits(int highest) {
     return highest == 0 ? 0 : 32 - Integer.numberOfLeadingZeros(highest);
   }
+
+  /** The bits that "at least one of so many" takes, as a product of what does not hold. */
+  static int productBits(int literals) {
+    return literals < 3 ? 0 : digits(literals - 1) - 1;
+  }
 }

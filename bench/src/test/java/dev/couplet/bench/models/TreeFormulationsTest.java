@@ -4,6 +4,7 @@ import static dev.couplet.bench.models.Formulation.assertOptimum;
 import static dev.couplet.bench.models.Formulation.in;
 import static dev.couplet.bench.models.Formulation.least;
 import static dev.couplet.bench.models.Formulation.orders;
+import static dev.couplet.bench.models.Formulation.productBits;
 import static dev.couplet.model.Expr.sum;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
@@ -104,8 +105,8 @@ class TreeFormulationsTest {
     model.minimize("cost", cost(roles, STAR));
     double least = cheapest(STAR, 0b1111, 2);
     assertEquals(6, least);
-    // The root's choice of 1, three of 5 options, and the rule "at most two of three literals".
-    assertOptimum(least, 1 + 3 * 5 + 2, model.snapshot());
+    // The root's choice of 1, three of 5 options, and the rule "not all of three literals".
+    assertOptimum(least, 1 + 3 * 5 + productBits(3), model.snapshot());
   }
 
   private static List<Literal> children(List<Choice<Role>> roles, int parent) {
@@ -214,8 +215,8 @@ class TreeFormulationsTest {
       model.require("edge " + edge[0] + edge[1], sum(reasons).atLeast(1));
     }
     model.minimize("removed", sum(roles, role -> role.is(Role.OUT)));
-    // Three choices of 6, and the rule of an edge says one at least of two choices, 0 or 1 beyond.
-    assertOptimum(1, 3 * 6 + 3, model.snapshot());
+    // Three choices of 6; an edge has two reasons at each depth, and two ends that may be out.
+    assertOptimum(1, 3 * 6 + 3 * productBits(6), model.snapshot());
   }
 
   /** Section 8.5: heights that rise along every arc that is kept. */
@@ -244,7 +245,8 @@ class TreeFormulationsTest {
                     ? Integer.bitCount(s)
                     : NONE);
     assertEquals(1, least, "the arc from 0 to 1 lies on both cycles");
-    // Four arcs, three heights of three vertices, and two rules an arc with slack up to 2.
-    assertOptimum(least, 4 + 3 * 3 + 4 * 2 * 2, model.snapshot());
+    // Four arcs, three heights of three vertices; from the lowest height a rule says one at least
+    // of three literals, from the middle one it takes a slack up to 2.
+    assertOptimum(least, 4 + 3 * 3 + 4 * (productBits(3) + 2), model.snapshot());
   }
 }
