@@ -47,6 +47,13 @@ record Folder(Optional<Path> directory) {
     }
   }
 
+  /** Whether a file is there, for those that may be missing. */
+  boolean holds(String file) {
+    return directory
+        .map(path -> Files.exists(path.resolve(file)))
+        .orElse(Folder.class.getResource(file) != null);
+  }
+
   private InputStream open(String file) throws IOException {
     if (directory.isPresent()) {
       Path path = directory.get().resolve(file);

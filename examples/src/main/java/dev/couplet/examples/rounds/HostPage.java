@@ -20,7 +20,7 @@ final class HostPage {
   }
 
   private String text() {
-    Sheet sheet = Sheet.headed("7. The small copy on a sparse host");
+    Sheet sheet = Sheet.headed("8. The small copy on a sparse host");
     sheet.paragraph(
         "The copy of page 3 once more, where a bit meets only its neighbours on a lattice. Each bit"
             + " becomes a branch set of vertices that are bound to agree.");

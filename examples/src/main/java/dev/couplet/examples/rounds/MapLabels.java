@@ -6,9 +6,9 @@ import java.util.List;
 import java.util.Map;
 
 /**
- * Places the names of villages beside their marks, one after the other, each where it is in
- * nobody's way: off the other names, off the marks, inside the frame, and over as little of the
- * lines as can be.
+ * Sets the names of places beside their marks, one after the other, each where it is in nobody's
+ * way: off the other names, off the marks, inside the frame, and over as little of the lines as can
+ * be.
  */
 final class MapLabels {
   static final double FONT = 14;
@@ -20,7 +20,7 @@ final class MapLabels {
   private final Box frame;
   private final List<Box> marks = new ArrayList<>();
   private final List<double[]> lines = new ArrayList<>();
-  private final Map<Village, Box> placed = new LinkedHashMap<>();
+  private final Map<Place, Box> placed = new LinkedHashMap<>();
 
   MapLabels(Box frame) {
     this.frame = frame;
@@ -36,8 +36,8 @@ final class MapLabels {
     lines.add(new double[] {x1, y1, x2, y2});
   }
 
-  /** Finds the place of a village's name, once all marks and lines are known. */
-  Box place(Village village, String text, double x, double y) {
+  /** Finds room for the name of a place, once all marks and lines are known. */
+  Box place(Place place, String text, double x, double y) {
     Box best = frame;
     double least = Double.POSITIVE_INFINITY;
     for (double away : DISTANCES) {
@@ -49,7 +49,7 @@ final class MapLabels {
         }
       }
     }
-    placed.put(village, best);
+    placed.put(place, best);
     return best;
   }
 

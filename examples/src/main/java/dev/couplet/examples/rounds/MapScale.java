@@ -16,22 +16,22 @@ final class MapScale {
     this.middleNorth = middleNorth;
   }
 
-  static MapScale fitting(List<Village> villages, Box box) {
-    double west = villages.stream().mapToInt(Village::east).min().orElse(0);
-    double east = villages.stream().mapToInt(Village::east).max().orElse(0);
-    double south = villages.stream().mapToInt(Village::north).min().orElse(0);
-    double north = villages.stream().mapToInt(Village::north).max().orElse(0);
+  static MapScale fitting(List<? extends Place> places, Box box) {
+    double west = places.stream().mapToInt(Place::east).min().orElse(0);
+    double east = places.stream().mapToInt(Place::east).max().orElse(0);
+    double south = places.stream().mapToInt(Place::north).min().orElse(0);
+    double north = places.stream().mapToInt(Place::north).max().orElse(0);
     double across = box.width() / Math.max(1, east - west);
     double along = box.height() / Math.max(1, north - south);
     return new MapScale(box, Math.min(across, along), (west + east) / 2, (south + north) / 2);
   }
 
-  double x(Village village) {
-    return box.x() + (village.east() - middleEast) * unitsPerMetre;
+  double x(Place place) {
+    return box.x() + (place.east() - middleEast) * unitsPerMetre;
   }
 
-  double y(Village village) {
-    return box.y() - (village.north() - middleNorth) * unitsPerMetre;
+  double y(Place place) {
+    return box.y() - (place.north() - middleNorth) * unitsPerMetre;
   }
 
   double units(double metres) {

@@ -34,8 +34,10 @@ final class ModelPage {
     pairs(columns, RuleKind.APART, "must not share one", data.apart());
     columns.row("prefer", rules(RuleKind.WISH), wishes());
     columns.row(
-        "minimise", "", "the distances between every two villages of the same van, in metres,");
-    columns.row("", "", "and what the wishes that are not granted cost");
+        "minimise",
+        "",
+        "the distances between every two villages of the same van, in metres, and what the wishes"
+            + " that are not granted cost");
     return Sheet.headed("1. The model").table(columns).toString();
   }
 

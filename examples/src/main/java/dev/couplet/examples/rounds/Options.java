@@ -11,19 +11,23 @@ import picocli.CommandLine.Option;
 /** What can be said on the command line. */
 @Command(
     name = "rounds",
-    usageHelpWidth = 96,
+    usageHelpWidth = 80,
     description =
         "Decides which van of a mobile library serves which village, so that the villages of a van"
             + " lie close together. Prints the model, its lowering to a quadratic form, an audit of"
-            + " the lowering, the plan, how good it is, and a small copy of it on a sparse host.",
+            + " the lowering, the plan, how good it is, the order in which each van visits its"
+            + " villages, and a small copy of it all on a sparse host.",
     footer = {
       "",
-      "The folder of --data holds five files in UTF-8; the first line of each names its columns:",
+      "The folder of --data holds files in UTF-8; the first line of each names its",
+      "columns. All must be there but the last:",
       "  villages.csv   village,crates,east,north   metres on the map, whole numbers",
       "  vans.csv       van,crates                  how many crates it carries",
       "  wishes.csv     village,van,metres          what the wish is worth",
       "  together.csv   village,other               these two must share a van",
       "  apart.csv      village,other               these two must not",
+      "  library.csv    east,north                  where the vans start and return;",
+      "                                             without it: the villages' mean",
       "Lines that begin with # and other columns are not read.",
       "",
       "Exit status: 0 a plan that keeps all rules, 1 none found, 2 bad use or input."
@@ -47,8 +51,8 @@ final class Options {
       names = "--seconds",
       paramLabel = "S",
       description =
-          "How long to search at most: half for draws, half for the solver (default:"
-              + " ${DEFAULT-VALUE}).")
+          "How long to search at most: half for draws, half for the solver; then as long again for"
+              + " the order of the visits (default: ${DEFAULT-VALUE}).")
   private double seconds = 5;
 
   @Option(

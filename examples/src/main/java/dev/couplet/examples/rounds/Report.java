@@ -16,6 +16,7 @@ import java.io.PrintStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.Optional;
 import java.util.function.Function;
 
 /** Goes the way from data to answer, and prints a page after each step. */
@@ -52,9 +53,11 @@ final class Report {
     Answer answer = solve(rounds, lowered.read(draws).best());
     page(PlanPage.of(rounds, answer.plan()));
     page(AnswerPage.of(rounds, answer));
+    Optional<OrderRun> ordered = order(rounds, answer.plan());
+    page(ordered.map(OrderPage::of).orElse(OrderPage.without(answer.plan().feasible())));
     HostRun hosted = host(loweredCopy);
     out.print(HostPage.of(hosted));
-    options.svg().ifPresent(file -> drawMap(file, rounds, answer));
+    options.svg().ifPresent(file -> drawMap(file, rounds, answer, ordered));
     options.hostSvg().ifPresent(file -> drawHost(file, hosted));
     return answer.plan().feasible() && audit.passed() ? 0 : 1;
   }
@@ -106,6 +109,15 @@ final class Report {
     return watched("solving", watch -> solver(rounds, start).solve(rounds.model(), effort, watch));
   }
 
+  /** Takes as long again as draws and solver together, if need be. */
+  private Optional<OrderRun> order(RoundsModel rounds, Plan plan) {
+    if (!OrderRun.possible(rounds, plan)) {
+      return Optional.empty();
+    }
+    Effort effort = draws().limit(options.time(1));
+    return Optional.of(watched("ordering", watch -> OrderRun.of(rounds, plan, effort, watch)));
+  }
+
   private HostRun host(Lowered copy) {
     return watched("hosting", watch -> HostRun.of(copy, draws(), watch));
   }
@@ -137,9 +149,15 @@ final class Report {
     }
   }
 
-  private void drawMap(Path file, RoundsModel rounds, Answer answer) {
-    String summary = AnswerPage.summary(answer);
-    write(file, RoundsMap.svg(rounds.data(), rounds.rounds(answer.plan()), summary));
+  private void drawMap(Path file, RoundsModel rounds, Answer answer, Optional<OrderRun> ordered) {
+    String map =
+        ordered
+            .map(run -> RoundsMap.svg(rounds.data(), run.rounds(), OrderPage.summary(run)))
+            .orElseGet(
+                () ->
+                    RoundsMap.withoutWays(
+                        rounds.data(), rounds.rounds(answer.plan()), AnswerPage.summary(answer)));
+    write(file, map);
     out.println();
     out.println("The map is drawn in " + file);
   }

@@ -6,7 +6,7 @@ import java.util.List;
  * What one van does in a plan.
  *
  * @param van the van
- * @param villages the villages it serves
+ * @param villages the villages it serves; in the order of the visits, once that is decided
  */
 record Round(Van van, List<Village> villages) {
   Round {
@@ -27,5 +27,16 @@ record Round(Van van, List<Village> villages) {
       }
     }
     return sum;
+  }
+
+  /** The way from the library through the villages, one after the other, and back. */
+  long way(Library library) {
+    long sum = 0;
+    Place here = library;
+    for (Village next : villages) {
+      sum += here.distanceTo(next);
+      here = next;
+    }
+    return sum + here.distanceTo(library);
   }
 }

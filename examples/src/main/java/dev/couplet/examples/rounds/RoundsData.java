@@ -10,19 +10,31 @@ import java.util.List;
  * @param wishes of villages for vans
  * @param together villages that must share a van
  * @param apart villages that must not
+ * @param library where the vans start and return
  */
 record RoundsData(
     List<Village> villages,
     List<Van> vans,
     List<Wish> wishes,
     List<Pair> together,
-    List<Pair> apart) {
+    List<Pair> apart,
+    Library library) {
   RoundsData {
     villages = List.copyOf(villages);
     vans = List.copyOf(vans);
     wishes = List.copyOf(wishes);
     together = List.copyOf(together);
     apart = List.copyOf(apart);
+  }
+
+  /** Data with the library amid the villages. */
+  RoundsData(
+      List<Village> villages,
+      List<Van> vans,
+      List<Wish> wishes,
+      List<Pair> together,
+      List<Pair> apart) {
+    this(villages, vans, wishes, together, apart, Library.amid(villages));
   }
 
   /** The crates of all villages. */

@@ -1,11 +1,12 @@
 package dev.couplet.examples.rounds;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 
 /**
- * Draws the rounds of a plan as an SVG: villages where they lie, marked by their van, and the lines
- * whose lengths the plan adds up.
+ * Draws the rounds of a plan as an SVG: villages where they lie, marked by their van, and the way
+ * of each van from the library through its villages and back.
  */
 final class RoundsMap {
   private static final Box FRAME = new Box(30, 92, 730, 652);
@@ -15,24 +16,31 @@ final class RoundsMap {
   private final RoundsData data;
   private final List<Round> rounds;
   private final String subtitle;
+  private final boolean ways;
   private final MapScale scale;
   private final StringBuilder svg = new StringBuilder();
 
-  private RoundsMap(RoundsData data, List<Round> rounds, String subtitle) {
+  private RoundsMap(RoundsData data, List<Round> rounds, String subtitle, boolean ways) {
     this.data = data;
     this.rounds = rounds;
     this.subtitle = subtitle;
-    this.scale = MapScale.fitting(data.villages(), FRAME.grown(-56));
+    this.ways = ways;
+    List<Place> places = new ArrayList<>(data.villages());
+    places.add(data.library());
+    this.scale = MapScale.fitting(places, FRAME.grown(-56));
   }
 
-  /** The drawing as text. */
+  /** The drawing as text; the villages of each round are in the order of the visits. */
   static String svg(RoundsData data, List<Round> rounds, String subtitle) {
-    RoundsMap map = new RoundsMap(data, rounds, subtitle);
-    map.write();
-    return map.svg.toString();
+    return new RoundsMap(data, rounds, subtitle, true).write();
   }
 
-  private void write() {
+  /** The drawing of rounds that are not in order. */
+  static String withoutWays(RoundsData data, List<Round> rounds, String subtitle) {
+    return new RoundsMap(data, rounds, subtitle, false).write();
+  }
+
+  private String write() {
     double height = Math.max(690, FRAME.top() + 40 + LEGEND_STEP * (rounds.size() + 2));
     add("<svg xmlns=\"http://www.w3.org/2000/svg\" viewBox=\"0 0 1000 %.0f\" role=\"img\"", height);
     add(" font-family=\"Helvetica, Arial, sans-serif\" font-size=\"%.0f\">\n", MapLabels.FONT);
@@ -42,32 +50,45 @@ final class RoundsMap {
     text(30, 44, " font-size=\"26\" font-weight=\"bold\"", "Rounds of a mobile library");
     text(30, 72, " font-size=\"15\" fill=\"#444444\"", subtitle);
     box(FRAME, "#FAFAF7", "#BBBBBB");
-    lines();
+    if (ways) {
+      lines();
+    }
     marks();
     names();
     scaleBar();
     north();
     legend();
-    text(
-        30,
-        676,
-        " fill=\"#444444\"",
-        "Lines join every two villages of a van; the plan adds up their lengths.");
+    String words =
+        ways
+            ? "Each line is the round of a van: from the library to its villages, one after the"
+                + " other, and back."
+            : "The villages of each van, not in order.";
+    text(30, 676, " fill=\"#444444\"", words);
     add("</svg>\n");
+    return svg.toString();
   }
 
   private void lines() {
+    add("<g fill=\"none\" stroke-width=\"2.4\" stroke-linejoin=\"round\">\n");
     for (int k = 0; k < rounds.size(); k++) {
-      add("<g stroke=\"%s\" stroke-width=\"1.6\" stroke-opacity=\"0.45\">\n", mark(k).colour());
-      List<Village> served = rounds.get(k).villages();
-      for (int a = 0; a < served.size(); a++) {
-        for (int b = a + 1; b < served.size(); b++) {
-          add("<line x1=\"%.1f\" y1=\"%.1f\"", x(served.get(a)), y(served.get(a)));
-          add(" x2=\"%.1f\" y2=\"%.1f\"/>\n", x(served.get(b)), y(served.get(b)));
-        }
+      List<Place> way = way(rounds.get(k));
+      for (int stop = 0; stop < way.size(); stop++) {
+        String before = stop == 0 ? "<path class=\"round\" d=\"M" : " L";
+        add(before + " %.1f %.1f", x(way.get(stop)), y(way.get(stop)));
       }
-      add("</g>\n");
+      add(way.isEmpty() ? "" : "\" stroke=\"%s\"/>\n", mark(k).colour());
     }
+    add("</g>\n");
+  }
+
+  /** Out and back; empty for a van that stays at home. */
+  private List<Place> way(Round round) {
+    List<Place> way = new ArrayList<>(round.villages());
+    if (!way.isEmpty()) {
+      way.add(0, data.library());
+      way.add(data.library());
+    }
+    return way;
   }
 
   private void marks() {
@@ -76,6 +97,7 @@ final class RoundsMap {
         svg.append(mark(k).svg(x(village), y(village))).append('\n');
       }
     }
+    house(x(data.library()), y(data.library()));
     for (Village village : unserved()) {
       ring(x(village), y(village));
     }
@@ -92,25 +114,39 @@ final class RoundsMap {
     add("<circle cx=\"%.1f\" cy=\"%.1f\" r=\"6\" fill=\"white\" stroke=\"#444444\"/>\n", x, y);
   }
 
+  private void house(double x, double y) {
+    add("<path d=\"M %.1f %.1f m 0 -11 l 10 8 h -2.5 v 10 h -15 v -10 h -2.5 z\"", x, y);
+    add(" fill=\"#333333\" stroke=\"white\" stroke-width=\"1.5\"/>\n");
+  }
+
   private void names() {
     MapLabels labels = new MapLabels(FRAME.grown(-4));
     labels.addMark(FRAME.right() - 24, FRAME.top() + 20);
     data.villages().forEach(village -> labels.addMark(x(village), y(village)));
-    for (Round round : rounds) {
-      for (Village village : round.villages()) {
-        for (Village other : round.villages()) {
-          labels.addLine(x(village), y(village), x(other), y(other));
-        }
-      }
+    labels.addMark(x(data.library()), y(data.library()));
+    if (ways) {
+      rounds.forEach(round -> addLines(way(round), labels));
     }
     add("<g text-anchor=\"middle\" stroke=\"#FAFAF7\" stroke-width=\"4\"");
     add(" stroke-linejoin=\"round\" paint-order=\"stroke\">\n");
+    name(labels, data.library(), "library", "Library");
     for (Village village : data.villages()) {
-      String name = village.name() + " " + village.crates();
-      Box box = labels.place(village, name, x(village), y(village));
-      text(box.x(), box.bottom() - 4, " class=\"village\"", name);
+      name(labels, village, "village", village.name() + " " + village.crates());
     }
     add("</g>\n");
+  }
+
+  private void name(MapLabels labels, Place place, String kind, String name) {
+    Box box = labels.place(place, name, x(place), y(place));
+    text(box.x(), box.bottom() - 4, " class=\"" + kind + "\"", name);
+  }
+
+  private void addLines(List<Place> way, MapLabels labels) {
+    for (int k = 0; k + 1 < way.size(); k++) {
+      Place from = way.get(k);
+      Place to = way.get(k + 1);
+      labels.addLine(x(from), y(from), x(to), y(to));
+    }
   }
 
   private void scaleBar() {
@@ -133,14 +169,15 @@ final class RoundsMap {
 
   private void legend() {
     double y = FRAME.top() + 14;
-    text(LEGEND_LEFT, y, " font-weight=\"bold\"", "Van, load, distances");
+    text(LEGEND_LEFT, y, " font-weight=\"bold\"", ways ? "Van, load, way" : "Van, load");
     for (int k = 0; k < rounds.size(); k++) {
       Round round = rounds.get(k);
       y += k == 0 ? 36 : LEGEND_STEP;
       svg.append(mark(k).svg(LEGEND_LEFT + 10, y)).append('\n');
       text(LEGEND_LEFT + 30, y, " font-weight=\"bold\"", round.van().toString());
       String load = round.crates() + " of " + round.van().capacity() + " crates";
-      text(LEGEND_LEFT + 30, y + 19, "", load + ", " + round.metres() + " m");
+      String way = ways ? ", " + round.way(data.library()) + " m" : "";
+      text(LEGEND_LEFT + 30, y + 19, "", load + way);
     }
     if (!unserved().isEmpty()) {
       y += LEGEND_STEP;
@@ -154,12 +191,12 @@ final class RoundsMap {
     return VanMark.of(van);
   }
 
-  private double x(Village village) {
-    return scale.x(village);
+  private double x(Place place) {
+    return scale.x(place);
   }
 
-  private double y(Village village) {
-    return scale.y(village);
+  private double y(Place place) {
+    return scale.y(place);
   }
 
   private void box(Box box, String fill, String stroke) {

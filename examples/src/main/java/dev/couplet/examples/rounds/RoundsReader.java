@@ -5,13 +5,16 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
-/** Reads the five files of a folder; every fault names file, line and column. */
+/** Reads the files of a folder; every fault names file, line and column. */
 final class RoundsReader {
   static final String VILLAGES = "villages.csv";
   static final String VANS = "vans.csv";
   static final String WISHES = "wishes.csv";
   static final String TOGETHER = "together.csv";
   static final String APART = "apart.csv";
+  static final String LIBRARY = "library.csv";
+
+  /** Those that a folder must hold; the library's is not among them. */
   static final String FILES = String.join(", ", VILLAGES, VANS, WISHES, TOGETHER, APART);
 
   /** Keeps every sum of crates and every distance far inside exact whole numbers. */
@@ -40,8 +43,8 @@ final class RoundsReader {
     List<Wish> wishes = wishes();
     List<Pair> together = pairs(TOGETHER);
     List<Pair> apart = pairs(APART);
-    return new RoundsData(
-        List.copyOf(villages.values()), List.copyOf(vans.values()), wishes, together, apart);
+    List<Village> all = List.copyOf(villages.values());
+    return new RoundsData(all, List.copyOf(vans.values()), wishes, together, apart, library(all));
   }
 
   private void readVillages() {
@@ -67,6 +70,22 @@ final class RoundsReader {
       vans.put(name, new Van(name, row.whole("crates", 0, MOST)));
     }
     requireRows(file, "van");
+  }
+
+  /** Where the library stands: as its file says, or without one amid the villages. */
+  private Library library(List<Village> all) {
+    if (!folder.holds(LIBRARY)) {
+      return Library.amid(all);
+    }
+    CsvFile file = CsvFile.read(folder, LIBRARY, "east", "north");
+    if (file.rows().isEmpty()) {
+      throw new BadInput(file.name() + ": there is no library; list it, or leave out the file");
+    }
+    if (file.rows().size() > 1) {
+      throw file.rows().get(1).fault("east", "there is a second library; list one");
+    }
+    Row row = file.rows().get(0);
+    return new Library(row.whole("east", -MOST, MOST), row.whole("north", -MOST, MOST));
   }
 
   private static void requireRows(CsvFile file, String what) {

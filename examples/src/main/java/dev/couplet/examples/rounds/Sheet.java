@@ -2,7 +2,7 @@ package dev.couplet.examples.rounds;
 
 /** A page of plain text being written, at most {@value #WIDTH} columns wide. */
 final class Sheet {
-  static final int WIDTH = 96;
+  static final int WIDTH = 80;
   private static final String INDENT = "  ";
 
   private final StringBuilder text = new StringBuilder();

@@ -73,7 +73,8 @@ final class SmallCopy {
         kept.add(new Wish(wish.village(), cut.get(van), wish.metres()));
       }
     }
-    return new RoundsData(villages, cut, kept, firstOf(whole.together()), firstOf(whole.apart()));
+    return new RoundsData(
+        villages, cut, kept, firstOf(whole.together()), firstOf(whole.apart()), whole.library());
   }
 
   /** Capacities in the same proportion to the crates as in the whole, and so many more. */

@@ -8,14 +8,7 @@ package dev.couplet.examples.rounds;
  * @param east metres east of the map's corner
  * @param north metres north of it
  */
-record Village(String name, int crates, int east, int north) {
-  /** The straight line to another village, in whole metres. */
-  int distanceTo(Village other) {
-    double across = (double) east - other.east;
-    double along = (double) north - other.north;
-    return Math.toIntExact(Math.round(Math.sqrt(across * across + along * along)));
-  }
-
+record Village(String name, int crates, int east, int north) implements Place {
   @Override
   public String toString() {
     return name;

@@ -229,6 +229,16 @@ class BadInputTest {
   }
 
   @Test
+  void noLibraryOrTwo() {
+    folder.write("library.csv", "east,north\n");
+    refused(path("library.csv") + ": there is no library; list it, or leave out the file");
+    folder.write("library.csv", "east,north\n1,2\n3,4\n");
+    refused(path("library.csv") + ", line 3, column east: there is a second library; list one");
+    folder.write("library.csv", "east,north\n1,x\n");
+    refused(path("library.csv") + ", line 2, column north: 'x' is not a whole number");
+  }
+
+  @Test
   void badOptions() {
     refused(Outcome.of("--seconds", "0"), "--seconds 0.0: give a number above 0, at most 86400");
     refused(Outcome.of("--threads", "0"), "--threads 0: give a number from 1 to 1024");

@@ -33,7 +33,7 @@ class HostTest {
     OptionalLong optimum = slowTwin().optimum();
     for (int seed = 1; seed <= 3; seed++) {
       Outcome outcome = Outcome.of("--seed", Integer.toString(seed));
-      long onHost = Long.parseLong(outcome.found("(?s)\\n7\\..*\\n  best +(\\d+) m"));
+      long onHost = Long.parseLong(outcome.found("(?s)\\n8\\..*\\n  best +(\\d+) m"));
       long direct = Long.parseLong(outcome.found("^  direct +(\\d+) m .*proved"));
       long audited = Long.parseLong(outcome.found("^  optimum +(\\d+) m"));
       assertEquals(optimum, OptionalLong.of(direct));

@@ -44,6 +44,33 @@ class MapTest {
   }
 
   @Test
+  void everyRoundIsALineFromTheLibraryThroughItsVillagesAndBack() {
+    RoundsData data = RoundsReader.read(Folder.invented());
+    String svg = RoundsMap.svg(data, rounds(data), "a test");
+    List<String> lines =
+        Pattern.compile("<path class=\"round\" d=\"M ([^\"]*)\"")
+            .matcher(svg)
+            .results()
+            .map(found -> found.group(1))
+            .toList();
+    assertEquals(3, lines.size());
+    List<Box> names = names(svg);
+    for (int k = 0; k < 3; k++) {
+      String[] points = lines.get(k).split(" L ");
+      assertEquals(6, points.length);
+      assertEquals(points[0], points[5]);
+      for (int stop = 1; stop <= 4; stop++) {
+        Box name = names.get(data.villages().indexOf(rounds(data).get(k).villages().get(stop - 1)));
+        String[] at = points[stop].split(" ");
+        double x = Double.parseDouble(at[0]);
+        double y = Double.parseDouble(at[1]);
+        assertTrue(name.grown(35).overlaps(Box.around(x, y, 1, 1)), name + " is far from its mark");
+      }
+    }
+    assertFalse(RoundsMap.withoutWays(data, rounds(data), "a test").contains("class=\"round\""));
+  }
+
+  @Test
   void northIsUpAndEastIsRight() {
     Village low = new Village("low", 1, 0, 0);
     Village high = new Village("high", 1, 10, 90);

@@ -1,10 +1,12 @@
 package dev.couplet.examples.rounds;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalLong;
+import java.util.function.ToLongFunction;
 
 /**
  * The best value by looking at every assignment of villages to vans. Reads the files by itself, and
@@ -51,13 +53,32 @@ final class SlowTwin {
 
   /** The lowest value of all assignments that keep the rules; empty if none does. */
   OptionalLong optimum() {
+    return lowest(this::value);
+  }
+
+  /** The lowest total of the shortest ways from a library and unmet wishes; empty likewise. */
+  OptionalLong shortestWays(long east, long north) {
+    long[][] places = villages.stream().map(SlowTwin::place).toArray(long[][]::new);
+    HeldKarp ways = new HeldKarp(new long[] {east, north}, places);
+    return lowest(by -> ways(by, ways) + unmetWishes(by));
+  }
+
+  private long ways(int[] by, HeldKarp ways) {
+    int[] sets = new int[vans.size()];
+    for (int v = 0; v < by.length; v++) {
+      sets[by[v]] |= 1 << v;
+    }
+    return Arrays.stream(sets).mapToLong(ways::through).sum();
+  }
+
+  private OptionalLong lowest(ToLongFunction<int[]> value) {
     int n = villages.size();
     long best = Long.MAX_VALUE;
     int[] by = new int[n];
     int moved = 0;
     while (moved < n) {
       if (allowed(by)) {
-        best = Math.min(best, value(by));
+        best = Math.min(best, value.applyAsLong(by));
       }
       moved = 0;
       while (moved < n && ++by[moved] == vans.size()) {
@@ -92,6 +113,11 @@ final class SlowTwin {
         sum += by[v] == by[w] ? metres(villages.get(v), villages.get(w)) : 0;
       }
     }
+    return sum + unmetWishes(by);
+  }
+
+  private long unmetWishes(int[] by) {
+    long sum = 0;
     for (String[] wish : wishes) {
       sum += by[village.get(wish[0])] == van.get(wish[1]) ? 0 : Long.parseLong(wish[2]);
     }
@@ -99,8 +125,10 @@ final class SlowTwin {
   }
 
   private static long metres(String[] one, String[] other) {
-    double east = Double.parseDouble(one[2]) - Double.parseDouble(other[2]);
-    double north = Double.parseDouble(one[3]) - Double.parseDouble(other[3]);
-    return Math.round(StrictMath.hypot(east, north));
+    return HeldKarp.metres(place(one), place(other));
+  }
+
+  private static long[] place(String[] village) {
+    return new long[] {Long.parseLong(village[2]), Long.parseLong(village[3])};
   }
 }

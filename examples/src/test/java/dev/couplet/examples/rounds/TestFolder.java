@@ -15,6 +15,7 @@ record TestFolder(Path path) {
     for (String file : RoundsReader.FILES.split(", ")) {
       folder.write(file, invented(file));
     }
+    folder.write(RoundsReader.LIBRARY, invented(RoundsReader.LIBRARY));
     return folder;
   }
 
