@@ -12,6 +12,10 @@ final class Numbers {
         : value > 0 ? "infinity" : value < 0 ? "-infinity" : "not a number";
   }
 
+  static String metres(long value) {
+    return value + " m";
+  }
+
   static String metres(double value) {
     return shown(value) + " m";
   }
