@@ -39,8 +39,8 @@ final class Assembly {
 
   Assembly(Statement statement, Lowering settings) {
     this.statement = statement;
-    this.settings = settings;
     this.coding = new Coding(statement, settings);
+    this.settings = settings.begin(statement, coding.literalsAreBits());
     this.bits = new BitTable(coding);
     this.objective = objectiveRange();
     this.whole = objectiveIsWhole();

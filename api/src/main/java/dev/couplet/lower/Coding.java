@@ -122,6 +122,11 @@ final class Coding {
     return moved.build();
   }
 
+  /** Whether each literal is the bit of the same number. */
+  boolean literalsAreBits() {
+    return sameNumbers;
+  }
+
   /** The number of decision bits. */
   int bits() {
     return meanings.size();

@@ -209,6 +209,11 @@ public final class Lowering {
     }
   }
 
+  /** These settings for one statement. */
+  Lowering begin(Statement statement, boolean literalsAreBits) {
+    return with(weights.begin(statement, literalsAreBits));
+  }
+
   Aim aim() {
     return aim;
   }

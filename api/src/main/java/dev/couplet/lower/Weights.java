@@ -37,6 +37,16 @@ public interface Weights {
    */
   record Chosen(double value, String reason) {}
 
+  /**
+   * Called once for each lowering, before the first weight is chosen: may give weights that have
+   * looked at the statement.
+   *
+   * @param literalsAreBits whether each literal is the bit of the same number
+   */
+  default Weights begin(Statement statement, boolean literalsAreBits) {
+    return this;
+  }
+
   /** Chooses the weight of one rule. */
   Chosen choose(Facts facts);
 
@@ -58,6 +68,16 @@ public interface Weights {
    */
   static Weights incumbentBound(Plan known) {
     return new IncumbentBound(known);
+  }
+
+  /**
+   * Strictly above the most that it can cost to repair a broken rule by changing one bit, where
+   * such a repair breaks nothing else: for limits on sums of bits (knapsacks, covers) and codes of
+   * choices that no other rule holds back. By the range bound for every other rule. Always enough,
+   * and lighter than the range bound if the objective has many terms.
+   */
+  static Weights repairBound() {
+    return new RepairBound();
   }
 
   /**

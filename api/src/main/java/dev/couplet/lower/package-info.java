@@ -10,8 +10,9 @@
  * <p>One step a file, in the order of the work: {@code BitTable} numbers the bits, {@code Limits}
  * tightens a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms
  * ({@code TwoBitForm}, {@code ConflictForm}, {@code ClauseForm}, on request {@code UnbalancedForm},
- * {@code SquareForm} with {@code Slack}), {@code RangeBound} or {@code IncumbentBound} weighs it,
- * {@code DegreeReduction} brings every term to degree 2, {@code Assembly} adds all up.
+ * {@code SquareForm} with {@code Slack}), {@code RangeBound} or {@code IncumbentBound} or {@code
+ * RepairBound} weighs it, {@code DegreeReduction} brings every term to degree 2, {@code Assembly}
+ * adds all up.
  *
  * <p>{@code DegreeReduction} compares {@code ReductionDraft}s: each product by a {@code
  * ProductForm} of its own ({@code ConjunctionForm}, {@code ThresholdForm}, {@code CountForm}), or
