@@ -25,6 +25,7 @@ final class ModelSolver {
   private static final int FIRST_SHARE = 30;
   private static final int DRAWS_SHARE = 50;
   private static final int ALL = 100;
+  private static final int LIGHT_ROUNDS = 5;
 
   private final Statement statement;
   private final Lowering lowering;
@@ -98,8 +99,47 @@ final class ModelSolver {
     return course.vigil().over() ? course.vigil().reason() : End.DONE;
   }
 
+  /**
+   * Draws; with the standard weights first with lighter ones, which are raised as far as lowest
+   * draws break rules.
+   */
   private End drawn(boolean searchedAfter) {
-    Lowered lowered = lowering.lower(statement);
+    int share = searchedAfter ? DRAWS_SHARE : ALL;
+    if (lowering != Lowering.standard()) {
+      return drawn(lowering, share).end();
+    }
+    Escalation escalation = new Escalation(statement);
+    while (true) {
+      boolean last = escalation.exhausted();
+      Lowering weighed = lowering.with(escalation.weights(best));
+      Drawn drawn = drawn(weighed, last ? share : share / LIGHT_ROUNDS);
+      List<String> raised = last ? List.of() : escalation.raise(drawn.lowest());
+      if (raised.isEmpty()) {
+        boolean more = !last && drawn.end() == End.DEADLINE && !course.vigil().over();
+        return more ? drawn(weighed, share).end() : drawn.end();
+      }
+      course.finished("weights", inWords(raised));
+      if (course.vigil().over()) {
+        return ended();
+      }
+    }
+  }
+
+  private static String inWords(List<String> raised) {
+    String more = raised.size() == 1 ? "" : " and of " + (raised.size() - 1) + " more";
+    return "too light, raised: that of '" + raised.get(0) + "'" + more;
+  }
+
+  /**
+   * What draws came to.
+   *
+   * @param lowest the plan that the lowest draw stands for, feasible or not
+   * @param end why they ended
+   */
+  private record Drawn(Plan lowest, End end) {}
+
+  private Drawn drawn(Lowering weighed, int share) {
+    Lowered lowered = weighed.lower(statement);
     course.finished(
         "lowering", lowered.qubo().size() + " bits, " + lowered.qubo().pairs() + " pairs");
     boolean exact = lowered.approximate().isEmpty();
@@ -109,11 +149,14 @@ final class ModelSolver {
     OptionalDouble target =
         exact ? inEnergy(lowered, course.effort().target()) : OptionalDouble.empty();
     double stopAt = exact ? lowest : Double.NEGATIVE_INFINITY;
-    int share = searchedAfter ? DRAWS_SHARE : ALL;
     Draws draws =
         DrawStage.run(lowered.qubo(), starts, lowered.structure(), stopAt, target, share, course);
     keep(lowered.read(draws).best());
-    return !exact && ended() == End.TARGET ? End.TARGET : DrawStage.end(draws, target);
+    Plan first = lowered.plan(draws.best().state());
+    End end = DrawStage.end(draws, target);
+    boolean light = end == End.TARGET && !first.feasible();
+    boolean reached = !exact && ended() == End.TARGET;
+    return new Drawn(first, reached ? End.TARGET : light ? End.DONE : end);
   }
 
   private static OptionalDouble inEnergy(Lowered lowered, OptionalDouble value) {

@@ -19,10 +19,13 @@ import java.util.Optional;
  * <p>Models with few plans are solved by looking at all of them, and the answer is proved. On
  * others that are not too large a branch and bound over the decisions is tried. Where it proves
  * nothing within its share of the effort, the model is lowered, bounded, and drawn from, and the
- * search goes on from the best plan with the time that is left; that plan is no proof of anything
- * unless {@link Answer#proof} says so. A target of the effort is a value in the model's own sense.
- * Every plan returned was checked against the model itself. Draws from a form with approximate
- * penalties are bounded by nothing that the form says, and go on past a target.
+ * search goes on from the best plan with the time that is left. With the standard lowering,
+ * required rules weigh little at first; where the lowest draw breaks one, its weight is raised and
+ * drawn again, up to what is proved to suffice; that is told among the stages. A lowering of the
+ * caller's own is used as it is. The plan is no proof of anything unless {@link Answer#proof} says
+ * so. A target of the effort is a value in the model's own sense. Every plan returned was checked
+ * against the model itself. Draws from a form with approximate penalties are bounded by nothing that
+ * the form says, and go on past a target.
  *
  * <p>Also a {@link Sampler} of forms, with a bound in its draws; there a target is an energy.
  * Immutable and thread-safe.

@@ -11,6 +11,7 @@ import dev.couplet.exact.plans.PlanSearch;
 import dev.couplet.form.Ising;
 import dev.couplet.form.Qubo;
 import dev.couplet.lower.Lowering;
+import dev.couplet.lower.Weights;
 import dev.couplet.model.Bit;
 import dev.couplet.model.Choice;
 import dev.couplet.model.Expr;
@@ -26,6 +27,7 @@ import dev.couplet.sampling.Watch.StopSignal;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.SplittableRandom;
 import java.util.concurrent.atomic.AtomicLong;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -183,6 +185,38 @@ class SolverTest {
     assertThrows(
         IllegalArgumentException.class,
         () -> Solver.standard().from(optimal).solve(other, COUNTED));
+  }
+
+  /** Two large prizes that exclude each other, beside a sum too dense for a proof in few nodes. */
+  @Test
+  void aWeightThatIsTooLightIsNamedAndRaised() {
+    SplittableRandom random = new SplittableRandom(5);
+    Model model = Model.named("prizes");
+    List<Bit> x = bits(model, 46);
+    List<Expr> parts = new ArrayList<>();
+    for (int i = 0; i < x.size(); i++) {
+      parts.add(x.get(i).times(i < 2 ? 20_000 : random.nextInt(-50, 51)));
+      for (int j = 2; j < i; j++) {
+        parts.add(x.get(i).times(x.get(j)).times(random.nextInt(-50, 51)));
+      }
+    }
+    model.maximize("value", sum(parts));
+    model.require("one prize", x.get(0).plus(x.get(1)).atMost(1));
+    Answer answer = Solver.standard().solve(model, COUNTED);
+    List<String> raised =
+        answer.stages().stream()
+            .filter(stage -> stage.name().equals("weights"))
+            .map(Stage::outcome)
+            .toList();
+    assertFalse(raised.isEmpty());
+    raised.forEach(told -> assertEquals("too light, raised: that of 'one prize'", told));
+    assertTrue(answer.plan().feasible());
+    assertTrue(answer.plan().value(x.get(0)) != answer.plan().value(x.get(1)));
+    Answer asGiven =
+        Solver.standard()
+            .with(Lowering.standard().with(Weights.rangeBound()))
+            .solve(model, COUNTED);
+    assertTrue(asGiven.stages().stream().noneMatch(stage -> stage.name().equals("weights")));
   }
 
   @Test

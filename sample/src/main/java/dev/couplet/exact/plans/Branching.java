@@ -60,9 +60,12 @@ final class Branching {
   /** The whole network, followed up; false if no plan below the limit is left. */
   boolean begin(Partial root, int rounds) {
     propagation.limit = best.limit();
-    if (!propagation.begin(root) || !sweeps.settle(root)) {
-      return false;
-    }
+    return propagation.begin(root) && sweeps.settle(root) && raise(root, rounds);
+  }
+
+  /** Sweeps until the bound rises no more, or so many rounds; false as for {@link #begin}. */
+  boolean raise(Partial root, int rounds) {
+    propagation.limit = best.limit();
     long before = root.base - 1;
     long least = 1;
     for (int round = 0; round < rounds && root.base - before >= least && !vigil.over(); round++) {

@@ -32,6 +32,7 @@ import java.util.Optional;
  */
 public final class PlanSearch {
   private static final long PROBE = 1000;
+  private static final int FEW_ROUNDS = 3;
   private static final int ROUNDS = 100;
 
   private final long nodes;
@@ -134,14 +135,14 @@ public final class PlanSearch {
     if (vigil.over()) {
       return root.bound();
     }
-    if (!branching.begin(root, ROUNDS)) {
+    if (!branching.begin(root, FEW_ROUNDS)) {
       return best.cost();
     }
     long bound = branching.walk(root, Math.min(nodes, PROBE));
     if (bound == best.cost() || vigil.over() || branching.nodes() >= nodes) {
       return bound;
     }
-    if (!branching.multipliers().run(root, 2 * ROUNDS)) {
+    if (!branching.raise(root, ROUNDS) || !branching.multipliers().run(root, 2 * ROUNDS)) {
       return best.cost();
     }
     return Math.max(bound, branching.walk(root, nodes));
