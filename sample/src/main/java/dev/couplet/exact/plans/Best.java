@@ -9,8 +9,12 @@ import java.util.OptionalDouble;
 
 /** The best plan known so far, and what it costs in fine units. */
 final class Best {
+  /** Above the costs of all plans, whatever they are. */
+  private static final long UNLIMITED = 1L << 50;
+
   private final Statement statement;
   private final Network network;
+  private final ProofLog log;
   private final OptionalDouble target;
   private final Vigil vigil;
   private Optional<Plan> plan = Optional.empty();
@@ -22,8 +26,9 @@ final class Best {
    * @param target the value, in the model's own sense, with which a run may end
    * @param vigil the watch over the run
    */
-  Best(Statement statement, Network network, OptionalDouble target, Vigil vigil) {
+  Best(Statement statement, Network network, ProofLog log, OptionalDouble target, Vigil vigil) {
     this.statement = statement;
+    this.log = log;
     this.network = network;
     this.target = target;
     this.vigil = vigil;
@@ -50,6 +55,9 @@ final class Best {
 
   /** Plans that cost more are of no interest. */
   long limit() {
+    if (plan.isEmpty() && log.on()) {
+      return UNLIMITED;
+    }
     return plan.isEmpty() ? network.ceiling : cost - Math.max(1, network.grain);
   }
 
@@ -57,7 +65,7 @@ final class Best {
   void start(Plan given) {
     if (given.feasible()) {
       Partial partial = new Partial(network);
-      Propagation propagation = new Propagation(network, vigil);
+      Propagation propagation = new Propagation(network, ProofLog.NONE, vigil);
       if (!propagation.begin(partial)) {
         return;
       }
@@ -82,6 +90,7 @@ final class Best {
   }
 
   private void take(Plan better, long itsCost) {
+    log.plan(better.literals());
     plan = Optional.of(better);
     cost = itsCost;
     int sign = statement.sense().sign();

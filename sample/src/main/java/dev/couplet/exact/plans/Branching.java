@@ -19,6 +19,7 @@ final class Branching {
   private final Network network;
   private final Variables variables;
   private final Interchange interchange;
+  private final ProofLog log;
   private final Propagation propagation;
   private final Sweeps sweeps;
   private final Rests rests;
@@ -35,13 +36,14 @@ final class Branching {
     int next;
   }
 
-  Branching(Network network, Interchange interchange, Best best, Vigil vigil) {
+  Branching(Network network, Interchange interchange, Best best, ProofLog log, Vigil vigil) {
+    this.log = log;
     this.network = network;
     this.interchange = interchange;
     this.variables = network.variables;
     this.best = best;
     this.vigil = vigil;
-    this.propagation = new Propagation(network, vigil);
+    this.propagation = new Propagation(network, log, vigil);
     this.sweeps = new Sweeps(network, propagation);
     this.rests = new Rests(network, propagation);
   }
@@ -54,13 +56,13 @@ final class Branching {
   /** The multipliers that go with this walk's limit. */
   Multipliers multipliers() {
     propagation.limit = best.limit();
-    return new Multipliers(network, propagation, sweeps, rests, vigil);
+    return new Multipliers(network, propagation, sweeps, rests, log, vigil);
   }
 
   /** The whole network, followed up; false if no plan below the limit is left. */
   boolean begin(Partial root, int rounds) {
     propagation.limit = best.limit();
-    return propagation.begin(root) && sweeps.settle(root) && raise(root, rounds);
+    return closed(propagation.begin(root) && sweeps.settle(root), root) && raise(root, rounds);
   }
 
   /** Sweeps until the bound rises no more, or so many rounds; false as for {@link #begin}. */
@@ -71,11 +73,19 @@ final class Branching {
     for (int round = 0; round < rounds && root.base - before >= least && !vigil.over(); round++) {
       before = root.base;
       if (!network.costless() && !sweeps.run(root)) {
-        return false;
+        return closed(false, root);
       }
       least = Math.max(1, network.grain >> 10);
     }
-    return rests.run(root);
+    return closed(rests.run(root), root);
+  }
+
+  /** Passes on whether something is left; tells the log where nothing is. */
+  private boolean closed(boolean left, Partial partial) {
+    if (!left) {
+      log.close(network, partial, propagation.limit);
+    }
+    return left;
   }
 
   /**
@@ -85,16 +95,21 @@ final class Branching {
    */
   long walk(Partial root, long mostNodes) {
     over = false;
+    log.root();
     enter(0, root);
     int depth = 0;
     while (depth >= 0 && !over) {
       Node node = path.get(depth);
       if (node.next == node.values.length) {
+        if (node.next > 0) {
+          log.exhausted();
+        }
         depth--;
         continue;
       }
       int value = node.values[node.next];
       if (node.partial.bound() + node.partial.costs[value] > best.limit()) {
+        log.skip(network, node.partial, value);
         node.next++;
       } else if (nodes >= mostNodes || isOver(depth)) {
         over = true;
@@ -122,10 +137,13 @@ final class Branching {
     propagation.steps += variables.values() + network.shifts + network.rows.length;
     Node child = node(depth + 1);
     child.partial.copy(node.partial);
-    if (!propagation.take(child.partial, value) || !tighten(child.partial)) {
-      return false;
+    log.take(network, value);
+    boolean left = propagation.take(child.partial, value) && tighten(child.partial);
+    if (left && opened(depth + 1)) {
+      return true;
     }
-    return opened(depth + 1);
+    log.close(network, child.partial, best.limit());
+    return false;
   }
 
   private boolean tighten(Partial partial) {
@@ -143,8 +161,10 @@ final class Branching {
     node.partial.copy(partial);
     node.values = new int[0];
     node.next = 0;
-    boolean more = opened(depth);
-    node.values = more ? node.values : new int[0];
+    if (!opened(depth)) {
+      node.values = new int[0];
+      log.close(network, node.partial, best.limit());
+    }
   }
 
   /** Chooses what to decide next; if nothing is left to decide, takes the plan and is false. */

@@ -77,8 +77,8 @@ final class ConflictFilter {
     Set<Rule> chosen = new HashSet<>(rules);
     Network network = NetworkBuilder.ofRules(statement, chosen::contains);
     Interchange interchange = Likeness.ofRules(statement, chosen::contains, network.variables);
-    Best best = new Best(statement, network, OptionalDouble.empty(), vigil);
-    Branching branching = new Branching(network, interchange, best, vigil);
+    Best best = new Best(statement, network, ProofLog.NONE, OptionalDouble.empty(), vigil);
+    Branching branching = new Branching(network, interchange, best, ProofLog.NONE, vigil);
     Partial root = new Partial(network);
     boolean all = !branching.begin(root, 1) || branching.walk(root, left) == best.cost();
     taken += branching.nodes();

@@ -21,11 +21,19 @@ final class Multipliers {
   private final Propagation propagation;
   private final Sweeps sweeps;
   private final Rests rests;
+  private final ProofLog log;
   private final Vigil vigil;
   private final long most;
   private final long[] missed;
 
-  Multipliers(Network network, Propagation propagation, Sweeps sweeps, Rests rests, Vigil vigil) {
+  Multipliers(
+      Network network,
+      Propagation propagation,
+      Sweeps sweeps,
+      Rests rests,
+      ProofLog log,
+      Vigil vigil) {
+    this.log = log;
     this.network = network;
     this.propagation = propagation;
     this.sweeps = sweeps;
@@ -46,6 +54,7 @@ final class Multipliers {
         return true;
       }
       if (!sweeps.run(moving) || !rests.run(moving)) {
+        log.close(network, moving, propagation.limit);
         return false;
       }
       if (moving.bound() > best.bound()) {

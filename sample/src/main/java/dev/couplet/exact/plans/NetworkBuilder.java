@@ -15,7 +15,7 @@ import java.util.function.Predicate;
 /** Reads a statement, or some of its rules, into a {@link Network}. */
 final class NetworkBuilder {
   /** A part of a rule that some plan breaks. */
-  private record Asked(Rule rule, Rule.Part part) {
+  private record Asked(Rule rule, Rule.Part part, String number) {
     /** What a miss by one whole unit costs, or by its square; 0 for a required rule. */
     BigDecimal price() {
       BigDecimal unit = Scale.decimal(part.unit());
@@ -53,11 +53,13 @@ final class NetworkBuilder {
 
   private static List<Asked> asked(Statement statement, Predicate<Rule> kept) {
     List<Asked> asked = new ArrayList<>();
-    for (Rule rule : statement.rules()) {
-      if (kept.test(rule)) {
-        rule.parts().stream()
-            .filter(part -> !part.alwaysKept())
-            .forEach(part -> asked.add(new Asked(rule, part)));
+    for (int r = 0; r < statement.rules().size(); r++) {
+      Rule rule = statement.rules().get(r);
+      for (int p = 0; kept.test(rule) && p < rule.parts().size(); p++) {
+        Rule.Part part = rule.parts().get(p);
+        if (!part.alwaysKept()) {
+          asked.add(new Asked(rule, part, r + "." + p));
+        }
       }
     }
     return asked;
@@ -162,7 +164,7 @@ final class NetworkBuilder {
     }
     Row row =
         new Row(
-            rule.name(),
+            one.number(),
             byVariable.keySet().stream().mapToInt(Integer::intValue).toArray(),
             byVariable.values().toArray(long[][]::new),
             limit(part.lowest()),

@@ -1,6 +1,7 @@
 package dev.couplet.exact.plans;
 
 import dev.couplet.model.Plan;
+import dev.couplet.model.Rule;
 import dev.couplet.model.Statement;
 import dev.couplet.sampling.Effort;
 import dev.couplet.sampling.End;
@@ -8,6 +9,7 @@ import dev.couplet.sampling.Vigil;
 import dev.couplet.sampling.Watch;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 
 /**
  * Branch and bound on a model: finds a plan and proves that no other is better, or that none keeps
@@ -36,14 +38,16 @@ public final class PlanSearch {
   private static final int ROUNDS = 100;
 
   private final long nodes;
+  private final ProofLog log;
 
-  private PlanSearch(long nodes) {
+  private PlanSearch(long nodes, ProofLog log) {
     this.nodes = nodes;
+    this.log = log;
   }
 
   /** As many nodes as it takes. */
   public static PlanSearch standard() {
-    return new PlanSearch(Long.MAX_VALUE);
+    return new PlanSearch(Long.MAX_VALUE, ProofLog.NONE);
   }
 
   /**
@@ -56,7 +60,18 @@ public final class PlanSearch {
       throw new IllegalArgumentException(
           "the number of nodes is " + most + ", it must be 1 or more");
     }
-    return new PlanSearch(most);
+    return new PlanSearch(most, log);
+  }
+
+  /**
+   * This method, writing what it does in lines from which a proof can be checked without it: what
+   * is taken, what rules exclude, plans, and the numbers that a bound follows from (see {@code
+   * ProofLog} for each line). It works for statements of required rules over sums, with objectives
+   * of degree 2 at most and costs that can be scaled exactly; it does not make use of options that
+   * are alike, and takes more nodes. What the receiver throws comes through.
+   */
+  public PlanSearch proof(Consumer<String> lines) {
+    return new PlanSearch(nodes, ProofLog.to(lines));
   }
 
   /**
@@ -87,22 +102,45 @@ public final class PlanSearch {
    * Searches, from a plan of the statement if there is one.
    *
    * @param effort its time and its target, a value in the model's own sense, end the search
-   * @throws IllegalArgumentException if the statement is too large, see {@link #fits}
+   * @throws IllegalArgumentException if the statement is too large, see {@link #fits}, or a proof
+   *     is to be written that it is not simple enough for
    */
   public Found search(Statement statement, Optional<Plan> start, Effort effort, Watch watch) {
     requireFit(statement);
     Vigil vigil = Vigil.begin(effort, watch);
     Network network = NetworkBuilder.of(statement, rule -> true);
-    Best best = new Best(statement, network, effort.target(), vigil);
+    if (log.on()) {
+      requireSimple(statement, network);
+    }
+    log.unit(network);
+    Best best = new Best(statement, network, log, effort.target(), vigil);
     start.ifPresent(best::start);
-    Interchange interchange = Likeness.of(statement, rule -> true, network.variables);
-    Branching branching = new Branching(network, interchange, best, vigil);
+    Interchange interchange =
+        log.on()
+            ? Interchange.none(network.variables)
+            : Likeness.of(statement, rule -> true, network.variables);
+    Branching branching = new Branching(network, interchange, best, log, vigil);
     long bound = bound(network, branching, best, vigil);
     best.plan().ifPresent(PlanSearch::requireFeasible);
     boolean complete = bound == best.cost();
     double inOwnSense = inOwnSense(statement, network, best, bound);
     long taken = branching.nodes();
     return new Found(best.plan(), inOwnSense, complete, taken, interchange.found(), vigil.reason());
+  }
+
+  private static void requireSimple(Statement statement, Network network) {
+    boolean simple = statement.objective().degree() <= 2 && network.scale.exact();
+    for (Rule rule : statement.rules()) {
+      simple &= rule.required();
+      simple &= rule.parts().stream().allMatch(part -> part.terms().degree() <= 1);
+    }
+    if (!simple) {
+      throw new IllegalArgumentException(
+          "a proof is written for required rules over sums and objectives of degree 2 at most, with"
+              + " costs of few digits; "
+              + statement
+              + " has others");
+    }
   }
 
   private static void requireFeasible(Plan plan) {

@@ -12,6 +12,7 @@ final class Propagation {
   private static final int LOOK_EVERY = 1 << 16;
 
   private final Network network;
+  private final ProofLog log;
   private final Vigil vigil;
   private final Variables variables;
   private final int[] queue;
@@ -34,8 +35,9 @@ final class Propagation {
 
   private boolean over;
 
-  Propagation(Network network, Vigil vigil) {
+  Propagation(Network network, ProofLog log, Vigil vigil) {
     this.network = network;
+    this.log = log;
     this.vigil = vigil;
     this.variables = network.variables;
     this.queue = new int[variables.count() + 1];
@@ -45,6 +47,11 @@ final class Propagation {
     this.failures = new long[variables.count()];
     this.limit = network.ceiling;
     Arrays.fill(failures, 1);
+  }
+
+  /** Values with which the bound is beyond this are removed; a proof tells of none of them. */
+  long removing() {
+    return log.on() ? Long.MAX_VALUE / 2 : limit;
   }
 
   /** Whether so many steps have passed that it is time to look at the clock. */
@@ -68,6 +75,11 @@ final class Propagation {
 
   /** Looks at everything once; false if no plan below the limit is left. */
   boolean begin(Partial partial) {
+    for (int v = 0; log.on() && v < partial.left.length; v++) {
+      if (!partial.left[v]) {
+        log.cut(network, v);
+      }
+    }
     for (int i = 0; i < variables.count(); i++) {
       if (partial.choices[i] == 0) {
         return false;
@@ -91,6 +103,7 @@ final class Propagation {
   /** Removes a value, to be followed by {@link #run}; false if it was the variable's last. */
   boolean remove(Partial partial, int value) {
     int variable = variables.variableOf(value);
+    log.cut(network, value);
     partial.left[value] = false;
     push(variable);
     return --partial.choices[variable] > 0;
@@ -187,8 +200,9 @@ final class Propagation {
           return false;
         }
       } else {
-        partial.costs[first + b] +=
-            cost + partial.shifts[ownShift] + partial.shifts[otherShift + b];
+        long moved = cost + partial.shifts[ownShift] + partial.shifts[otherShift + b];
+        partial.costs[first + b] += moved;
+        partial.shifts[otherShift + b] -= moved;
       }
     }
     return true;

@@ -66,7 +66,7 @@ final class Rests {
       if (partial.left[first + a]) {
         long own = row.coefficients[k][a];
         long bound = known + row.rest(others + own, othersMost + own, multiplier);
-        boolean beyond = bound + partial.costs[first + a] > propagation.limit;
+        boolean beyond = bound + partial.costs[first + a] > propagation.removing();
         if (beyond && !propagation.remove(partial, first + a)) {
           return false;
         }

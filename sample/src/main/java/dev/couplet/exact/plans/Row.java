@@ -12,7 +12,9 @@ final class Row {
   /** Stands for no limit; sums are far below. */
   static final long FREE = 1L << 60;
 
-  final String rule;
+  /** The number of the rule, a dot, and the number of its part; or words. */
+  final String number;
+
   final int[] variables;
   final long[][] coefficients;
   final long lowest;
@@ -25,7 +27,7 @@ final class Row {
   final boolean squared;
 
   Row(
-      String rule,
+      String number,
       int[] variables,
       long[][] coefficients,
       long lowest,
@@ -33,7 +35,7 @@ final class Row {
       long step,
       long price,
       boolean squared) {
-    this.rule = rule;
+    this.number = number;
     this.variables = variables;
     this.coefficients = coefficients;
     this.lowest = lowest;

@@ -95,6 +95,11 @@ final class Scale {
     return fine;
   }
 
+  /** The number of fine units in the model's own unit. */
+  BigDecimal unit() {
+    return factor.multiply(BigDecimal.valueOf(fine));
+  }
+
   /** A cost as a whole number: what it is, or a little less. */
   long whole(BigDecimal cost) {
     RoundingMode mode = exact ? RoundingMode.HALF_EVEN : RoundingMode.FLOOR;

@@ -131,7 +131,7 @@ final class Sweeps {
     for (int v = variables.first(variable); v < variables.end(variable); v++) {
       if (partial.left[v]) {
         partial.costs[v] -= least;
-        boolean beyond = partial.base + partial.costs[v] > propagation.limit;
+        boolean beyond = partial.base + partial.costs[v] > propagation.removing();
         if (beyond && !propagation.remove(partial, v)) {
           propagation.clear();
           return false;

@@ -21,6 +21,7 @@ final class Variables {
   private static final int FIXED = -1;
 
   private final int[] valueOf;
+  private final int[] literalOf;
   private final boolean[] alone;
   private final int literals;
 
@@ -28,6 +29,13 @@ final class Variables {
     this.first = first;
     this.valueOf = valueOf;
     this.alone = alone;
+    this.literalOf = new int[first[first.length - 1]];
+    for (int literal = 0; literal < valueOf.length; literal++) {
+      literalOf[valueOf[literal]] = literal;
+      if (alone[literal]) {
+        literalOf[valueOf[literal] - 1] = literal;
+      }
+    }
     this.literals = valueOf.length;
     this.variableOf = new int[first[first.length - 1]];
     for (int i = 0; i + 1 < first.length; i++) {
@@ -101,6 +109,17 @@ final class Variables {
   /** The value that a literal is. */
   int valueOf(int literal) {
     return valueOf[literal];
+  }
+
+  /** The literal that a value speaks of. */
+  int literal(int value) {
+    return literalOf[value];
+  }
+
+  /** A value as its literal with a sign: minus where the literal does not hold. */
+  String inWords(int value) {
+    int literal = literalOf[value];
+    return (valueOf[literal] == value ? "+" : "-") + literal;
   }
 
   /** The literals that hold under a choice of one value for each variable. */

@@ -8,7 +8,8 @@
  * values that no plan can keep, {@code Sweeps} move costs between pairs and variables so that as
  * much as possible ends up in the bound, {@code Multipliers} do the same for rows, and {@code
  * Branching} walks the tree. {@code Likeness} finds options that are treated alike, {@code
- * Interchange} lets the walk try one of them for all.
+ * Interchange} lets the walk try one of them for all. {@code ProofLog} writes what a walk does, and
+ * {@code ConflictFilter} leaves out rules until few are left.
  *
  * <p>Why costs are moved: Cooper, de Givry, Sanchez, Schiex, Zytnicki and Werner, "Soft arc
  * consistency revisited" (2010); in sweeps along an order: Kolmogorov, "Convergent tree-reweighted

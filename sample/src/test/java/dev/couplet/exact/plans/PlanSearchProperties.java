@@ -85,8 +85,9 @@ class PlanSearchProperties {
     Statement statement = RandomModels.of(regime, seed).snapshot();
     Vigil vigil = Vigil.begin(EFFORT, Watch.none());
     Network network = NetworkBuilder.of(statement, rule -> true);
-    Best best = new Best(statement, network, OptionalDouble.empty(), vigil);
-    Branching branching = new Branching(network, Interchange.none(network.variables), best, vigil);
+    Best best = new Best(statement, network, ProofLog.NONE, OptionalDouble.empty(), vigil);
+    Branching branching =
+        new Branching(network, Interchange.none(network.variables), best, ProofLog.NONE, vigil);
     Partial root = new Partial(network);
     assertTrue(branching.begin(root, 3) && branching.multipliers().run(root, 5), "there is a plan");
     long lowest = branching.walk(root, Long.MAX_VALUE);
