@@ -49,9 +49,8 @@ final class EveryPlan {
     List<int[]> groups = new ArrayList<>();
     List<List<Integer>> exactlyOne = statement.exactlyOne(decision);
     exactlyOne.forEach(g -> groups.add(g.stream().mapToInt(Integer::intValue).toArray()));
-    int single = exactlyOne.isEmpty() ? statement.literals(decision) : 0;
-    for (int k = 0; k < single; k++) {
-      groups.add(new int[] {-1, statement.firstLiteral(decision) + k});
+    for (int literal : statement.free(decision)) {
+      groups.add(new int[] {-1, literal});
     }
     return groups;
   }

@@ -24,8 +24,8 @@ import java.util.Optional;
  * drawn again, up to what is proved to suffice; that is told among the stages. A lowering of the
  * caller's own is used as it is. The plan is no proof of anything unless {@link Answer#proof} says
  * so. A target of the effort is a value in the model's own sense. Every plan returned was checked
- * against the model itself. Draws from a form with approximate penalties are bounded by nothing that
- * the form says, and go on past a target.
+ * against the model itself. Draws from a form with approximate penalties are bounded by nothing
+ * that the form says, and go on past a target.
  *
  * <p>Also a {@link Sampler} of forms, with a bound in its draws; there a target is an energy.
  * Immutable and thread-safe.

@@ -31,7 +31,9 @@ final class Variables {
     this.alone = alone;
     this.literalOf = new int[first[first.length - 1]];
     for (int literal = 0; literal < valueOf.length; literal++) {
-      literalOf[valueOf[literal]] = literal;
+      if (valueOf[literal] != FIXED) {
+        literalOf[valueOf[literal]] = literal;
+      }
       if (alone[literal]) {
         literalOf[valueOf[literal] - 1] = literal;
       }

@@ -46,8 +46,7 @@ final class ProofChecker {
     for (Decision decision : statement.decisions()) {
       List<List<Integer>> exactlyOne = statement.exactlyOne(decision);
       exactlyOne.forEach(group -> addGroup(group.stream().map(l -> 2 * l).toList()));
-      int from = statement.firstLiteral(decision);
-      for (int l = from; exactlyOne.isEmpty() && l < from + statement.literals(decision); l++) {
+      for (int l : statement.free(decision)) {
         addGroup(List.of(2 * l, 2 * l + 1));
       }
     }
