@@ -53,12 +53,17 @@ class PagesTest {
     String page = LoweringPage.of(rounds, lowered);
     assertEquals(lowered.weights().size(), sum(page, "(?m)^  +(\\d+)  \\D.*  \\d+  [a-z]$"));
     for (String reason : lowered.weights().stream().map(Weight::reason).distinct().toList()) {
-      assertTrue(page.contains(reason), reason);
+      assertTrue(unwrapped(page).contains(reason), reason);
     }
     long inAll = sum(page, "(?m)^ +(-?\\d+)  in all$");
     long parts = sum(page, "(?m)^ +(-?\\d+)  (?:distance|load of the small van|Ash with .*)$");
     assertTrue(inAll != 0, page);
     assertEquals(inAll, parts);
+  }
+
+  /** The text with its line breaks undone. */
+  private static String unwrapped(String page) {
+    return page.replaceAll("\\n +", " ");
   }
 
   private static long sum(String page, String pattern) {
@@ -76,7 +81,7 @@ class PagesTest {
     Plan.Draft draft = rounds.model().plan();
     Van small = INVENTED.vans().get(0);
     INVENTED.villages().forEach(village -> draft.set(rounds.vanOf(village), small));
-    String page = PlanPage.of(rounds, draft.evaluate());
+    String page = unwrapped(PlanPage.of(rounds, draft.evaluate()));
     assertTrue(page.contains("22 of 6"), page);
     assertTrue(page.contains("load of the small van, missed by 16"), page);
     assertTrue(page.contains("Linden apart from Rowan, the small van, missed by 1"), page);
