@@ -22,6 +22,7 @@ final class RandomModel {
   private final SplittableRandom random;
   private final Model model;
   private final List<Literal> literals = new ArrayList<>();
+  private final List<Choice<Integer>> choices = new ArrayList<>();
   private final Plan planted;
 
   RandomModel(Regime regime, long seed) {
@@ -42,7 +43,6 @@ final class RandomModel {
 
   private Plan decide() {
     List<Bit> bits = new ArrayList<>();
-    List<Choice<Integer>> choices = new ArrayList<>();
     int wanted = 1 + random.nextInt(regime == Regime.DENSE ? 8 : RandomModels.MOST_LITERALS);
     while (literals.size() < wanted) {
       int room = wanted - literals.size();
@@ -65,12 +65,18 @@ final class RandomModel {
   }
 
   private boolean choosing() {
-    return regime == Regime.CHOICES || (regime == Regime.MIXED && random.nextBoolean());
+    boolean mixed = regime == Regime.MIXED || regime == Regime.LOGIC;
+    return regime == Regime.CHOICES || (mixed && random.nextBoolean());
   }
 
   private void addObjective() {
     List<Expr> terms = new ArrayList<>();
-    if (regime == Regime.DENSE) {
+    if (regime == Regime.LOGIC) {
+      int count = 1 + random.nextInt(6);
+      for (int t = 0; t < count; t++) {
+        terms.add(logic().expr().times(coefficient(9)));
+      }
+    } else if (regime == Regime.DENSE) {
       for (int i = 0; i < literals.size(); i++) {
         for (int j = 0; j <= i; j++) {
           terms.add(literals.get(i).times(literals.get(j)).times(coefficient(9)));
@@ -118,7 +124,24 @@ final class RandomModel {
     };
   }
 
+  private RandomLogic logic() {
+    return new RandomLogic(random, literals, choices, planted);
+  }
+
+  private void addLogic(int number) {
+    Condition condition = logic().condition();
+    switch (random.nextInt(5)) {
+      case 0 -> model.preferSquared("wish " + number, condition, Math.abs(coefficient(4)));
+      case 1 -> model.prefer("wish " + number, condition, Math.abs(coefficient(4)));
+      default -> model.require("rule " + number, condition);
+    }
+  }
+
   private void addRule(int number) {
+    if (regime == Regime.LOGIC) {
+      addLogic(number);
+      return;
+    }
     Expr sum = sum();
     double value = hundredths(planted.number(sum));
     double off = random.nextInt(3) == 0 ? 0 : Math.abs(coefficient(4));

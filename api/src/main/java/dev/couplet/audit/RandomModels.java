@@ -29,7 +29,12 @@ public final class RandomModels {
     /** Choices only. */
     CHOICES,
     /** Bits and choices, products of up to four literals, preferred rules, both senses. */
-    MIXED
+    MIXED,
+    /**
+     * Bits and choices, nested and, or, xor and not, conditions under guards, choices that all
+     * differ, tables, preferred rules that cost the amount or its square.
+     */
+    LOGIC
   }
 
   private RandomModels() {}

@@ -48,7 +48,7 @@ final class Assembly {
 
   Lowered lowered() {
     int sign = statement.sense().sign();
-    for (Objective part : statement.objectives()) {
+    for (Objective part : statement.shares()) {
       addSource(part.name(), Kind.OBJECTIVE, coding.overBits(part.terms().times(sign)), 1);
     }
     int objectives = sources.size();

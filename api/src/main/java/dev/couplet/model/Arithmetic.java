@@ -7,6 +7,11 @@ import java.math.BigDecimal;
  * exact decimals for rules, where 0.1 + 0.2 must be 0.3.
  */
 interface Arithmetic<N> {
+  /** More than any number that can be kept; decimals grow no further. */
+  int MOST_DIGITS = 1000;
+
+  int FEW_DIGITS = 40;
+
   Arithmetic<Double> DOUBLES =
       new Arithmetic<>() {
         @Override
@@ -34,7 +39,15 @@ interface Arithmetic<N> {
 
         @Override
         public BigDecimal times(BigDecimal left, BigDecimal right) {
-          return left.multiply(right);
+          BigDecimal product = left.multiply(right);
+          if (product.precision() <= FEW_DIGITS) {
+            return product;
+          }
+          product = product.stripTrailingZeros();
+          if (product.precision() > MOST_DIGITS) {
+            throw new ArithmeticException("a number of more than " + MOST_DIGITS + " digits");
+          }
+          return product;
         }
 
         @Override

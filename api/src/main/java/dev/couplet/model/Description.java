@@ -36,8 +36,10 @@ final class Description {
       }
       text.append(cost(rule)).append('\n');
     }
+    String order = statement.inStrictOrder() ? "in strict order " : "";
     for (Objective objective : statement.objectives()) {
-      text.append(statement.sense() == Sense.MINIMIZE ? "  minimize " : "  maximize ");
+      text.append(statement.sense() == Sense.MINIMIZE ? "  minimize " : "  maximize ")
+          .append(order);
       text.append(objective.name()).append(": ").append(terms(objective.terms())).append('\n');
     }
   }

@@ -2,6 +2,7 @@ package dev.couplet.model;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
+import java.util.IdentityHashMap;
 import java.util.function.Predicate;
 
 /**
@@ -14,13 +15,29 @@ final class Evaluation {
   private Evaluation() {}
 
   static double of(Expr root, Predicate<Literal> holds) {
+    IdentityHashMap<Expr, Double> known = new IdentityHashMap<>();
+    if (root instanceof Node node && node.size > Sharing.SMALL) {
+      Sharing sharing = Sharing.of(node, any -> true);
+      if (!sharing.shared().isEmpty()) {
+        sharing.childrenFirst().forEach(part -> known.put(part, of(part, holds, known)));
+      }
+    }
+    return of(root, holds, known);
+  }
+
+  /** Of the nodes below, some are known already. */
+  private static double of(
+      Expr root, Predicate<Literal> holds, IdentityHashMap<Expr, Double> known) {
     Deque<Pending> pending = new ArrayDeque<>();
     pending.push(new Pending(root, 1));
     double sum = 0;
     while (!pending.isEmpty()) {
       Pending next = pending.pop();
       double factor = next.factor();
-      if (next.expr() instanceof Compound compound) {
+      Double value = known.isEmpty() ? null : known.get(next.expr());
+      if (value != null) {
+        sum += factor * value;
+      } else if (next.expr() instanceof Compound compound) {
         sum += compound.holds(holds) ? factor : 0;
       } else if (next.expr() instanceof Literal literal) {
         sum += holds.test(literal) ? factor : 0;
@@ -33,8 +50,8 @@ final class Evaluation {
       } else if (next.expr() instanceof Node.Scaled scaled) {
         pending.push(new Pending(scaled.part, factor * scaled.factor));
       } else if (next.expr() instanceof Node.Product product) {
-        for (Expr part : product.factors()) {
-          factor *= of(part, holds);
+        for (Expr part : product.factors(known::containsKey)) {
+          factor *= of(part, holds, known);
         }
         sum += factor;
       } else if (next.expr() instanceof Node.Sum parts) {

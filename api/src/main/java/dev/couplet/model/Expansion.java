@@ -3,10 +3,13 @@ package dev.couplet.model;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
 import java.util.Deque;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -54,18 +57,64 @@ final class Expansion<N> {
   private final Arithmetic<N> arithmetic;
   private final Sink<N> sink;
 
-  private Expansion(Arithmetic<N> arithmetic, Sink<N> sink) {
+  /** What large parts of products came to, where the expression is too large to be a tree. */
+  private final IdentityHashMap<Expr, Terms<N>> known;
+
+  private Expansion(Arithmetic<N> arithmetic, Sink<N> sink, IdentityHashMap<Expr, Terms<N>> known) {
     this.arithmetic = arithmetic;
     this.sink = sink;
+    this.known = known;
   }
 
   static <N> void walk(Expr expr, Arithmetic<N> arithmetic, Sink<N> sink) {
-    new Expansion<>(arithmetic, sink).walk(expr);
+    new Expansion<>(arithmetic, sink, new IdentityHashMap<>()).walk(expr);
   }
 
   private void walk(Expr root) {
+    N factor = arithmetic.of(1);
+    Expr inner = root;
+    while (inner instanceof Node.Scaled scaled) {
+      factor = arithmetic.times(factor, arithmetic.of(scaled.factor));
+      inner = scaled.part;
+    }
+    if (inner instanceof Node.Sum sum && sum.size > Sharing.SMALL) {
+      Sharing sharing = Sharing.of(sum, node -> node instanceof Node.Sum);
+      if (!sharing.shared().isEmpty()) {
+        addOnce(sharing, factor);
+        return;
+      }
+    }
+    walk(inner, factor);
+  }
+
+  /** Each large sum once, with all the factors that it has by the ways down to it. */
+  private void addOnce(Sharing sharing, N factorOfRoot) {
+    List<Node> parentsFirst = new ArrayList<>(sharing.childrenFirst());
+    Collections.reverse(parentsFirst);
+    IdentityHashMap<Expr, N> factors = new IdentityHashMap<>();
+    parentsFirst.forEach(sum -> factors.put(sum, arithmetic.of(0)));
+    factors.put(parentsFirst.get(0), factorOfRoot);
+    for (Node sum : parentsFirst) {
+      for (Expr part : sum.parts()) {
+        N factor = Objects.requireNonNull(factors.get(sum));
+        Expr inner = part;
+        while (inner instanceof Node.Scaled scaled) {
+          factor = arithmetic.times(factor, arithmetic.of(scaled.factor));
+          inner = scaled.part;
+        }
+        N byOtherWays = factors.get(inner);
+        if (byOtherWays != null) {
+          factors.put(inner, arithmetic.plus(byOtherWays, factor));
+        } else {
+          walk(inner, factor);
+        }
+      }
+    }
+  }
+
+  private void walk(Expr root, N factorOfRoot) {
     Deque<Pending<N>> pending = new ArrayDeque<>();
-    pending.push(new Pending<>(root, arithmetic.of(1), 0));
+    pending.push(new Pending<>(root, factorOfRoot, 0));
     while (!pending.isEmpty()) {
       Pending<N> next = pending.pop();
       N factor = next.factor();
@@ -83,7 +132,7 @@ final class Expansion<N> {
         N inner = arithmetic.times(factor, arithmetic.of(scaled.factor));
         pending.push(new Pending<>(scaled.part, inner, 0));
       } else if (next.expr() instanceof Node.Product product) {
-        addProduct(product.factors(), factor, null);
+        addProduct(product, factor);
       } else if (next.expr() instanceof Node.Sum sum && next.from() < sum.parts.size()) {
         pending.push(new Pending<>(sum, factor, next.from() + 1));
         pending.push(new Pending<>(sum.parts.get(next.from()), factor, 0));
@@ -98,6 +147,46 @@ final class Expansion<N> {
     } else {
       sink.add(factor, new int[] {literal.index()});
     }
+  }
+
+  /** Of a large product, those inside it that come up several times are multiplied out once. */
+  private void addProduct(Node.Product product, N factor) {
+    if (!Sharing.isLarge(product)) {
+      addProduct(product.factors(), factor, null);
+      return;
+    }
+    Terms<N> terms = known.get(product);
+    if (terms == null) {
+      Sharing sharing = Sharing.of(product, node -> node instanceof Node.Product);
+      for (Node node : sharing.childrenFirst()) {
+        if (node != product && sharing.shared().contains(node)) {
+          Terms<N> own = new Terms<>(arithmetic);
+          List<Expr> factors = ((Node.Product) node).factors(p -> p != node && isKnown(p));
+          new Expansion<>(arithmetic, own, known).addProduct(factors, arithmetic.of(1), null);
+          known.put(node, own.normal());
+        }
+      }
+      addProduct(product.factors(this::isKnown), factor, null);
+    } else {
+      terms.forEach((n, literals) -> sink.add(arithmetic.times(factor, n), literals));
+    }
+  }
+
+  private boolean isKnown(Node.Product product) {
+    return known.containsKey(product);
+  }
+
+  private Terms<N> multipliedOut(Expr expr) {
+    Terms<N> terms = known.get(expr);
+    if (terms == null) {
+      terms = new Terms<>(arithmetic);
+      new Expansion<>(arithmetic, terms, known).walk(expr);
+      if (Sharing.isLarge(expr)) {
+        terms = terms.normal();
+        known.put(expr, terms);
+      }
+    }
+    return terms;
   }
 
   private void addCompound(Compound compound, N factor) {
@@ -116,8 +205,7 @@ final class Expansion<N> {
   private void addOdd(Compound compound, N factor) {
     Terms<N> odd = new Terms<>(arithmetic);
     for (Literal part : compound.parts()) {
-      Terms<N> next = new Terms<>(arithmetic);
-      walk(part, arithmetic, next);
+      Terms<N> next = multipliedOut(part);
       requireFew(odd, next, compound);
       Terms<N> both = odd.times(next);
       next.forEach(odd);
@@ -164,8 +252,7 @@ final class Expansion<N> {
     Terms<N> result = new Terms<>(arithmetic);
     result.add(coefficient, product);
     for (Expr part : others) {
-      Terms<N> next = new Terms<>(arithmetic);
-      walk(part, arithmetic, next);
+      Terms<N> next = multipliedOut(part);
       requireFew(result, next, compound);
       result = result.times(next);
     }
@@ -208,9 +295,11 @@ final class Expansion<N> {
     }
 
     private Terms<N> merged() {
-      if (products.size() <= MERGED_ABOVE) {
-        return this;
-      }
+      return products.size() <= MERGED_ABOVE ? this : normal();
+    }
+
+    /** Equal products added up, and each literal once in a product. */
+    Terms<N> normal() {
       Map<Key, N> sums = new LinkedHashMap<>();
       for (int t = 0; t < products.size(); t++) {
         sums.merge(new Key(products.get(t)), coefficients.get(t), arithmetic::plus);

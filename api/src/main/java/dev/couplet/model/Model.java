@@ -31,10 +31,12 @@ public final class Model {
   private final List<Decision> decisionOfLiteral = new ArrayList<>();
   private final List<Rule> rules = new ArrayList<>();
   private final List<Objective> objectives = new ArrayList<>();
+  private final List<Extreme> extremes = new ArrayList<>();
   private final Set<String> decisionNames = new HashSet<>();
   private final Set<String> statementNames = new HashSet<>();
   private final Map<Decision, boolean[]> fixed = new LinkedHashMap<>();
   private @Nullable Sense sense;
+  private boolean strictOrder;
 
   private Model(String name) {
     this.name = name;
@@ -196,6 +198,60 @@ public final class Model {
   public <K, T> Family<K, Subset<T>> subsets(
       String familyName, Collection<K> keys, Collection<T> items) {
     return family(familyName, keys, subsetName -> subset(subsetName, items));
+  }
+
+  /**
+   * Adds a count that is the largest of the expressions, such as the end of the last job. Rules
+   * named after it see to that, with a choice by which of them it is reached. A plan by hand need
+   * not set either: they are worked out.
+   *
+   * <p>Where a count is minimised, {@link #ceiling} does with less.
+   *
+   * @throws IllegalArgumentException if there is no expression, one does not have whole
+   *     coefficients, or a name is taken
+   */
+  public Count largest(String countName, Collection<? extends Expr> exprs) {
+    return extreme(countName, exprs, 1, true);
+  }
+
+  /** Adds a count that is the smallest of the expressions; as for {@link #largest}. */
+  public Count smallest(String countName, Collection<? extends Expr> exprs) {
+    return extreme(countName, exprs, -1, true);
+  }
+
+  /**
+   * Adds a count that is no smaller than any of the expressions: their largest wherever it is
+   * minimised, without a choice. A plan by hand need not set it: then it is the largest.
+   *
+   * @throws IllegalArgumentException as for {@link #largest}
+   */
+  public Count ceiling(String countName, Collection<? extends Expr> exprs) {
+    return extreme(countName, exprs, 1, false);
+  }
+
+  private Count extreme(
+      String countName, Collection<? extends Expr> exprs, int sign, boolean reached) {
+    if (exprs.isEmpty()) {
+      throw new IllegalArgumentException(
+          "count '" + countName + "' is made of no expressions; give it at least one");
+    }
+    exprs.forEach(expr -> requireOwner(expr, this));
+    String beyondAll = (sign > 0 ? "none is above '" : "none is below '") + countName + "'";
+    String met = "one is '" + countName + "'";
+    String turn = "which one is '" + countName + "'";
+    requireFree(statementNames, "rule or objective", beyondAll);
+    requireFree(statementNames, "rule or objective", met);
+    requireFree(decisionNames, "decision", turn);
+    List<Expr> all = List.copyOf(exprs);
+    Range range = Extreme.range(countName, all, sign, decisionOfLiteral.size(), this::rangeOf);
+    Count count = count(countName, (long) range.lowest(), (long) range.highest());
+    Optional<Choice<Integer>> which =
+        reached ? Optional.of(choice(turn, Extreme.turns(all.size()))) : Optional.empty();
+    Extreme extreme = new Extreme(count, which, all, sign);
+    extremes.add(extreme);
+    require(beyondAll, extreme.beyondAll());
+    which.ifPresent(choice -> require(met, extreme.met(choice)));
+    return count;
   }
 
   private <K, D extends Decision> Family<K, D> family(
@@ -391,6 +447,19 @@ public final class Model {
     return objective(objectiveName, expr, Sense.MAXIMIZE);
   }
 
+  /**
+   * Puts the objectives in strict order, as they are stated: a later one decides among plans that
+   * are equally good by all earlier ones, and never outweighs them; the costs of preferred rules
+   * count with the last. Without this their values add up.
+   *
+   * <p>A plan's value is then one number that orders plans so; {@link Plan#value(Objective)} tells
+   * each objective's own. The numbers are exact: where that takes coefficients beyond 2^51, {@link
+   * #snapshot()} refuses, and with it whatever lowers or describes the model.
+   */
+  public void strictOrder() {
+    strictOrder = true;
+  }
+
   private Objective objective(String objectiveName, Expr expr, Sense wanted) {
     Check.name("an objective", objectiveName);
     requireOwner(expr, this);
@@ -435,11 +504,16 @@ public final class Model {
     return snapshot().plan();
   }
 
-  /** The model's content as it stands now; later changes do not reach it. */
+  /**
+   * The model's content as it stands now; later changes do not reach it.
+   *
+   * @throws IllegalArgumentException if the objectives are in strict order, and exact numbers do
+   *     not suffice for that
+   */
   @CheckReturnValue
   public Statement snapshot() {
     Sense known = sense == null ? Sense.MINIMIZE : sense;
-    return new Statement(this, decisions, rules, objectives, known, fixed);
+    return new Statement(this, decisions, rules, objectives, known, strictOrder, extremes, fixed);
   }
 
   /** The model in words, for proof-reading: every decision, rule and objective on a line. */

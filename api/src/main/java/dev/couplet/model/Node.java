@@ -4,15 +4,27 @@ import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
 import java.util.List;
+import java.util.function.Predicate;
 import org.jspecify.annotations.Nullable;
 
 /** The inner nodes of an expression's tree. */
 abstract sealed class Node extends Expr {
   private final @Nullable Model owner;
 
-  private Node(@Nullable Model owner) {
+  /** How many nodes there are, this one and those below it, each way down counted. */
+  final int size;
+
+  private Node(@Nullable Model owner, long size) {
     this.owner = owner;
+    this.size = (int) Math.min(Integer.MAX_VALUE, size);
   }
+
+  private static long size(Expr expr) {
+    return expr instanceof Node node ? node.size : 1;
+  }
+
+  /** The nodes below, in order. */
+  abstract List<Expr> parts();
 
   @Override
   @Nullable Model owner() {
@@ -23,8 +35,13 @@ abstract sealed class Node extends Expr {
     final double value;
 
     Constant(double value) {
-      super(null);
+      super(null, 1);
       this.value = value;
+    }
+
+    @Override
+    List<Expr> parts() {
+      return List.of();
     }
 
     @Override
@@ -37,8 +54,21 @@ abstract sealed class Node extends Expr {
     final List<Expr> parts;
 
     Sum(List<Expr> parts) {
-      super(ownerOf(parts));
+      super(ownerOf(parts), sizeOf(parts));
       this.parts = parts;
+    }
+
+    private static long sizeOf(List<Expr> parts) {
+      long size = 1;
+      for (Expr part : parts) {
+        size += Node.size(part);
+      }
+      return size;
+    }
+
+    @Override
+    List<Expr> parts() {
+      return parts;
     }
 
     private static @Nullable Model ownerOf(List<Expr> parts) {
@@ -60,9 +90,14 @@ abstract sealed class Node extends Expr {
     final double factor;
 
     Scaled(Expr part, double factor) {
-      super(part.owner());
+      super(part.owner(), 1 + Node.size(part));
       this.part = part;
       this.factor = factor;
+    }
+
+    @Override
+    List<Expr> parts() {
+      return List.of(part);
     }
 
     @Override
@@ -76,13 +111,23 @@ abstract sealed class Node extends Expr {
     final Expr right;
 
     Product(Expr left, Expr right) {
-      super(commonOwner(left.owner(), right.owner()));
+      super(commonOwner(left.owner(), right.owner()), 1 + Node.size(left) + Node.size(right));
       this.left = left;
       this.right = right;
     }
 
+    @Override
+    List<Expr> parts() {
+      return List.of(left, right);
+    }
+
     /** The factors, left to right, with those of products among them and numbers told apart. */
     List<Expr> factors() {
+      return factors(product -> false);
+    }
+
+    /** The factors, but some products are left whole. */
+    List<Expr> factors(Predicate<Product> whole) {
       if (left instanceof Literal && right instanceof Literal) {
         return List.of(left, right);
       }
@@ -90,7 +135,7 @@ abstract sealed class Node extends Expr {
       Deque<Expr> pending = new ArrayDeque<>(List.of(left, right));
       while (!pending.isEmpty()) {
         Expr next = pending.pop();
-        if (next instanceof Product product) {
+        if (next instanceof Product product && !whole.test(product)) {
           pending.push(product.right);
           pending.push(product.left);
         } else if (next instanceof Scaled scaled) {

@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 
 /**
@@ -66,9 +67,25 @@ public final class Plan implements Comparable<Plan> {
 
   /**
    * What the plan is worth: the objectives and the costs of preferred rules, in the model's sense.
+   * With objectives in strict order, a number that orders plans as these do.
    */
   public double value() {
     return value;
+  }
+
+  /**
+   * What one of the model's objectives comes to, in its own units.
+   *
+   * @throws IllegalArgumentException if the statement has no objective of that name
+   */
+  public double value(Statement.Objective objective) {
+    for (Statement.Objective own : statement.objectives()) {
+      if (own.name().equals(objective.name())) {
+        return own.terms().value(literals);
+      }
+    }
+    throw new IllegalArgumentException(
+        "the plan is of " + statement + ", which has no objective '" + objective.name() + "'");
   }
 
   /** Whether every choice is decided and every required rule is kept. */
@@ -234,6 +251,7 @@ public final class Plan implements Comparable<Plan> {
     Draft(Statement statement) {
       this.statement = statement;
       this.literals = new boolean[statement.literals()];
+      statement.writeFixed(literals);
     }
 
     /**
@@ -302,14 +320,33 @@ public final class Plan implements Comparable<Plan> {
       return this;
     }
 
+    /** The number that an expression is, if all that it takes is set. */
+    OptionalDouble numberIfSet(Expr expr) {
+      boolean[] open = {false};
+      double number =
+          Evaluation.of(
+              expr,
+              literal -> {
+                open[0] |= isOpen(statement.decisionOf(literal.index()));
+                return literals[literal.index()] != literal.negated();
+              });
+      return open[0] ? OptionalDouble.empty() : OptionalDouble.of(number);
+    }
+
+    boolean isOpen(Decision decision) {
+      return !decided.contains(decision) && !statement.isFixed(decision);
+    }
+
     /**
-     * The plan with these values, checked against the model.
+     * The plan with these values, checked against the model. The largest and smallest of
+     * expressions are worked out where they are not set.
      *
      * @throws IllegalStateException naming the first decision that was not set
      */
     public Plan evaluate() {
+      statement.extremes().forEach(extreme -> extreme.fillIn(this));
       for (Decision decision : statement.decisions()) {
-        if (!decided.contains(decision) && !statement.isFixed(decision)) {
+        if (isOpen(decision)) {
           throw new IllegalStateException(
               "decision '" + decision.name() + "' is not set; set every decision of the plan");
         }

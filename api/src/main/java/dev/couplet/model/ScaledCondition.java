@@ -27,21 +27,27 @@ record ScaledCondition(
     final List<BigDecimal> coefficients = new ArrayList<>();
     final List<int[]> products = new ArrayList<>();
 
-    static Terms of(Condition.Part condition) {
+    static Terms of(String rule, Condition.Part condition) {
       Terms terms = new Terms();
-      Expansion.walk(
-          condition.expr(),
-          Arithmetic.DECIMALS,
-          (coefficient, product) -> {
-            terms.coefficients.add(coefficient);
-            terms.products.add(product);
-          });
+      try {
+        Expansion.walk(
+            condition.expr(),
+            Arithmetic.DECIMALS,
+            (coefficient, product) -> {
+              terms.coefficients.add(coefficient);
+              terms.products.add(product);
+            });
+      } catch (ArithmeticException tooLong) {
+        throw new IllegalArgumentException(
+            "rule '" + rule + "', multiplied out, has " + tooLong.getMessage() + ", beyond 2^51",
+            tooLong);
+      }
       return terms;
     }
   }
 
   static ScaledCondition of(String rule, Condition.Part condition, int literals) {
-    Terms given = Terms.of(condition);
+    Terms given = Terms.of(rule, condition);
     int places = places(given.coefficients, condition);
     BigDecimal constant = BigDecimal.ZERO;
     BigDecimal magnitude = BigDecimal.ZERO;

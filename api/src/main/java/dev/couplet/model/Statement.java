@@ -64,6 +64,8 @@ public final class Statement {
   private final BitSet grouped;
   private final List<Rule> rules;
   private final List<Objective> objectives;
+  private final List<Objective> shares;
+  private final List<Extreme> extremes;
   private final Sense sense;
   private final Polynomial objective;
   private final Fixing fixing;
@@ -74,9 +76,12 @@ public final class Statement {
       List<Rule> rules,
       List<Objective> objectives,
       Sense sense,
+      boolean strictOrder,
+      List<Extreme> extremes,
       Map<Decision, boolean[]> fixed) {
     this.owner = owner;
     this.decisions = List.copyOf(decisions);
+    this.extremes = List.copyOf(extremes);
     this.decisionOf = decisionOf(decisions);
     this.grouped = grouped(decisions);
     int literals = decisionOf.length;
@@ -84,7 +89,11 @@ public final class Statement {
     this.rules = rules.stream().map(rule -> inLiterals(rule, literals)).toList();
     this.objectives = objectives.stream().map(part -> part.inLiterals(literals, fixing)).toList();
     this.sense = sense;
-    this.objective = sum(this.objectives, literals);
+    this.shares =
+        strictOrder
+            ? StrictOrder.shares(this.objectives, this.rules, this::range)
+            : this.objectives;
+    this.objective = sum(shares, literals);
   }
 
   private Rule inLiterals(Rule rule, int literals) {
@@ -149,9 +158,31 @@ public final class Statement {
     return objectives;
   }
 
-  /** The sum of the objectives, without the costs of preferred rules, in the model's own sense. */
+  /**
+   * What each objective adds to {@link #objective()}: itself; or in strict order so much more of
+   * the earlier ones that the later ones never outweigh them, without constants.
+   */
+  public List<Objective> shares() {
+    return shares;
+  }
+
+  /** The sum of the shares, without the costs of preferred rules, in the model's own sense. */
   public Polynomial objective() {
     return objective;
+  }
+
+  /** Writes the patterns of fixed decisions. */
+  void writeFixed(boolean[] all) {
+    fixing.write(all);
+  }
+
+  List<Extreme> extremes() {
+    return extremes;
+  }
+
+  /** Whether an objective decides among plans that are equally good by all earlier ones. */
+  boolean inStrictOrder() {
+    return shares != objectives;
   }
 
   /** The number of literals. */
@@ -222,14 +253,28 @@ public final class Statement {
     return fixing;
   }
 
-  /** The decision that a literal belongs to. */
+  /**
+   * The decision that a literal belongs to.
+   *
+   * @throws IllegalArgumentException if there is no literal of that number
+   */
   public Decision decisionOf(int literal) {
+    if (literal < 0 || literal >= literals()) {
+      throw new IllegalArgumentException(
+          "literal "
+              + literal
+              + " is none of model '"
+              + name()
+              + "', which has "
+              + literals()
+              + ", numbered from 0");
+    }
     return decisionOf[literal];
   }
 
   /** A literal in words: the name of a bit, or of a choice and its option. */
   public String describe(int literal) {
-    Decision decision = decisionOf[literal];
+    Decision decision = decisionOf(literal);
     return Fact.describe(decision, literal - Slot.of(decision).first());
   }
 

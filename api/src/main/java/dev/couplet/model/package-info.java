@@ -13,7 +13,9 @@
  *
  * <p>Literals combine to literals by and, or, xor and not ({@code Compound}); {@code Logic} finds
  * the lightest sums that say what they say, {@code Relaxed} limits that matter only where a literal
- * holds.
+ * holds. {@code StrictOrder} makes one objective of several, {@code Extreme} counts of the largest
+ * of some expressions; {@code Expansion} multiplies out, each part that {@code Sharing} finds again
+ * once.
  *
  * <p>Rules are kept with integer coefficients (decimals are scaled exactly), so that whether a rule
  * is kept never depends on rounding. A {@link dev.couplet.model.Statement} is the immutable content

@@ -60,6 +60,10 @@ class RandomModelsTest {
             s -> s.literals() > 5 && s.decisions().stream().noneMatch(d -> d instanceof Choice)));
     assertTrue(any(Regime.HUGE_RANGE, s -> most(s) > 30_000));
     assertFalse(any(Regime.DENSE, s -> s.objective().degree() > 2));
+    assertTrue(any(Regime.LOGIC, s -> parts(s).anyMatch(part -> part.step() == 2)));
+    assertTrue(any(Regime.LOGIC, s -> s.rules().stream().anyMatch(Rule::squared)));
+    assertTrue(any(Regime.LOGIC, s -> s.rules().stream().anyMatch(r -> r.parts().size() > 2)));
+    assertTrue(any(Regime.LOGIC, s -> s.sense() == Sense.MAXIMIZE));
     assertFalse(any(Regime.SPARSE, s -> parts(s).anyMatch(part -> part.terms().terms() > 3)));
   }
 

@@ -180,6 +180,13 @@ class RefusalsTest {
   }
 
   @Test
+  void literalsThatThereAreNot() {
+    Statement statement = model.snapshot();
+    refused(() -> statement.describe(4), "literal 4", "'rounds'", "has 4");
+    refused(() -> statement.decisionOf(-1), "literal -1", "'rounds'");
+  }
+
+  @Test
   void plansThatAreNotFilledIn() {
     IllegalStateException open =
         assertThrows(IllegalStateException.class, () -> model.plan().set(a, true).evaluate());
