@@ -1,7 +1,6 @@
 package dev.couplet.anneal;
 
 import dev.couplet.form.State;
-import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.Descent;
 import dev.couplet.kernel.DrawLoop;
 import dev.couplet.kernel.Drawer;
@@ -10,6 +9,7 @@ import dev.couplet.kernel.Metropolis;
 import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.Reassignment;
 import dev.couplet.kernel.Streams;
+import dev.couplet.kernel.SweepOrder;
 import dev.couplet.sampling.Run;
 import java.util.List;
 import java.util.SplittableRandom;
@@ -24,12 +24,12 @@ final class Annealer implements Drawer {
   private final Reassignment reassignment;
   private final Descent descent;
 
-  Annealer(Adjacency rows, Run run, Schedule schedule, Finish finish, Pace setUp) {
+  Annealer(SweepOrder order, Run run, Schedule schedule, Finish finish, Pace setUp) {
     this.run = run;
     this.schedule = schedule;
     this.finish = finish;
-    this.fields = new LocalFields(rows);
-    this.metropolis = new Metropolis(fields);
+    this.fields = new LocalFields(order.rows());
+    this.metropolis = new Metropolis(fields, order);
     this.reassignment = new Reassignment(fields, run.structure(), setUp);
     this.descent = new Descent(fields);
   }

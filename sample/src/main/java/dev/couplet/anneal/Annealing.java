@@ -7,6 +7,7 @@ import dev.couplet.kernel.DrawLoop;
 import dev.couplet.kernel.Drawer;
 import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.ReplicaRows;
+import dev.couplet.kernel.SweepOrder;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
@@ -35,8 +36,9 @@ import java.util.function.Supplier;
  * fewer draws.
  *
  * <p>Cost: a sweep takes O(n + d) steps, d the degrees of the variables that flip: O(n + m) at
- * most; made 64 at once, a draw takes about a twentieth of that. Memory: 24 bytes a pair, and 16
- * bytes a variable and thread. Immutable and thread-safe.
+ * most; made 64 at once, a draw takes about a twentieth of that. Memory: 24 bytes a pair, as much
+ * again on sparse forms, which are arranged for the sweeps, and 16 bytes a variable and thread.
+ * Immutable and thread-safe.
  *
  * <p>Source: Kirkpatrick, Gelatt and Vecchi, "Optimization by simulated annealing" (1983).
  */
@@ -108,14 +110,18 @@ public final class Annealing implements Sampler {
         rows.filter(built -> many(built, run)).flatMap(built -> ReplicaRows.of(built, setUp));
     int batch = replicas.isPresent() ? ReplicaAnnealer.BATCH : 1;
     Optional<Schedule> schedule = rows.map(built -> schedule(built, run, batch, setUp));
-    if (schedule.isEmpty() || setUp.look()) {
-      return DrawLoop.unbegun(form, run, vigil);
-    }
-    Supplier<Drawer> drawers =
+    Optional<Supplier<Drawer>> drawers =
         replicas.isPresent()
-            ? () -> new ReplicaAnnealer(replicas.get(), run, schedule.get(), finish)
-            : () -> new Annealer(rows.get(), run, schedule.get(), finish, Pace.of(vigil));
-    return DrawLoop.run(form, run, vigil, batch, drawers);
+            ? replicas.map(many -> () -> new ReplicaAnnealer(many, run, schedule.get(), finish))
+            : rows.map(one -> single(one, run, schedule.get(), vigil));
+    return drawers.isEmpty() || setUp.look()
+        ? DrawLoop.unbegun(form, run, vigil)
+        : DrawLoop.run(form, run, vigil, batch, drawers.get());
+  }
+
+  private Supplier<Drawer> single(Adjacency rows, Run run, Schedule schedule, Vigil vigil) {
+    SweepOrder order = SweepOrder.of(rows, Pace.of(vigil));
+    return () -> new Annealer(order, run, schedule, finish, Pace.of(vigil));
   }
 
   /** Whether 64 draws are to be made at once, all by single flips. */

@@ -1,6 +1,9 @@
 package dev.couplet.anneal;
 
 import dev.couplet.kernel.Boltzmann;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
 import java.util.SplittableRandom;
 
 /**
@@ -11,19 +14,29 @@ import java.util.SplittableRandom;
  */
 final class Ladder {
   private final double[] inverse;
-  private final Replica[] replica;
+  private final List<Replica> replica = new ArrayList<>();
 
-  Ladder(double[] inverse, Replica[] replica) {
+  /** A ladder of empty rungs. */
+  Ladder(double[] inverse) {
     this.inverse = inverse;
-    this.replica = replica;
   }
 
   int rungs() {
-    return replica.length;
+    return inverse.length;
+  }
+
+  /** Whether a rung has its replica; rungs get theirs from the coldest on. */
+  boolean has(int rung) {
+    return rung < replica.size();
+  }
+
+  /** Puts a replica on the next rung. */
+  void add(Replica next) {
+    replica.add(next);
   }
 
   Replica at(int rung) {
-    return replica[rung];
+    return replica.get(rung);
   }
 
   double inverseTemperature(int rung) {
@@ -32,15 +45,11 @@ final class Ladder {
 
   /** Tries to exchange rungs 0 and 1, 2 and 3, ... in even rounds, 1 and 2, 3 and 4, ... in odd. */
   void exchange(int round, SplittableRandom random) {
-    for (int rung = round & 1; rung + 1 < replica.length; rung += 2) {
-      double x =
-          (inverse[rung + 1] - inverse[rung])
-              * (replica[rung].energy() - replica[rung + 1].energy());
+    for (int rung = round & 1; rung + 1 < replica.size(); rung += 2) {
+      double x = (inverse[rung + 1] - inverse[rung]) * (at(rung).energy() - at(rung + 1).energy());
       if (x <= 0
           || (x < Boltzmann.NEVER && (random.nextLong() >>> 11) * 0x1p-53 < Boltzmann.factor(x))) {
-        Replica colder = replica[rung];
-        replica[rung] = replica[rung + 1];
-        replica[rung + 1] = colder;
+        Collections.swap(replica, rung, rung + 1);
       }
     }
   }

@@ -9,9 +9,4 @@ package dev.couplet.anneal;
  * @param finish how it ends
  */
 @SuppressWarnings("ArrayRecordComponent") // Passed from one step to the next, never written to.
-record LadderPlan(double[] inverse, int ladders, Sweeps sweeps, Finish finish) {
-  /** How many states move at once. */
-  int replicas() {
-    return ladders * inverse.length;
-  }
-}
+record LadderPlan(double[] inverse, int ladders, Sweeps sweeps, Finish finish) {}

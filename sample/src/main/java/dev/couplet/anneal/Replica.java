@@ -6,6 +6,7 @@ import dev.couplet.kernel.LocalFields;
 import dev.couplet.kernel.Metropolis;
 import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.Reassignment;
+import dev.couplet.kernel.SweepOrder;
 import java.util.SplittableRandom;
 
 /** One state that moves at the temperature of whatever rung it stands on. */
@@ -16,9 +17,9 @@ final class Replica {
   private final Descent descent;
   private double energy;
 
-  Replica(LocalFields fields, Reassignment reassignment) {
+  Replica(LocalFields fields, SweepOrder order, Reassignment reassignment) {
     this.fields = fields;
-    this.metropolis = new Metropolis(fields);
+    this.metropolis = new Metropolis(fields, order);
     this.reassignment = reassignment;
     this.descent = new Descent(fields);
   }

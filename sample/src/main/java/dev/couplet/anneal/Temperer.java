@@ -10,6 +10,7 @@ import dev.couplet.kernel.LocalFields;
 import dev.couplet.kernel.Pace;
 import dev.couplet.kernel.Reassignment;
 import dev.couplet.kernel.Streams;
+import dev.couplet.kernel.SweepOrder;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Vigil;
 import java.util.List;
@@ -22,25 +23,24 @@ final class Temperer implements Drawer {
   private final LadderPlan plan;
   private final Ladder[] ladders;
   private final ClusterMoves clusters;
+  private final SweepOrder order;
+  private final Reassignment tables;
 
   /** Whether all coefficients can be gone over several times between two looks at the clock. */
   private final boolean small;
 
-  Temperer(Qubo form, Adjacency rows, Run run, LadderPlan plan, Pace setUp) {
+  Temperer(Qubo form, SweepOrder order, Run run, LadderPlan plan, Pace setUp) {
+    Adjacency rows = order.rows();
     this.form = form;
     this.run = run;
     this.plan = plan;
     this.clusters = new ClusterMoves(rows);
     this.small = form.size() + 2L * form.pairs() <= Vigil.STEPS / 8;
     this.ladders = new Ladder[plan.ladders()];
-    Reassignment tables = new Reassignment(new LocalFields(rows), run.structure(), setUp);
+    this.order = order;
+    this.tables = new Reassignment(new LocalFields(rows), run.structure(), setUp);
     for (int c = 0; c < ladders.length; c++) {
-      Replica[] replicas = new Replica[plan.inverse().length];
-      for (int rung = 0; rung < replicas.length; rung++) {
-        LocalFields fields = new LocalFields(rows);
-        replicas[rung] = new Replica(fields, tables.on(fields));
-      }
-      ladders[c] = new Ladder(plan.inverse(), replicas);
+      ladders[c] = new Ladder(plan.inverse());
     }
   }
 
@@ -68,6 +68,9 @@ final class Temperer implements Drawer {
   private boolean sweep(int t, State begin, Lowest lowest, SplittableRandom random, Pace pace) {
     for (Ladder ladder : ladders) {
       for (int rung = 0; rung < ladder.rungs(); rung++) {
+        if (!ladder.has(rung) && !climbed(ladder, pace)) {
+          return false;
+        }
         Replica replica = ladder.at(rung);
         if (t == 0 && !replica.begin(own(begin, ladder, rung, random), pace)) {
           return false;
@@ -79,6 +82,16 @@ final class Temperer implements Drawer {
       }
     }
     return ladders.length < 2 || trade(random, pace);
+  }
+
+  /** Puts a replica on the next rung, if there is time for that. */
+  private boolean climbed(Ladder ladder, Pace pace) {
+    if (pace.lookBefore(16L * form.size())) {
+      return false;
+    }
+    LocalFields fields = new LocalFields(order.rows());
+    ladder.add(new Replica(fields, order, tables.on(fields)));
+    return true;
   }
 
   /** Each replica begins at random by itself, unless the run says where. */
@@ -109,17 +122,17 @@ final class Temperer implements Drawer {
    * lost), or a local minimum below the lowest state seen, if there is time for that.
    */
   private State last(State begin, Lowest lowest, Pace pace) {
+    if (!lowest.any()) {
+      return begin;
+    }
     Replica coldest = ladders[0].at(0);
     if (plan.finish() == Finish.NONE && !lowest.reached()) {
-      return lowest.any() ? coldest.fields().state() : begin;
+      return coldest.fields().state();
     }
     if (!pace.ended()) {
       return descended(coldest, lowest.state(), pace);
     }
-    if (lowest.any()) {
-      return small ? descended(coldest, lowest.state(), Pace.closing()) : lowest.state();
-    }
-    return begin;
+    return small ? descended(coldest, lowest.state(), Pace.closing()) : lowest.state();
   }
 
   private static State descended(Replica replica, State from, Pace pace) {

@@ -6,6 +6,7 @@ import dev.couplet.kernel.Adjacency;
 import dev.couplet.kernel.DrawLoop;
 import dev.couplet.kernel.Drawer;
 import dev.couplet.kernel.Pace;
+import dev.couplet.kernel.SweepOrder;
 import dev.couplet.sampling.Draws;
 import dev.couplet.sampling.Run;
 import dev.couplet.sampling.Sampler;
@@ -37,8 +38,8 @@ import java.util.function.Supplier;
  * {@link Annealing}.
  *
  * <p>Cost: a sweep takes r times the O(n + d) steps of a sweep of annealing, r rungs (twice that
- * with clusters, and O(n + m) a rung for them). Memory: 24 bytes a pair, and 16 r bytes a variable,
- * ladder and thread. Immutable and thread-safe.
+ * with clusters, and O(n + m) a rung for them). Memory: 24 bytes a pair, as much again on sparse
+ * forms, and 16 r bytes a variable, ladder and thread. Immutable and thread-safe.
  *
  * <p>Sources: Hukushima and Nemoto, "Exchange Monte Carlo method and application to spin glass
  * simulations" (1996); for the clusters Zhu, Ochoa and Katzgraber, "Efficient cluster algorithm for
@@ -147,10 +148,11 @@ public final class Tempering implements Sampler {
     }
     Adjacency rows = built.get();
     LadderPlan plan = plan(rows, run, setUp);
-    if (setUp.lookBefore(16L * rows.size() * plan.replicas())) {
+    if (setUp.look()) {
       return DrawLoop.unbegun(form, run, vigil);
     }
-    Supplier<Drawer> drawers = () -> new Temperer(form, rows, run, plan, Pace.of(vigil));
+    SweepOrder order = SweepOrder.of(rows, setUp);
+    Supplier<Drawer> drawers = () -> new Temperer(form, order, run, plan, Pace.of(vigil));
     return DrawLoop.run(form, run, vigil, 1, drawers);
   }
 

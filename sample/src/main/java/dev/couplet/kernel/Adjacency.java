@@ -20,13 +20,18 @@ public final class Adjacency {
   private final boolean exact;
   private final int[] portions;
 
+  /** The variable at each place, if the rows were arranged; else empty. */
+  private final int[] order;
+
   private Adjacency(
       int[] start,
       int[] neighbour,
       double[] weight,
       double[] linear,
       double constant,
-      boolean exact) {
+      boolean exact,
+      int[] order) {
+    this.order = order;
     this.start = start;
     this.neighbour = neighbour;
     this.weight = weight;
@@ -102,7 +107,48 @@ public final class Adjacency {
       linear[i] = form.linear(i);
     }
     return Optional.of(
-        new Adjacency(start, neighbour, weight, linear, form.constant(), form.exact()));
+        new Adjacency(start, neighbour, weight, linear, form.constant(), form.exact(), new int[0]));
+  }
+
+  /**
+   * The same rows in another order, unless the pace ends before they are built: row p is that of
+   * variable {@code order[p]}, and neighbours are named by their places. Whoever knows variables
+   * has to ask {@link #variable}.
+   */
+  Optional<Adjacency> arranged(int[] newOrder, Pace pace) {
+    int[] place = new int[newOrder.length];
+    for (int p = 0; p < place.length; p++) {
+      place[newOrder[p]] = p;
+    }
+    int[] newStart = new int[start.length];
+    int[] newNeighbour = new int[neighbour.length];
+    double[] newWeight = new double[weight.length];
+    double[] newLinear = new double[linear.length];
+    int next = 0;
+    for (int p = 0; p < place.length && !pace.ended(); p++) {
+      int i = newOrder[p];
+      newLinear[p] = linear[i];
+      for (int k = start[i]; k < start[i + 1]; k++) {
+        newNeighbour[next] = place[neighbour[k]];
+        newWeight[next++] = weight[k];
+      }
+      newStart[p + 1] = next;
+      if (pace.after(1L + degree(i))) {
+        return Optional.empty();
+      }
+    }
+    return Optional.of(
+        new Adjacency(newStart, newNeighbour, newWeight, newLinear, constant, exact, newOrder));
+  }
+
+  /** The variable whose row stands at a place. */
+  int variable(int place) {
+    return order.length == 0 ? place : order[place];
+  }
+
+  /** Whether rows stand elsewhere than at the number of their variable. */
+  boolean rearranged() {
+    return order.length > 0;
   }
 
   /** The number of variables n. */

@@ -45,7 +45,7 @@ public final class LocalFields {
   /** Moves to a state; if the pace ends that, returns false, and the fields are of no use. */
   public boolean set(State state, Pace pace) {
     for (int i = 0; i < spin.length; i++) {
-      spin[i] = state.spin(i);
+      spin[i] = state.spin(rows.variable(i));
     }
     return refresh(pace);
   }
@@ -117,6 +117,13 @@ public final class LocalFields {
   /** The state as it is now. */
   public State state() {
     long[] words = new long[(spin.length + 63) >>> 6];
+    if (rows.rearranged()) {
+      for (int p = 0; p < spin.length; p++) {
+        int i = rows.variable(p);
+        words[i >> 6] |= Double.doubleToRawLongBits(spin[p]) >>> 63 << i;
+      }
+      return State.ofWords(spin.length, words);
+    }
     for (int w = 0; w < words.length; w++) {
       words[w] = word(spin, w << 6, Math.min(spin.length, (w + 1) << 6));
     }

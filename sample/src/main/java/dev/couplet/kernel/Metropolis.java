@@ -1,5 +1,6 @@
 package dev.couplet.kernel;
 
+import java.util.Optional;
 import java.util.SplittableRandom;
 
 /**
@@ -7,15 +8,22 @@ import java.util.SplittableRandom;
  * leaves it, else with probability exp(-gain / temperature).
  *
  * <p>A random number is taken only where the gain is positive and below {@link Boltzmann#NEVER}
- * temperatures. Source: Metropolis, Rosenbluth, Rosenbluth, Teller and Teller, "Equation of state
- * calculations by fast computing machines" (1953).
+ * temperatures, or, in blocks, for each attempt. Source: Metropolis, Rosenbluth, Rosenbluth, Teller
+ * and Teller, "Equation of state calculations by fast computing machines" (1953).
  */
 public final class Metropolis {
   private final LocalFields fields;
+  private final Optional<BlockSweeps> blocks;
 
-  /** Sweeps over the given state. */
+  /** Sweeps over the given state, variable after variable. */
   public Metropolis(LocalFields fields) {
+    this(fields, SweepOrder.natural(fields.rows()));
+  }
+
+  /** Sweeps over the given state in an order; its fields are those of the order's rows. */
+  public Metropolis(LocalFields fields, SweepOrder order) {
     this.fields = fields;
+    this.blocks = order.inBlocks() ? Optional.of(new BlockSweeps(fields, order)) : Optional.empty();
   }
 
   /**
@@ -23,6 +31,9 @@ public final class Metropolis {
    * of each variable that flips.
    */
   public boolean sweep(double inverseTemperature, SplittableRandom random, Pace pace) {
+    if (blocks.isPresent()) {
+      return blocks.get().sweep(inverseTemperature, random, pace);
+    }
     int[] portion = fields.rows().portions();
     for (int p = 0; p + 1 < portion.length; p++) {
       if (pace.after(attempt(portion[p], portion[p + 1], inverseTemperature, random))) {

@@ -37,13 +37,14 @@ public final class Reassignment {
     List<int[]> kept = new ArrayList<>();
     List<double[]> pairs = new ArrayList<>();
     int[] place = new int[structure.exactlyOne().isEmpty() ? 0 : rows.size()];
+    int[] placeOf = structure.exactlyOne().isEmpty() ? place : places(rows);
     Arrays.fill(place, -1);
     long free = MOST_PLACES;
     for (List<Integer> members : structure.exactlyOne()) {
       int size = members.size();
       boolean fits = size > 1 && size <= LARGEST && (long) size * size <= free;
       if (fits && !pace.ended()) {
-        int[] set = members.stream().mapToInt(Integer::intValue).toArray();
+        int[] set = members.stream().mapToInt(bit -> placeOf[bit]).toArray();
         free -= (long) size * size;
         kept.add(set);
         pairs.add(between(rows, set, place, pace));
@@ -55,6 +56,15 @@ public final class Reassignment {
     for (int s = 0; !rows.exact() && s < sets.length && !pace.ended(); s++) {
       least[s] = least(rows, sets[s], pace);
     }
+  }
+
+  /** Where the row of each variable stands. */
+  private static int[] places(Adjacency rows) {
+    int[] places = new int[rows.size()];
+    for (int p = 0; p < places.length; p++) {
+      places[rows.variable(p)] = p;
+    }
+    return places;
   }
 
   private Reassignment(LocalFields fields, Reassignment like) {

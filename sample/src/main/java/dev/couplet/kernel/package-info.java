@@ -4,7 +4,8 @@
  *
  * <p>{@link dev.couplet.kernel.Adjacency} lays a form out by rows, {@link
  * dev.couplet.kernel.LocalFields} holds one state with the energy change of every flip, {@link
- * dev.couplet.kernel.Metropolis} and {@link dev.couplet.kernel.Descent} move it, {@link
+ * dev.couplet.kernel.Metropolis} (in the blocks of a {@link dev.couplet.kernel.SweepOrder}, if the
+ * form is sparse) and {@link dev.couplet.kernel.Descent} move it, {@link
  * dev.couplet.kernel.ClusterMoves} two of them at once. {@link dev.couplet.kernel.Moves} finds the
  * best of all flips in one pass, {@link dev.couplet.kernel.ReplicaSweeps} moves 64 states at once.
  * {@link dev.couplet.kernel.DrawLoop} runs the draws of any sampler in order, on the threads of a
