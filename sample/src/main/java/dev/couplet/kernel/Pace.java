@@ -18,6 +18,10 @@ public final class Pace {
 
   private static final int LOOK = 1 << 16;
 
+  // Linked with the class, since a pace is also made when time is up.
+  private static final BooleanSupplier NEVER = () -> false;
+  private static final LongPredicate NEVER_BEFORE = bytes -> false;
+
   private final BooleanSupplier over;
   private final LongPredicate overBefore;
   private long left = Long.MAX_VALUE;
@@ -41,7 +45,7 @@ public final class Pace {
 
   /** A pace that never ends. */
   public static Pace free() {
-    return new Pace(() -> false);
+    return new Pace(NEVER, NEVER_BEFORE);
   }
 
   /** A pace for what is still to be done when a draw was told to end: about 2^19 steps. */
