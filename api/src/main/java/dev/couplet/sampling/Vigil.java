@@ -4,7 +4,6 @@ import dev.couplet.form.Qubo;
 import dev.couplet.sampling.Watch.Progress;
 import java.time.Duration;
 import java.util.OptionalDouble;
-import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.LongSupplier;
 import org.jspecify.annotations.Nullable;
 
@@ -37,7 +36,8 @@ public final class Vigil {
   private final long began;
   private final long limit;
   private final Thread caller;
-  private final AtomicReference<@Nullable End> end = new AtomicReference<>();
+  private final Object ending = new Object();
+  private volatile @Nullable End end;
   private long reported;
 
   private Vigil(Effort effort, Watch watch, long kept) {
@@ -86,7 +86,7 @@ public final class Vigil {
    * a byte; if so, it ends now.
    */
   public boolean overBefore(long bytes) {
-    if (end.get() != null) {
+    if (end != null) {
       return true;
     }
     if (watch.stopSignal().stopped() || caller.isInterrupted()) {
@@ -94,17 +94,19 @@ public final class Vigil {
     } else if (limit != UNLIMITED && clock.getAsLong() - began >= limit - bytes) {
       end(End.DEADLINE);
     }
-    return end.get() != null;
+    return end != null;
   }
 
   /** Ends the run for a reason of the method's own; the first reason given stands. */
   public void end(End reason) {
-    end.compareAndSet(null, reason);
+    synchronized (ending) {
+      end = end == null ? reason : end;
+    }
   }
 
   /** Why the run ended; {@link End#DONE} while nothing has ended it. */
   public End reason() {
-    End reason = end.get();
+    End reason = end;
     return reason == null ? End.DONE : reason;
   }
 
