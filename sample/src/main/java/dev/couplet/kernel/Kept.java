@@ -40,12 +40,12 @@ final class Kept {
   }
 
   /**
-   * Keeps as many states as fit into 2^24 words, 1,024 at least and 2^12 at most: more would take
-   * too long to sort and merge when time is up.
+   * Keeps as many states as fit into 2^24 words, 16 at least and 1,024 at most: more would take too
+   * long to sort and merge when time is up.
    */
   static Kept within(int size) {
     int words = 1 + size / 64;
-    return new Kept(Math.min(1 << 12, Math.max(1 << 10, (1 << 24) / words)));
+    return new Kept(Math.min(1 << 10, Math.max(16, (1 << 24) / words)));
   }
 
   synchronized void finished(int number, Draw draw) {

@@ -171,7 +171,7 @@ class AnnealingTest extends SamplerContract {
     Effort effort = Effort.within(Duration.ofNanos(30_000)).sweeps(1);
     Draws draws = Annealing.standard().sample(form, Run.of(effort).watch(ticking));
     assertEquals(End.DEADLINE, draws.end());
-    assertTrue(draws.total() <= 1 << 12, "draws: " + draws.total());
+    assertTrue(draws.total() <= 1 << 10, "draws: " + draws.total());
     assertEquals(Forms.minimum(form), draws.best().energy());
   }
 }
