@@ -19,7 +19,10 @@ public final class Pace {
   private static final int LOOK = 1 << 16;
 
   // Linked with the class, since a pace is also made when time is up.
+  @SuppressWarnings("UnnecessaryLambda")
   private static final BooleanSupplier NEVER = () -> false;
+
+  @SuppressWarnings("UnnecessaryLambda")
   private static final LongPredicate NEVER_BEFORE = bytes -> false;
 
   private final BooleanSupplier over;
