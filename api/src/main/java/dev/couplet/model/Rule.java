@@ -5,7 +5,6 @@ import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import dev.couplet.model.Statement.Range;
 import java.math.BigDecimal;
-import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
@@ -193,21 +192,30 @@ public final class Rule {
 
     /** The largest factor common to all coefficients; 0 if there are none. */
     public double divisor() {
-      BigInteger[] factor = {BigInteger.ZERO};
+      long[] factor = {0};
       terms()
           .forEachTerm(
-              (coefficient, literals) ->
-                  factor[0] = factor[0].gcd(BigInteger.valueOf((long) coefficient)));
-      return factor[0].doubleValue();
+              (coefficient, literals) -> factor[0] = common(factor[0], (long) coefficient));
+      return (double) factor[0];
+    }
+
+    /** The largest factor of both; the other if one is 0. */
+    private static long common(long a, long b) {
+      long left = Math.abs(a);
+      long right = Math.abs(b);
+      while (right != 0) {
+        long rest = left % right;
+        left = right;
+        right = rest;
+      }
+      return left;
     }
 
     /** Whether some multiple of the coefficients' common factor keeps the limits. */
     boolean divisible() {
       double divisor = divisor();
       if (step() > 1) {
-        BigInteger common =
-            BigInteger.valueOf((long) divisor).gcd(BigInteger.valueOf((long) step()));
-        return lowest() % common.doubleValue() == 0;
+        return lowest() % (double) common((long) divisor, (long) step()) == 0;
       }
       return Math.ceil(lowest() / divisor) <= Math.floor(highest() / divisor);
     }
