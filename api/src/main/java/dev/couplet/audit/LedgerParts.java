@@ -2,9 +2,8 @@ package dev.couplet.audit;
 
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.Qubo;
-import dev.couplet.lower.Ledger;
-import dev.couplet.lower.Ledger.Entry;
 import dev.couplet.lower.Ledger.Kind;
+import dev.couplet.lower.Ledger.Source;
 import dev.couplet.lower.Lowered;
 import dev.couplet.lower.Lowered.Weight;
 import java.util.HashMap;
@@ -32,41 +31,22 @@ final class LedgerParts {
   private final ProductBits products;
   private final Map<Integer, Part> partOfAuxiliary = new HashMap<>();
   private final Set<Part> entangled = new HashSet<>();
-  private final double error;
-  private boolean addsUp = true;
+  private final boolean addsUp;
 
   /** Reads the whole ledger, and notes where it does not add up. */
   LedgerParts(Lowered lowered, double error, Notes notes) {
     this.lowered = lowered;
     this.qubo = lowered.qubo();
-    this.error = error;
-    Ledger ledger = lowered.ledger();
-    check(notes, "the constant", qubo.constant(), take(ledger.constant()));
-    for (int i = 0; i < qubo.size(); i++) {
-      check(notes, "bit " + ledger.meaning(i), qubo.linear(i), take(ledger.linear(i), i));
-      for (int j = i + 1; j < qubo.size(); j++) {
-        double sum = take(ledger.pair(i, j), i, j);
-        if (Math.abs(sum - qubo.pair(i, j)) > error || sum != 0) {
-          String what = "the pair of " + ledger.meaning(i) + " and " + ledger.meaning(j);
-          check(notes, what, qubo.pair(i, j), sum);
-        }
-      }
+    this.addsUp = LedgerSum.check(lowered, notes);
+    for (Source source : lowered.ledger().sources()) {
+      terms
+          .computeIfAbsent(
+              new Part(source.name(), source.kind()), p -> Polynomial.builder(qubo.size()))
+          .add(source.terms(), source.factor());
     }
     products = ProductBits.of(qubo.toPolynomial(), lowered.decisionBits(), error);
     terms.forEach((part, own) -> parts.put(part, products.replacedIn(own.build())));
     parts.forEach(this::claim);
-  }
-
-  private double take(List<Entry> entries, int... variables) {
-    double sum = 0;
-    for (Entry entry : entries) {
-      Part part = new Part(entry.source(), entry.kind());
-      sum += entry.amount();
-      terms
-          .computeIfAbsent(part, p -> Polynomial.builder(qubo.size()))
-          .add(entry.amount(), variables);
-    }
-    return sum;
   }
 
   private void claim(Part part, Polynomial own) {
@@ -86,20 +66,6 @@ final class LedgerParts {
         entangled.add(other);
       }
     }
-  }
-
-  private void check(Notes notes, String what, double coefficient, double sum) {
-    boolean same = Math.abs(sum - coefficient) <= error;
-    addsUp &= same;
-    notes.expect(
-        "ledger",
-        same,
-        () ->
-            what
-                + ": the form has "
-                + Numbers.shown(coefficient)
-                + ", the ledger's entries add up to "
-                + Numbers.shown(sum));
   }
 
   /**

@@ -1,7 +1,9 @@
 package dev.couplet.audit;
 
 import dev.couplet.lower.Lowered;
+import dev.couplet.model.Plan;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -61,6 +63,102 @@ public final class LoweringAudit {
               + " part of this one with some of its rules");
     }
     return new ExhaustiveAudit(lowered).report();
+  }
+
+  /**
+   * Proves of a model of any size, rule by rule, that its form says what it says, or names what it
+   * could not prove.
+   *
+   * <p>The form is taken apart by its ledger, whose sources have to add up to it, and whose
+   * auxiliary bits have to be of one rule each. Then, each by itself:
+   *
+   * <ul>
+   *   <li>the objective is the model's under every plan, coefficient by coefficient
+   *   <li>each code is 0 where its bits stand for a value and above 0 elsewhere
+   *   <li>each penalty of a required rule, its auxiliary bits at their best, is 0 under plans that
+   *       keep the rule, at least some v above 0 under other plans, and below 0, if at all, only
+   *       where a code is broken
+   *   <li>each preferred rule costs what missing it costs
+   * </ul>
+   *
+   * <p>Few bits are looked at under every pattern; more have to be of a form that is proved for any
+   * number of them: a square of whole numbers whose slack covers just the amounts that are allowed,
+   * or a form that is symmetric in its literals. The weights put these together: weight times v has
+   * to be above what the objective is at the most under the best plan, less what it is at the least
+   * under all patterns; for a code with what penalties can be below 0 where it is broken.
+   *
+   * <p>A certificate without findings holds if the model has a feasible plan at all, which this
+   * audit does not look for: then every best state of the form is a best plan. A finding does not
+   * mean that the form is wrong: its message begins with "not certified" where it may only be that
+   * no proof was found. That a completed plan has its auxiliary bits at their best is left to
+   * {@link #exhaustive}.
+   *
+   * <p>Cost: linear in the terms of form and rules but for sorting, plus 2^b for every rule that
+   * has b bits and no known form, b at most 20.
+   */
+  public static Certificate byRule(Lowered lowered) {
+    return new RuleAudit(lowered, Optional.empty()).certificate();
+  }
+
+  /**
+   * The same, where a feasible plan is known: the best plan is no worse than that, which lighter
+   * weights may need.
+   *
+   * @throws IllegalArgumentException if the plan is not feasible or of another model
+   */
+  public static Certificate byRule(Lowered lowered, Plan known) {
+    return new RuleAudit(lowered, Optional.of(known)).certificate();
+  }
+
+  /**
+   * What an audit rule by rule proved. Immutable.
+   *
+   * @param width the objective at the most under the best plan, less the objective at the least
+   *     under all bit patterns: what breaking a rule has to cost more than
+   * @param proofs the codes and rules that are proved, in the order of the statement, codes first
+   * @param findings what is wrong, or could not be proved
+   */
+  public record Certificate(double width, List<RuleProof> proofs, Findings findings) {
+    /** Copies the list. */
+    public Certificate {
+      proofs = List.copyOf(proofs);
+    }
+
+    /** Whether everything is proved. */
+    public boolean passed() {
+      return findings.none();
+    }
+
+    /**
+     * Does nothing if everything is proved.
+     *
+     * @throws AssertionError listing what is not, with the name of the rule and what to do
+     */
+    public void orThrow() {
+      findings.orThrow();
+    }
+
+    /** A line for each proof, and the findings. */
+    @Override
+    public String toString() {
+      StringBuilder text = new StringBuilder();
+      text.append("the objective can win ").append(Numbers.shown(width));
+      proofs.forEach(proof -> text.append("\n  ").append(proof));
+      return text.append('\n').append(findings).toString();
+    }
+  }
+
+  /**
+   * A penalty that is proved by itself.
+   *
+   * @param rule the rule's name, or words that name a choice's code
+   * @param how in words
+   */
+  public record RuleProof(String rule, String how) {
+    @Override
+    public String toString() {
+      return "'" + rule + "': " + how;
+    }
   }
 
   /**

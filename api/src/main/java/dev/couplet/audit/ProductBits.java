@@ -2,10 +2,10 @@ package dev.couplet.audit;
 
 import dev.couplet.form.Polynomial;
 import java.util.ArrayList;
-import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
-import java.util.stream.IntStream;
 
 /**
  * Auxiliary bits that are best at the product of two bits before them, whatever the other bits are:
@@ -28,77 +28,60 @@ final class ProductBits {
   /** Those of a form of degree 2; G may be on the wrong side of 0 by {@code error}. */
   static ProductBits of(Polynomial form, int decisionBits, double error) {
     List<Found> found = new ArrayList<>();
-    Polynomial left = form;
+    TermsByBit left = new TermsByBit(form, decisionBits);
     for (int w = form.size() - 1; w >= decisionBits; w--) {
-      Optional<Found> one = found(left, w, error);
+      Optional<Found> one = found(left.of(w), w, error);
       if (one.isPresent()) {
         found.add(one.get());
-        left = without(left, one.get());
+        left.replace(w, one.get().x(), one.get().y());
       }
     }
-    return new ProductBits(separable(left, decisionBits) ? found : List.of());
+    boolean none = found.isEmpty();
+    return new ProductBits(none || separable(left.build(), decisionBits) ? found : List.of());
   }
 
   /** A part of the form with products in the place of the bits. */
   Polynomial replacedIn(Polynomial part) {
-    Polynomial left = part;
-    for (Found one : found) {
-      left = without(left, one);
+    if (found.isEmpty()) {
+      return part;
     }
-    return left;
+    TermsByBit left = new TermsByBit(part, found.get(found.size() - 1).w());
+    found.forEach(one -> left.replace(one.w(), one.x(), one.y()));
+    return left.build();
   }
 
-  private static Optional<Found> found(Polynomial form, int w, double error) {
-    int[] lowest =
-        IntStream.range(0, w)
-            .filter(other -> form.coefficient(other, w) < 0)
-            .boxed()
-            .sorted((a, b) -> Double.compare(form.coefficient(a, w), form.coefficient(b, w)))
-            .mapToInt(Integer::intValue)
+  /** The bits that w stands for the product of, from its terms without it. */
+  private static Optional<Found> found(Map<List<Integer>, Double> terms, int w, double error) {
+    List<Integer> lowest =
+        terms.entrySet().stream()
+            .filter(term -> term.getKey().size() == 1 && term.getKey().get(0) < w)
+            .filter(term -> term.getValue() < 0)
+            .sorted(
+                Comparator.comparingDouble((Map.Entry<List<Integer>, Double> t) -> t.getValue())
+                    .thenComparing(t -> t.getKey().get(0)))
             .limit(2)
-            .toArray();
-    if (lowest.length < 2) {
+            .map(term -> term.getKey().get(0))
+            .toList();
+    if (lowest.size() < 2) {
       return Optional.empty();
     }
-    int x = lowest[0];
-    int y = lowest[1];
-    double alone = form.coefficient(w);
-    double ofX = form.coefficient(x, w);
-    double ofY = form.coefficient(y, w);
-    double[] rest = {0, 0};
-    form.forEachTerm(
-        (coefficient, variables) -> {
-          boolean own =
-              variables.length == 1
-                  || (variables.length == 2 && (variables[0] == x || variables[0] == y));
-          if (!own && has(variables, w)) {
-            rest[coefficient < 0 ? 0 : 1] += coefficient;
-          }
-        });
-    boolean oneWhereBoth = alone + ofX + ofY + rest[1] <= error;
-    boolean zeroElsewhere = alone + Math.min(ofX, ofY) + rest[0] >= -error;
+    int x = lowest.get(0);
+    int y = lowest.get(1);
+    double alone = terms.getOrDefault(List.of(), 0.0);
+    double ofX = terms.getOrDefault(List.of(x), 0.0);
+    double ofY = terms.getOrDefault(List.of(y), 0.0);
+    double below = 0;
+    double above = 0;
+    for (Map.Entry<List<Integer>, Double> term : terms.entrySet()) {
+      List<Integer> others = term.getKey();
+      if (!others.isEmpty() && !others.equals(List.of(x)) && !others.equals(List.of(y))) {
+        below += Math.min(0, term.getValue());
+        above += Math.max(0, term.getValue());
+      }
+    }
+    boolean oneWhereBoth = alone + ofX + ofY + above <= error;
+    boolean zeroElsewhere = alone + Math.min(ofX, ofY) + below >= -error;
     return oneWhereBoth && zeroElsewhere ? Optional.of(new Found(w, x, y)) : Optional.empty();
-  }
-
-  private static boolean has(int[] variables, int variable) {
-    return Arrays.binarySearch(variables, variable) >= 0;
-  }
-
-  private static Polynomial without(Polynomial form, Found one) {
-    Polynomial.Builder left = Polynomial.builder(form.size());
-    boolean[] changed = {false};
-    form.forEachTerm(
-        (coefficient, variables) -> {
-          if (has(variables, one.w())) {
-            IntStream rest = Arrays.stream(variables).filter(v -> v != one.w());
-            IntStream both = IntStream.of(one.x(), one.y());
-            left.add(coefficient, IntStream.concat(rest, both).toArray());
-            changed[0] = true;
-          } else {
-            left.add(coefficient, variables);
-          }
-        });
-    return changed[0] ? left.build() : form;
   }
 
   /** Whether no term of degree 3 or more has two bits that are left to be minimised. */

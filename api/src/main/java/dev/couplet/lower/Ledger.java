@@ -35,8 +35,15 @@ public final class Ledger {
    */
   public record Entry(String source, Kind kind, double amount) {}
 
-  /** A source's polynomial of degree at most 2, and what it is multiplied by. */
-  record Source(String name, Kind kind, Polynomial terms, double factor) {
+  /**
+   * All that one source adds to the form: its terms, each times the factor.
+   *
+   * @param name the name of the rule or objective, or words that name the choice
+   * @param kind what it is
+   * @param terms a polynomial of degree at most 2 over the bits
+   * @param factor what it is multiplied by: the weight of a penalty, a cost a unit, else 1
+   */
+  public record Source(String name, Kind kind, Polynomial terms, double factor) {
     /** The same in a form that has more bits by now. */
     Source inVariables(int size) {
       return new Source(name, kind, terms.inVariables(size), factor);
@@ -70,6 +77,11 @@ public final class Ledger {
       throw new IllegalArgumentException("pair (" + i + ", " + j + ") names one bit twice");
     }
     return entries(i, j);
+  }
+
+  /** Everything that the form is the sum of, in the order in which it is added up. */
+  public List<Source> sources() {
+    return sources;
   }
 
   /** What a bit stands for, in words. */
