@@ -55,6 +55,7 @@ class RuleAuditTest {
         new BitTable(coding),
         new Ledger(sources, meanings),
         faithful.weights(),
+        faithful.approximate(),
         faithful.structure());
   }
 
@@ -111,6 +112,7 @@ class RuleAuditTest {
             new BitTable(coding),
             faithful.ledger(),
             faithful.weights(),
+            faithful.approximate(),
             faithful.structure());
     AssertionError error =
         assertThrows(AssertionError.class, () -> LoweringAudit.byRule(off).orThrow());
