@@ -110,7 +110,7 @@ final class SymmetricShare {
     int bits = other.size();
     boolean[] on = new boolean[bits];
     for (int pattern = 0; pattern < 1 << bits; pattern++) {
-      double sum = alone * held + pair * (held * (held - 1) / 2);
+      double sum = alone * held + pair * (held * (held - 1.0) / 2);
       for (int w = 0; w < bits; w++) {
         on[w] = (pattern >>> w & 1) != 0;
         sum += on[w] ? each[w] * held : 0;
