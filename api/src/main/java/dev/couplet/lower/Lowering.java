@@ -23,8 +23,14 @@ import java.util.Set;
  * <table>
  *   <caption>Bits and coefficients of each construct</caption>
  *   <tr><th>stated</th><th>bits</th><th>pairs</th><th>largest coefficient</th></tr>
- *   <tr><td>bit</td><td>1</td><td>0</td><td>0</td></tr>
+ *   <tr><td>bit, spin, member of a subset</td><td>1</td><td>0</td><td>0</td></tr>
+ *   <tr><td>count of a range of width w</td><td>floor(log2 w) + 1</td><td>0</td><td>0</td></tr>
  *   <tr><td>choice of k, one bit an option</td><td>k</td><td>k(k-1)/2</td><td>2</td></tr>
+ *   <tr><td>the same by domain walls</td><td>k - 1</td><td>k - 2</td><td>1</td></tr>
+ *   <tr><td>the same in binary</td><td>ceil(log2 k)</td><td>0</td><td>0</td></tr>
+ *   <tr><td>order of n items at p places, code alone</td><td>n p</td><td>p n(n-1)/2</td>
+ *     <td>2</td></tr>
+ *   <tr><td>decision that is fixed</td><td>0</td><td>0</td><td>0</td></tr>
  *   <tr><td>rule on one or two literals</td><td>0</td><td>1</td><td>twice the largest amount</td></tr>
  *   <tr><td>at most one of n (also as any two exceed the limit)</td><td>0</td><td>n(n-1)/2</td>
  *     <td>n - 1</td></tr>
