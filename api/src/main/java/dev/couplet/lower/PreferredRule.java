@@ -64,7 +64,7 @@ record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
     double high = limits.range().highest();
     double step = limits.step();
     double between = Math.floor(step / 2);
-    double room = room(limits, low, high) / step;
+    double room = Math.ceil(room(limits, low, high) / step);
     double mostOver = limits.hasHighest() ? Math.max(between, high - limits.highest()) : 0;
     double mostUnder = limits.hasLowest() ? Math.max(between, limits.lowest() - low) : 0;
     Slack slack = Slack.upTo(room, "the slack of '" + rule + "'", bits);
@@ -97,7 +97,10 @@ record PreferredRule(Polynomial cost, Optional<Polynomial> tie, String form) {
         "amount counted in " + used + " bits");
   }
 
-  /** How far the terms can lie inside the limits. */
+  /**
+   * How far the terms can lie inside the limits. In steps it is rounded up: the value that is
+   * nearest to the end of the range may lie beyond it.
+   */
   private static double room(Limits limits, double low, double high) {
     if (limits.hasHighest()) {
       return limits.highest() - Math.max(low, limits.lowest());

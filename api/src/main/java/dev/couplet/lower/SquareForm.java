@@ -22,7 +22,8 @@ final class SquareForm {
             ? limits.highest() - Math.max(limits.lowest(), limits.range().lowest())
             : limits.range().highest() - limits.lowest();
     double step = limits.step();
-    Slack slack = Slack.upTo(most / step, "the slack of '" + rule + "'", bits);
+    double steps = Math.ceil(most / step);
+    Slack slack = Slack.upTo(steps, "the slack of '" + rule + "'", bits);
     Polynomial.Builder difference = difference(limits.terms(), bits.size());
     slack.addTo(difference, fromAbove ? step : -step);
     difference.add(fromAbove ? -limits.highest() : -limits.lowest());
@@ -32,7 +33,7 @@ final class SquareForm {
           double missing = fromAbove ? limits.highest() - value : value - limits.lowest();
           slack.set(Math.rint(missing / step), values);
         });
-    String form = "square, slack 0.." + (long) (most / step) + " in " + slack.bits() + " bits";
+    String form = "square, slack 0.." + (long) steps + " in " + slack.bits() + " bits";
     return new Penalty(squared(difference), form);
   }
 
