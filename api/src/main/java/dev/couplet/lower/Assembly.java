@@ -107,6 +107,12 @@ final class Assembly {
         addPenalty(decision.code(), Kind.CODE, penalty, below.getOrDefault(decision, 0.0));
       }
     }
+    for (Recoded one : coding.recoded()) {
+      Penalty penalty = new Penalty(coding.penalty(one), one.code().form());
+      if (penalty.terms().terms() > 0) {
+        addPenalty(one.count().code(), Kind.CODE, penalty, 0);
+      }
+    }
   }
 
   private void addRule(Rule rule) {

@@ -3,6 +3,7 @@ package dev.couplet.lower;
 import dev.couplet.form.Polynomial;
 import dev.couplet.form.State;
 import dev.couplet.lower.ChoiceEncoding.Code;
+import dev.couplet.model.Count;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Plan;
 import dev.couplet.model.Statement;
@@ -29,6 +30,7 @@ final class Coding {
 
   private final Statement statement;
   private final List<Coded> coded = new ArrayList<>();
+  private final List<Recoded> recoded = new ArrayList<>();
   private final List<String> meanings = new ArrayList<>();
   private final int[] bitOf;
   private final int[] start;
@@ -42,9 +44,9 @@ final class Coding {
     this.start = new int[statement.literals() + 1];
     Arrays.fill(bitOf, -1);
     this.over = new Polynomial[statement.literals()];
-    Map<Integer, Code> codes = new HashMap<>();
+    Map<Object, Code> codes = new HashMap<>();
     for (Decision decision : statement.decisions()) {
-      allot(decision, settings, codes);
+      allot(decision, settings.codes(), codes);
     }
     start[statement.literals()] = meanings.size();
     boolean same = bitOf.length == meanings.size();
@@ -61,21 +63,40 @@ final class Coding {
     }
   }
 
-  private void allot(Decision decision, Lowering settings, Map<Integer, Code> codes) {
+  private void allot(Decision decision, Codes settings, Map<Object, Code> codes) {
     int first = statement.firstLiteral(decision);
     start[first] = meanings.size();
-    List<List<Integer>> groups = statement.exactlyOne(decision);
-    for (int literal : statement.free(decision)) {
+    List<Integer> free = statement.free(decision);
+    if (decision instanceof Count count && !free.isEmpty() && recode(count, settings)) {
+      return;
+    }
+    for (int literal : free) {
       bitOf[literal] = meanings.size();
       meanings.add(statement.describe(literal));
     }
-    for (List<Integer> group : groups) {
-      ChoiceEncoding encoding = settings.encoding(decision);
-      Code code = codes.computeIfAbsent(group.size(), encoding::code);
+    for (List<Integer> group : statement.exactlyOne(decision)) {
+      ChoiceEncoding encoding = settings.of(decision);
+      Code code =
+          codes.computeIfAbsent(
+              List.of(encoding, group.size()), key -> encoding.code(group.size()));
       Coded one = new Coded(decision, group.get(0), meanings.size(), code);
       coded.add(one);
       name(one);
     }
+  }
+
+  /** Allots bits that are not the digits of a count; false where they are the same. */
+  private boolean recode(Count count, Codes settings) {
+    long width = count.highest() - count.lowest();
+    CountEncoding.Code digits = CountEncoding.binary().code(width);
+    CountEncoding.Code code = settings.of(count).code(width);
+    if (code.amounts().equals(digits.amounts()) && code.penalty().terms() == 0) {
+      return false;
+    }
+    int first = statement.firstLiteral(count);
+    recoded.add(new Recoded(count, first, digits, meanings.size(), code));
+    code.amounts().forEach(amount -> meanings.add(amount + " of '" + count.name() + "'"));
+    return true;
   }
 
   private void name(Coded one) {
@@ -148,6 +169,16 @@ final class Coding {
     return coded;
   }
 
+  /** The counts whose bits are not their digits. */
+  List<Recoded> recoded() {
+    return recoded;
+  }
+
+  /** The penalty of such a count's code over all decision bits. */
+  Polynomial penalty(Recoded one) {
+    return shifted(one.code().penalty(), one.bit());
+  }
+
   /** The penalty of a code over all decision bits. */
   Polynomial penalty(Coded one) {
     return shifted(one.code().penalty(), one.bit());
@@ -200,8 +231,24 @@ final class Coding {
       return literals;
     }
     Polynomial.Builder sum = Polynomial.builder(bits());
-    literals.forEachTerm((coefficient, product) -> add(sum, coefficient, product));
+    withoutDigits(literals).forEachTerm((coefficient, product) -> add(sum, coefficient, product));
     return sum.build();
+  }
+
+  /** Digits of recoded counts replaced by bits, which are numbered from the last literal on. */
+  private Polynomial withoutDigits(Polynomial literals) {
+    if (recoded.isEmpty()) {
+      return literals;
+    }
+    Set<Recoded> occurring = new LinkedHashSet<>();
+    for (int literal : Terms.variables(literals)) {
+      recoded.stream().filter(one -> one.hasDigit(literal)).forEach(occurring::add);
+    }
+    Polynomial result = literals.inVariables(bitOf.length + bits());
+    for (Recoded one : occurring) {
+      result = one.overBits(result, bitOf.length);
+    }
+    return result;
   }
 
   private void add(Polynomial.Builder sum, double coefficient, int[] product) {
@@ -209,7 +256,9 @@ final class Coding {
     int count = 0;
     Polynomial others = null;
     for (int literal : product) {
-      if (bitOf[literal] >= 0) {
+      if (literal >= bitOf.length) {
+        plain[count++] = literal - bitOf.length;
+      } else if (bitOf[literal] >= 0) {
         plain[count++] = bitOf[literal];
       } else {
         others = others == null ? over[literal] : others.times(over[literal]);
@@ -241,6 +290,11 @@ final class Coding {
         }
       }
     }
+    for (Recoded one : recoded) {
+      if (!one.read(pattern, literals)) {
+        undecided.add(one.count());
+      }
+    }
     return statement.plan(State.of(literals), undecided);
   }
 
@@ -263,6 +317,7 @@ final class Coding {
 
   /** Writes the pattern of a plan into the decision bits. */
   void write(State literals, boolean[] bits) {
+    recoded.forEach(one -> one.write(literals, bits));
     for (int literal = 0; literal < bitOf.length; literal++) {
       if (bitOf[literal] >= 0) {
         bits[bitOf[literal]] = literals.get(literal);

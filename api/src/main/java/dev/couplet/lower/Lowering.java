@@ -2,6 +2,7 @@ package dev.couplet.lower;
 
 import dev.couplet.form.CheckReturnValue;
 import dev.couplet.model.Choice;
+import dev.couplet.model.Count;
 import dev.couplet.model.Decision;
 import dev.couplet.model.Model;
 import dev.couplet.model.Rule;
@@ -25,6 +26,9 @@ import java.util.Set;
  *   <tr><th>stated</th><th>bits</th><th>pairs</th><th>largest coefficient</th></tr>
  *   <tr><td>bit, spin, member of a subset</td><td>1</td><td>0</td><td>0</td></tr>
  *   <tr><td>count of a range of width w</td><td>floor(log2 w) + 1</td><td>0</td><td>0</td></tr>
+ *   <tr><td>the same, amounts up to a bound u</td><td>about log2 u + w / u</td><td>0</td>
+ *     <td>0</td></tr>
+ *   <tr><td>the same, unary; by domain walls</td><td>w</td><td>0; w - 1</td><td>0; 1</td></tr>
  *   <tr><td>choice of k, one bit an option</td><td>k</td><td>k(k-1)/2</td><td>2</td></tr>
  *   <tr><td>the same by domain walls</td><td>k - 1</td><td>k - 2</td><td>1</td></tr>
  *   <tr><td>the same in binary</td><td>ceil(log2 k)</td><td>0</td><td>0</td></tr>
@@ -57,24 +61,23 @@ import java.util.Set;
 @CheckReturnValue
 public final class Lowering {
   private static final Lowering STANDARD =
-      new Lowering(
-          Weights.rangeBound(), Map.of(), ChoiceEncoding.oneHot(), Aim.AUXILIARIES, Map.of());
+      new Lowering(Weights.rangeBound(), Map.of(), Codes.STANDARD, Aim.AUXILIARIES, Map.of());
 
   private final Weights weights;
   private final Map<String, Double> byName;
-  private final ChoiceEncoding choices;
+  private final Codes codes;
   private final Aim aim;
   private final Map<String, UnbalancedForm> unbalanced;
 
   private Lowering(
       Weights weights,
       Map<String, Double> byName,
-      ChoiceEncoding choices,
+      Codes codes,
       Aim aim,
       Map<String, UnbalancedForm> unbalanced) {
     this.weights = weights;
     this.byName = byName;
-    this.choices = choices;
+    this.codes = codes;
     this.aim = aim;
     this.unbalanced = unbalanced;
   }
@@ -86,12 +89,31 @@ public final class Lowering {
 
   /** These settings with another way to choose weights. */
   public Lowering with(Weights newWeights) {
-    return new Lowering(newWeights, byName, choices, aim, unbalanced);
+    return new Lowering(newWeights, byName, codes, aim, unbalanced);
   }
 
   /** These settings with another code for choices. */
   public Lowering with(ChoiceEncoding newChoices) {
-    return new Lowering(weights, byName, newChoices, aim, unbalanced);
+    return with(codes.with(newChoices));
+  }
+
+  /** These settings with another code for one choice. */
+  public Lowering encode(Choice<?> choice, ChoiceEncoding encoding) {
+    return with(codes.with(choice, encoding));
+  }
+
+  /** These settings with another code for counts. */
+  public Lowering with(CountEncoding newCounts) {
+    return with(codes.with(newCounts));
+  }
+
+  /** These settings with another code for one count. */
+  public Lowering encode(Count count, CountEncoding encoding) {
+    return with(codes.with(count, encoding));
+  }
+
+  private Lowering with(Codes newCodes) {
+    return new Lowering(weights, byName, newCodes, aim, unbalanced);
   }
 
   /**
@@ -99,7 +121,7 @@ public final class Lowering {
    * and of the ways that take as many so that the largest coefficient is small. The default.
    */
   public Lowering fewestAuxiliaries() {
-    return new Lowering(weights, byName, choices, Aim.AUXILIARIES, unbalanced);
+    return new Lowering(weights, byName, codes, Aim.AUXILIARIES, unbalanced);
   }
 
   /**
@@ -108,7 +130,7 @@ public final class Lowering {
    * coefficients with few digits.
    */
   public Lowering smallestCoefficients() {
-    return new Lowering(weights, byName, choices, Aim.COEFFICIENTS, unbalanced);
+    return new Lowering(weights, byName, codes, Aim.COEFFICIENTS, unbalanced);
   }
 
   /**
@@ -125,7 +147,7 @@ public final class Lowering {
     }
     Map<String, Double> more = new LinkedHashMap<>(byName);
     more.put(rule, value);
-    return new Lowering(weights, Collections.unmodifiableMap(more), choices, aim, unbalanced);
+    return new Lowering(weights, Collections.unmodifiableMap(more), codes, aim, unbalanced);
   }
 
   /**
@@ -155,7 +177,7 @@ public final class Lowering {
     }
     Map<String, UnbalancedForm> more = new LinkedHashMap<>(unbalanced);
     more.put(rule, new UnbalancedForm(linear, square));
-    return new Lowering(weights, byName, choices, aim, Collections.unmodifiableMap(more));
+    return new Lowering(weights, byName, codes, aim, Collections.unmodifiableMap(more));
   }
 
   Optional<UnbalancedForm> unbalanced(String rule) {
@@ -166,8 +188,8 @@ public final class Lowering {
    * Lowers the model as it stands now. Linear in the terms of the penalties, multiplied out.
    *
    * @throws IllegalArgumentException if a weight was set for a rule that the model does not have or
-   *     only prefers, or the form's whole coefficients would be too large for exact energies,
-   *     naming the heaviest rule
+   *     only prefers, or a code for a decision that it does not have, or the form's whole
+   *     coefficients would be too large for exact energies, naming the heaviest rule
    */
   public Lowered lower(Model model) {
     return lower(model.snapshot());
@@ -183,6 +205,7 @@ public final class Lowering {
             "rule '" + rule + "' has an approximate penalty and a weight: set one of them");
       }
     }
+    codes.requireKnown(statement);
     return new Assembly(statement, this).lowered();
   }
 
@@ -224,8 +247,8 @@ public final class Lowering {
     return aim;
   }
 
-  ChoiceEncoding encoding(Decision decision) {
-    return decision instanceof Choice ? choices : ChoiceEncoding.oneHot();
+  Codes codes() {
+    return codes;
   }
 
   Weights.Chosen choose(Weights.Facts facts) {

@@ -23,7 +23,13 @@ import java.util.Map;
  * not).
  */
 final class ProofChecker {
-  private record Limit(Map<Integer, BigInteger> terms, BigInteger lowest, BigInteger highest) {}
+  private record Limit(
+      Map<Integer, BigInteger> terms, BigInteger lowest, BigInteger highest, BigInteger step) {
+    /** Whether a sum lies between the values that keep the limit; steps have both limits. */
+    boolean skips(BigInteger sum) {
+      return !step.equals(BigInteger.ONE) && sum.subtract(lowest).mod(step).signum() != 0;
+    }
+  }
 
   private final Statement statement;
   private final List<List<Integer>> groups = new ArrayList<>();
@@ -76,7 +82,8 @@ final class ProofChecker {
     if (!Double.isInfinite(part.highest())) {
       highest = new BigDecimal(part.highest()).toBigInteger();
     }
-    return new Limit(terms, lowest, highest);
+    BigInteger step = new BigDecimal(part.step()).toBigInteger();
+    return new Limit(terms, lowest, highest, step);
   }
 
   private static List<List<Integer>> copy(List<List<Integer>> groups) {
@@ -227,6 +234,9 @@ final class ProofChecker {
       BigInteger[] range = range(limit, left, value);
       if ((limit.highest() != null && range[0].compareTo(limit.highest()) > 0)
           || (limit.lowest() != null && range[1].compareTo(limit.lowest()) < 0)) {
+        return true;
+      }
+      if (range[0].equals(range[1]) && limit.skips(range[0])) {
         return true;
       }
     }
