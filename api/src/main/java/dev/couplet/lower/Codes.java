@@ -53,7 +53,7 @@ record Codes(
 
   /** Insists that what is set by hand belongs to the statement. */
   void requireKnown(Statement statement) {
-    choicesByHand.keySet().forEach(statement::isFixed);
-    countsByHand.keySet().forEach(statement::isFixed);
+    choicesByHand.keySet().forEach(statement::require);
+    countsByHand.keySet().forEach(statement::require);
   }
 }

@@ -7,10 +7,11 @@
  * weight} of each rule with the reason why it suffices, and the {@link dev.couplet.lower.Ledger}
  * that says where each coefficient came from.
  *
- * <p>One step a file, in the order of the work: {@code BitTable} numbers the bits, {@code Limits}
- * tightens a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms
- * ({@code TwoBitForm}, {@code ConflictForm}, {@code ClauseForm}, on request {@code UnbalancedForm},
- * {@code SquareForm} with {@code Slack}), {@code RangeBound} or {@code IncumbentBound} or {@code
+ * <p>One step a file, in the order of the work: {@code Coding} allots bits to decisions by {@code
+ * ChoiceEncoding} and {@code CountEncoding}, {@code BitTable} numbers all, {@code Limits} tightens
+ * a rule, {@code RequiredRule} and {@code PreferredRule} choose its penalty from the forms ({@code
+ * TwoBitForm}, {@code ConflictForm}, {@code ClauseForm}, on request {@code UnbalancedForm}, {@code
+ * SquareForm} with {@code Slack}), {@code RangeBound} or {@code IncumbentBound} or {@code
  * RepairBound} weighs it, {@code DegreeReduction} brings every term to degree 2, {@code Assembly}
  * adds all up.
  *

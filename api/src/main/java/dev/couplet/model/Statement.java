@@ -330,7 +330,7 @@ public final class Statement {
    *
    * @throws IllegalArgumentException if it is of another model, or was made after this statement
    */
-  void require(Decision decision) {
+  public void require(Decision decision) {
     Slot slot = Slot.of(decision);
     Model other = slot.owner();
     if (other != owner) {

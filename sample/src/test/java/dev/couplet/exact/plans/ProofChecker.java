@@ -326,7 +326,8 @@ final class ProofChecker {
                 .getOrDefault(one, BigInteger.ZERO)
                 .add(limit.terms().getOrDefault(other, BigInteger.ZERO));
         if ((limit.highest() != null && sum.compareTo(limit.highest()) > 0)
-            || (limit.lowest() != null && sum.compareTo(limit.lowest()) < 0)) {
+            || (limit.lowest() != null && sum.compareTo(limit.lowest()) < 0)
+            || limit.skips(sum)) {
           return false;
         }
       }

@@ -77,6 +77,12 @@ class ProofProperties {
     }
   }
 
+  /** A rule that a sum is odd, of which one literal is open. */
+  @Example
+  void proofsOfRulesInStepsHold() {
+    holds(RandomModels.of(Regime.LOGIC, 8545519).snapshot());
+  }
+
   @Property(tries = 60)
   void proofsOfAssignmentsHold(@ForAll long seed) {
     SplittableRandom random = new SplittableRandom(seed);
