@@ -24,7 +24,7 @@ public interface CountEncoding {
 
   /**
    * As in binary, but no amount above a bound: more bits, smaller coefficients. Source: Karimi and
-   * Ronagh, "Practical integer-to-binary mapping for quantum annealers" (2019).
+   * Ronagh (2019), bounded-coefficient codes of whole numbers.
    *
    * @throws IllegalArgumentException unless the bound is at least 1
    */
