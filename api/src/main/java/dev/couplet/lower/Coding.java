@@ -211,6 +211,16 @@ final class Coding {
     return plain[0];
   }
 
+  /** Whether a polynomial over literals has digits of a count whose bits are others. */
+  boolean hasDigits(Polynomial literals) {
+    for (int literal : Terms.variables(literals)) {
+      if (recoded.stream().anyMatch(one -> one.hasDigit(literal))) {
+        return true;
+      }
+    }
+    return false;
+  }
+
   /**
    * The decisions, each once, of which a polynomial over bits has bits that are not all literals.
    */

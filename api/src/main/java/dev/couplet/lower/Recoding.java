@@ -10,12 +10,13 @@ import java.util.Map;
 /**
  * Writes polynomials over the digits of one count over the bits of another code of it.
  *
- * <p>What stands beside one product of other literals is a function f of the number v, given over
- * the digits. If its longest product of digits is shorter than there are digits, f is a polynomial
- * in v of that degree (a power of v has products of as many digits as its degree); else of degree
- * width at most. So f(v) is the sum of the j-th forward difference of f at 0 times C(v, j), and
- * C(v, j) over bits with amounts a is the coefficient of t^j in the product of {@code 1 + x ((1 +
- * t)^a - 1)} (Vandermonde): whole numbers stay whole.
+ * <p>The polynomial must be one in the number, as sums and products of counts are. What stands
+ * beside one product of other literals is a function f of the number v, given over the digits. If
+ * its longest product of digits is shorter than there are digits, f is a polynomial in v of that
+ * degree (a power of v has products of as many digits as its degree); else of degree width at most.
+ * So f(v) is the sum of the j-th forward difference of f at 0 times C(v, j), and C(v, j) over bits
+ * with amounts a is the coefficient of t^j in the product of {@code 1 + x ((1 + t)^a - 1)}
+ * (Vandermonde): whole numbers stay whole.
  */
 final class Recoding {
   private final int firstDigit;

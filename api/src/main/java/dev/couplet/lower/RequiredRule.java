@@ -48,9 +48,12 @@ final class RequiredRule {
     return TwoBitForm.of(limits, size).or(() -> ConflictForm.of(limits, size));
   }
 
-  /** Of degree 2, where some literals are no bits. */
+  /**
+   * Of degree 2, where some literals are no bits; not over digits, whose patterns such a form tells
+   * apart and not only their number.
+   */
   private static Optional<Penalty> overLiterals(Rule.Part part, Coding coding, int size) {
-    if (coding.ofBits(part.terms())) {
+    if (coding.ofBits(part.terms()) || coding.hasDigits(part.terms())) {
       return Optional.empty();
     }
     return exact(Limits.overLiterals(part), part.terms().size())

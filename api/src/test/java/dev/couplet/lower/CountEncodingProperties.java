@@ -65,7 +65,13 @@ class CountEncodingProperties {
   }
 
   /** Squares, cubes and products of counts with other decisions, in rules and objectives. */
-  @Property(tries = 120)
+  /** A rule that is a conflict of digits, not of numbers. */
+  @Example
+  void digitsThatConflict() {
+    everyEncodingIsFaithful(77);
+  }
+
+  @Property(tries = 150)
   void everyEncodingIsFaithful(@ForAll long seed) {
     SplittableRandom random = new SplittableRandom(seed);
     Model model = Model.named("counts");
