@@ -6,13 +6,23 @@ import java.util.List;
 
 /** Powers of two below a bound, then the bound as often as it fits, then what is left. */
 record BoundedDigits(long largest) implements CountEncoding {
+  /** Binary. */
+  static final BoundedDigits UNBOUNDED = new BoundedDigits(Long.MAX_VALUE);
+
   @Override
   public String name() {
-    return largest == Long.MAX_VALUE ? "binary" : "binary, amounts up to " + largest;
+    return equals(UNBOUNDED) ? "binary" : "binary, amounts up to " + largest;
   }
 
   @Override
   public Code code(long width) {
+    List<Long> amounts = amounts(width);
+    Polynomial none = Polynomial.builder(amounts.size()).build();
+    return new Code(amounts, none, "nothing, every pattern is a number");
+  }
+
+  /** What each bit adds; none for a width of 0. */
+  List<Long> amounts(long width) {
     List<Long> amounts = new ArrayList<>();
     long held = 0;
     for (long power = 1; held < width; ) {
@@ -21,7 +31,6 @@ record BoundedDigits(long largest) implements CountEncoding {
       held += amount;
       power = power > largest / 2 ? largest : power * 2;
     }
-    Polynomial none = Polynomial.builder(amounts.size()).build();
-    return new Code(amounts, none, "nothing, every pattern is a number");
+    return amounts;
   }
 }

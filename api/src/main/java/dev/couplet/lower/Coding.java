@@ -22,7 +22,8 @@ import java.util.Set;
  * <p>Invariant: {@code bitOf[literal]} is the bit that is 1 exactly where the literal holds, or -1
  * if there is none; then {@code over[literal]} is the literal as a polynomial over all decision
  * bits. {@code start[literal]} is where the bits of the literal's decision begin, {@code
- * codeOf[bit]} which of the codes a bit is of, or -1. Immutable once made.
+ * codeOf[bit]} which of the codes a bit is of, or -1, and {@code folded} the codes whose literals
+ * are not all bits. Immutable once made.
  */
 final class Coding {
   /** The literals {@code first ..} in code, their bits beginning at {@code bit}. */
@@ -30,6 +31,7 @@ final class Coding {
 
   private final Statement statement;
   private final List<Coded> coded = new ArrayList<>();
+  private final List<Coded> folded = new ArrayList<>();
   private final List<Recoded> recoded = new ArrayList<>();
   private final List<String> meanings = new ArrayList<>();
   private final int[] bitOf;
@@ -54,7 +56,7 @@ final class Coding {
       same &= bitOf[literal] == literal;
     }
     this.sameNumbers = same;
-    coded.forEach(this::spread);
+    folded.forEach(this::spread);
     this.codeOf = new int[meanings.size()];
     Arrays.fill(codeOf, -1);
     for (int c = 0; c < coded.size(); c++) {
@@ -82,6 +84,9 @@ final class Coding {
       Coded one = new Coded(decision, group.get(0), meanings.size(), code);
       coded.add(one);
       name(one);
+      if (!isPlain(one)) {
+        folded.add(one);
+      }
     }
   }
 
@@ -289,15 +294,13 @@ final class Coding {
       literals[literal] = bitOf[literal] >= 0 && pattern.get(bitOf[literal]);
     }
     Set<Decision> undecided = new HashSet<>();
-    for (Coded one : coded) {
-      if (!isPlain(one)) {
-        int option = one.code().stoodFor(own(one, pattern));
-        for (int k = 0; k < one.code().options().size(); k++) {
-          literals[one.first() + k] = k == option;
-        }
-        if (option < 0) {
-          undecided.add(one.decision());
-        }
+    for (Coded one : folded) {
+      int option = one.code().stoodFor(own(one, pattern));
+      for (int k = 0; k < one.code().options().size(); k++) {
+        literals[one.first() + k] = k == option;
+      }
+      if (option < 0) {
+        undecided.add(one.decision());
       }
     }
     for (Recoded one : recoded) {
@@ -333,8 +336,8 @@ final class Coding {
         bits[bitOf[literal]] = literals.get(literal);
       }
     }
-    for (Coded one : coded) {
-      for (int k = 0; k < one.code().options().size() && !isPlain(one); k++) {
+    for (Coded one : folded) {
+      for (int k = 0; k < one.code().options().size(); k++) {
         if (literals.get(one.first() + k)) {
           State pattern = one.code().patterns().get(k);
           for (int bit = 0; bit < one.code().bits(); bit++) {

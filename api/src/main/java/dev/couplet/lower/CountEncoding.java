@@ -19,7 +19,7 @@ public interface CountEncoding {
    * 1} bits, amounts up to half the width.
    */
   static CountEncoding binary() {
-    return bounded(Long.MAX_VALUE);
+    return BoundedDigits.UNBOUNDED;
   }
 
   /**

@@ -17,8 +17,12 @@ record Recoded(
     Count count, int first, CountEncoding.Code digits, int bit, CountEncoding.Code code) {
   /** Writes digits over bits, these numbered from {@code literals} on. */
   Polynomial overBits(Polynomial polynomial, int literals) {
-    long width = count.highest() - count.lowest();
-    return new Recoding(first, digits, literals + bit, code, width).of(polynomial);
+    return new Recoding(this, literals + bit).of(polynomial);
+  }
+
+  /** The largest number that the bits hold. */
+  long width() {
+    return count.highest() - count.lowest();
   }
 
   boolean hasDigit(int literal) {

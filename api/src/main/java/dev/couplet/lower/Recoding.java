@@ -19,45 +19,26 @@ import java.util.Map;
  * (Vandermonde): whole numbers stay whole.
  */
 final class Recoding {
-  private final int firstDigit;
-  private final CountEncoding.Code digits;
+  private final Recoded count;
   private final int firstBit;
-  private final CountEncoding.Code code;
-  private final long width;
 
-  /** Both codes in one numbering: digits from {@code firstDigit} on, bits from {@code firstBit}. */
-  Recoding(
-      int firstDigit,
-      CountEncoding.Code digits,
-      int firstBit,
-      CountEncoding.Code code,
-      long width) {
-    this.firstDigit = firstDigit;
-    this.digits = digits;
+  /** Bits are numbered from {@code firstBit} on, in one numbering with the literals. */
+  Recoding(Recoded count, int firstBit) {
+    this.count = count;
     this.firstBit = firstBit;
-    this.code = code;
-    this.width = width;
-  }
-
-  private boolean isDigit(int variable) {
-    return variable >= firstDigit && variable < firstDigit + digits.amounts().size();
   }
 
   /** The same polynomial with no digit in it. */
   Polynomial of(Polynomial polynomial) {
     Map<List<Integer>, Polynomial.Builder> besides = new LinkedHashMap<>();
-    boolean[] any = {false};
     int size = polynomial.size();
     polynomial.forEachTerm(
         (coefficient, product) -> {
-          int[] own = Arrays.stream(product).filter(this::isDigit).toArray();
-          List<Integer> others = Arrays.stream(product).filter(v -> !isDigit(v)).boxed().toList();
-          any[0] |= own.length > 0;
+          int[] own = Arrays.stream(product).filter(count::hasDigit).toArray();
+          List<Integer> others =
+              Arrays.stream(product).filter(v -> !count.hasDigit(v)).boxed().toList();
           besides.computeIfAbsent(others, key -> Polynomial.builder(size)).add(coefficient, own);
         });
-    if (!any[0]) {
-      return polynomial;
-    }
     Polynomial.Builder sum = Polynomial.builder(size);
     besides.forEach(
         (others, function) -> {
@@ -74,6 +55,8 @@ final class Recoding {
   }
 
   private Polynomial overBits(Polynomial function) {
+    CountEncoding.Code digits = count.digits();
+    long width = count.width();
     int degree = function.degree();
     if (degree == digits.amounts().size()) {
       degree = (int) Math.min(width, Integer.MAX_VALUE);
@@ -81,7 +64,7 @@ final class Recoding {
     double[] differences = new double[degree + 1];
     for (int v = 0; v <= degree && v <= width; v++) {
       boolean[] set = digits.pattern(v);
-      differences[v] = Terms.value(function, digit -> set[digit - firstDigit]);
+      differences[v] = Terms.value(function, digit -> set[digit - count.first()]);
     }
     int known = (int) Math.min(degree, width);
     for (int order = 1; order <= known; order++) {
@@ -102,6 +85,7 @@ final class Recoding {
 
   /** C(v, j) over the bits, for j from 0 on. */
   private List<Polynomial> binomials(int highest, int size) {
+    CountEncoding.Code code = count.code();
     List<Polynomial> powers = new ArrayList<>();
     for (int j = 0; j <= highest; j++) {
       powers.add(Polynomial.builder(size).add(j == 0 ? 1 : 0).build());

@@ -1,8 +1,6 @@
 package dev.couplet.lower;
 
 import dev.couplet.form.Polynomial;
-import java.util.ArrayList;
-import java.util.List;
 
 /**
  * A whole number from 0 to a highest value, both included, held in auxiliary bits: powers of two,
@@ -27,14 +25,7 @@ final class Slack {
   }
 
   static long[] coefficients(long highest) {
-    List<Long> coefficients = new ArrayList<>();
-    long held = 0;
-    for (long power = 1; held < highest; power *= 2) {
-      long coefficient = Math.min(power, highest - held);
-      coefficients.add(coefficient);
-      held += coefficient;
-    }
-    return coefficients.stream().mapToLong(Long::longValue).toArray();
+    return BoundedDigits.UNBOUNDED.amounts(highest).stream().mapToLong(Long::longValue).toArray();
   }
 
   int bits() {

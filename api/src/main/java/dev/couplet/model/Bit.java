@@ -26,11 +26,6 @@ public final class Bit extends Literal implements Decision {
   }
 
   @Override
-  public String code() {
-    return "one value of '" + name + "'";
-  }
-
-  @Override
   int index() {
     return index;
   }

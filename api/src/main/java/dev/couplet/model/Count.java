@@ -36,11 +36,6 @@ public final class Count extends Expr implements Decision {
     return highest - lowest + 1;
   }
 
-  @Override
-  public String code() {
-    return "one value of '" + name + "'";
-  }
-
   /** The lowest number it can be. */
   public long lowest() {
     return lowest;

@@ -15,5 +15,7 @@ public sealed interface Decision permits Bit, Spin, Count, Choice, Order, Subset
    * The words under which plans and lowerings speak of the condition that the decision has one
    * value, as they speak of a rule by its name.
    */
-  String code();
+  default String code() {
+    return "one value of '" + name() + "'";
+  }
 }

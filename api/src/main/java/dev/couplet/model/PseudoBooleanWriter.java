@@ -111,16 +111,13 @@ final class PseudoBooleanWriter {
   /** Variables that hold a whole number up to the most, at a price for each unit. */
   private List<Count> counts(String meaning, double most, long factor, BigDecimal price) {
     List<Count> counts = new ArrayList<>();
-    long held = 0;
-    for (long power = 1; held < most; power *= 2) {
-      long coefficient = Math.min(power, (long) most - held);
+    for (long coefficient : Digits.of((long) most)) {
       int variable = statement.literals() + counters.size();
       counters.add(coefficient + " of " + meaning);
       counts.add(new Count(factor * coefficient, variable));
       if (price.signum() != 0) {
         objective.add(price.multiply(BigDecimal.valueOf(coefficient)), variable);
       }
-      held += coefficient;
     }
     return counts;
   }

@@ -26,11 +26,6 @@ public final class Spin extends Expr implements Decision {
     return 2;
   }
 
-  @Override
-  public String code() {
-    return "one value of '" + name + "'";
-  }
-
   /** The fact that the spin is up, +1. */
   public Literal up() {
     return down().not();

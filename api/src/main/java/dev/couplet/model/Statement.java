@@ -225,10 +225,12 @@ public final class Statement {
   public List<Integer> free(Decision decision) {
     require(decision);
     Slot slot = Slot.of(decision);
-    boolean any = slot.groups() == 0 && !fixing.has(decision);
-    return IntStream.range(slot.first(), slot.first() + (any ? slot.literals() : 0))
-        .boxed()
-        .toList();
+    if (slot.groups() > 0 || fixing.has(decision)) {
+      return List.of();
+    }
+    return slot.literals() == 1
+        ? List.of(slot.first())
+        : IntStream.range(slot.first(), slot.first() + slot.literals()).boxed().toList();
   }
 
   /**

@@ -31,11 +31,6 @@ public final class Subset<T> implements Decision {
     return items.size() < Long.SIZE - 1 ? 1L << items.size() : Long.MAX_VALUE;
   }
 
-  @Override
-  public String code() {
-    return "one value of '" + name + "'";
-  }
-
   /** The items to take from, in the order given. */
   public List<T> items() {
     return items.items();

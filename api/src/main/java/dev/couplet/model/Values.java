@@ -121,17 +121,16 @@ final class Values {
 
   /** The same values, each count in the pattern that is its value's own. */
   State normal(Statement statement) {
-    boolean[] normal = literals.toBooleans();
-    boolean changed = false;
+    State normal = literals;
     for (Decision decision : statement.decisions()) {
       if (decision instanceof Count count) {
         boolean[] own = Digits.pattern(of(count) - count.lowest(), count.digits());
         for (int k = 0; k < own.length; k++) {
-          changed |= normal[count.slot().first() + k] != own[k];
-          normal[count.slot().first() + k] = own[k];
+          int literal = count.slot().first() + k;
+          normal = normal.get(literal) == own[k] ? normal : normal.flipped(literal);
         }
       }
     }
-    return changed ? State.of(normal) : literals;
+    return normal;
   }
 }

@@ -9,6 +9,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
@@ -47,12 +48,7 @@ final class OverrunCommand implements Callable<Integer> {
       description = "torus: and the sides of a periodic lattice (default: ${DEFAULT-VALUE}).")
   private List<String> lattices = List.of("torus:100x100x100");
 
-  @Option(
-      names = "--couplings",
-      paramLabel = "C",
-      description =
-          "Uniform on the integers -C..C without zero, or 'gauss' (default: ${DEFAULT-VALUE}).")
-  private String couplings = "1";
+  @Mixin private CouplingOptions coupled = new CouplingOptions();
 
   @Option(
       names = "--method",
@@ -76,21 +72,15 @@ final class OverrunCommand implements Callable<Integer> {
       description = "The number of threads (default: ${DEFAULT-VALUE}).")
   private int threads = 1;
 
-  @Option(
-      names = "--seed",
-      paramLabel = "N",
-      description = "The seed of lattices and draws (default: ${DEFAULT-VALUE}).")
-  private long seed = 1;
-
   @Override
   public Integer call() {
-    Couplings distribution = Couplings.parse(couplings);
+    Couplings distribution = coupled.distribution();
     List<Torus> tori = lattices.stream().map(Torus::parse).toList();
     List<Methods.Method> chosen = methods.stream().map(Methods::named).toList();
     List<Effort> efforts = efforts();
     Table table = new Table(spec.commandLine().getOut(), COLUMNS);
     for (Torus torus : tori) {
-      Qubo form = torus.couple(distribution, seed).toQubo();
+      Qubo form = torus.couple(distribution, coupled.seed()).toQubo();
       for (Methods.Method method : chosen) {
         for (Effort effort : efforts) {
           table.row(cells(torus + ":" + distribution, form, method, effort));
@@ -103,7 +93,7 @@ final class OverrunCommand implements Callable<Integer> {
   private List<Effort> efforts() {
     List<Effort> efforts = new ArrayList<>();
     for (double limit : limits) {
-      efforts.add(TimedOptions.within("--seconds", limit).seed(seed).threads(threads));
+      efforts.add(TimedOptions.within("--seconds", limit).seed(coupled.seed()).threads(threads));
     }
     return efforts;
   }

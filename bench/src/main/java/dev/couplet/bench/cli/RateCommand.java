@@ -12,6 +12,7 @@ import java.time.Duration;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
@@ -82,26 +83,15 @@ final class RateCommand implements Callable<Integer> {
       description = "Passes over all sites in a draw (default: ${DEFAULT-VALUE}).")
   private int sweeps = 1000;
 
-  @Option(
-      names = "--couplings",
-      paramLabel = "C",
-      description =
-          "Uniform on the integers -C..C without zero, or 'gauss' (default: ${DEFAULT-VALUE}).")
-  private String couplings = "1";
-
-  @Option(
-      names = "--seed",
-      paramLabel = "N",
-      description = "The seed of lattice and draws (default: ${DEFAULT-VALUE}).")
-  private long seed = 1;
+  @Mixin private CouplingOptions coupled = new CouplingOptions();
 
   @Override
   public Integer call() {
     Torus torus = Torus.parse(lattice);
-    Couplings distribution = Couplings.parse(couplings);
+    Couplings distribution = coupled.distribution();
     Methods.Thermal thermal = Methods.thermal(method);
-    Effort effort = Effort.draws(draws).sweeps(sweeps).seed(seed);
-    Ising spins = torus.couple(distribution, seed);
+    Effort effort = Effort.draws(draws).sweeps(sweeps).seed(coupled.seed());
+    Ising spins = torus.couple(distribution, coupled.seed());
     double unit = rootMeanSquare(spins);
     Sampler sampler = thermal.between(unit / FIRST, unit / LAST);
     Qubo form = spins.toQubo();
